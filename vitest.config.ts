@@ -1,0 +1,51 @@
+import react from '@vitejs/plugin-react'
+import { fileURLToPath } from 'node:url'
+import { defineConfig } from 'vitest/config'
+
+const serverOnly = fileURLToPath(new URL('./scripts/support/server-only.ts', import.meta.url))
+const shared = {
+  resolve: { tsconfigPaths: true, alias: { 'server-only': serverOnly } },
+}
+
+/**
+ * unit: pure code and the architecture, no database. db: services, queries and HTTP handlers against a
+ * real PostgreSQL (a clone of a template per worker). ui: components in jsdom.
+ */
+export default defineConfig({
+  test: {
+    reporters: ['default'],
+    projects: [
+      {
+        ...shared,
+        test: {
+          name: 'unit',
+          include: ['tests/{core,architecture,contracts,messages,emails,scripts}/**/*.test.{ts,tsx}'],
+          environment: 'node',
+        },
+      },
+      {
+        ...shared,
+        test: {
+          name: 'db',
+          include: ['tests/{services,queries,http,gateways,jobs,auth,db,sandbox,seeders}/**/*.test.{ts,tsx}'],
+          environment: 'node',
+          setupFiles: ['tests/support/db-setup.ts'],
+          globalSetup: ['tests/support/db-global.ts'],
+          testTimeout: 20_000,
+          hookTimeout: 60_000,
+          maxWorkers: 2,
+        },
+      },
+      {
+        ...shared,
+        plugins: [react()],
+        test: {
+          name: 'ui',
+          include: ['tests/ui/**/*.test.{ts,tsx}'],
+          environment: 'jsdom',
+          setupFiles: ['tests/support/ui-setup.ts'],
+        },
+      },
+    ],
+  },
+})
