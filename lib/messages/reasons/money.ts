@@ -1,0 +1,2 @@
+/** Refusals of the services under money. */
+export const money: Record<string, string> = {}

@@ -1,0 +1,2 @@
+/** Refusals of the services under post. */
+export const post: Record<string, string> = {}

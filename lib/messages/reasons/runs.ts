@@ -1,0 +1,2 @@
+/** Refusals of the services under runs. */
+export const runs: Record<string, string> = {}

@@ -1,0 +1,2 @@
+/** Refusals of the services under workshops. */
+export const workshops: Record<string, string> = {}

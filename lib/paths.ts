@@ -1,0 +1,111 @@
+/**
+ * Every address of the application. Slugs and ids are handed in as they stand in the database; each is encoded
+ * here, once. Pages take `draft` when a form comes back with its mistakes (see lib/http/form-draft.ts).
+ */
+const part = encodeURIComponent
+
+export const paths = {
+  home: '/',
+  start: '/start',
+  terms: '/terms',
+  privacy: '/privacy',
+  accessibility: '/accessibility',
+  signIn: (next?: string) => (next ? `/signin?next=${part(next)}` : '/signin'),
+  signInLink: (token: string) => `/signin/link/${part(token)}`,
+  signInSent: '/signin/sent',
+  secondFactor: (next?: string) => (next ? `/account/code?next=${part(next)}` : '/account/code'),
+
+  workshop: (workshop: string) => `/w/${part(workshop)}`,
+  module: (workshop: string, module: string) => `/w/${part(workshop)}/${part(module)}`,
+  moduleDraft: (workshop: string, module: string, draft: string) =>
+    `/w/${part(workshop)}/${part(module)}/form/${part(draft)}`,
+  signUpSent: (workshop: string, module: string) => `/w/${part(workshop)}/${part(module)}/sent`,
+  orderForm: (workshop: string, module: string) => `/account/order/${part(workshop)}/${part(module)}`,
+  confirm: (token: string) => `/confirm/${part(token)}`,
+  takeBack: (token: string) => `/take-back/${part(token)}`,
+  unsubscribe: (token: string) => `/unsubscribe/${part(token)}`,
+  invitation: (token: string) => `/invitation/${part(token)}`,
+
+  account: '/account',
+  accountOrder: (order: string) => `/account/orders/${part(order)}`,
+  accountOrderCancel: (order: string) => `/account/orders/${part(order)}/cancel`,
+  accountData: '/account/data',
+
+  admin: (workshop: string) => `/admin/${part(workshop)}`,
+  adminModules: (workshop: string) => `/admin/${part(workshop)}/modules`,
+  adminModuleNew: (workshop: string) => `/admin/${part(workshop)}/modules/new`,
+  adminModule: (workshop: string, module: string) => `/admin/${part(workshop)}/modules/${part(module)}`,
+  adminRuns: (workshop: string) => `/admin/${part(workshop)}/runs`,
+  adminRunNew: (workshop: string) => `/admin/${part(workshop)}/runs/new`,
+  adminRun: (workshop: string, run: string) => `/admin/${part(workshop)}/runs/${part(run)}`,
+  adminRunPage: (
+    workshop: string,
+    run: string,
+    page: 'demand' | 'costs' | 'orders' | 'buying' | 'bench' | 'packing' | 'money' | 'messages',
+  ) => `/admin/${part(workshop)}/runs/${part(run)}/${page}`,
+  adminRunDeed: (workshop: string, run: string, deed: 'open' | 'lock' | 'call-off' | 'ask-balances') =>
+    `/admin/${part(workshop)}/runs/${part(run)}/${deed}`,
+  adminBulk: (workshop: string, bulk: string) => `/admin/${part(workshop)}/bulk/${part(bulk)}`,
+  adminSettings: (workshop: string) => `/admin/${part(workshop)}/settings`,
+  bench: (workshop: string) => `/bench/${part(workshop)}`,
+  packing: (workshop: string) => `/packing/${part(workshop)}`,
+  packingParcel: (workshop: string, parcel: string) => `/packing/${part(workshop)}/parcels/${part(parcel)}`,
+  packingPapers: (workshop: string, paper: 'list' | 'slips') => `/packing/${part(workshop)}/papers/${paper}`,
+  packingSlip: (workshop: string, parcel: string) =>
+    `/packing/${part(workshop)}/parcels/${part(parcel)}/slip`,
+  host: '/host',
+
+  sandbox: '/sandbox',
+  sandboxMail: (to?: string) => (to ? `/sandbox/mail?to=${part(to)}` : '/sandbox/mail'),
+
+  api: {
+    health: '/api/health',
+    openapi: '/api/openapi.json',
+    auth: '/api/auth',
+    signIn: '/api/signin',
+    signInCode: '/api/signin/code',
+    signInCallback: '/api/auth/callback/email',
+    signOut: '/api/signout',
+    secondFactor: '/api/account/second-factor',
+    secondFactorCode: '/api/account/second-factor/code',
+    module: (workshop: string, module: string) => `/api/w/${part(workshop)}/${part(module)}`,
+    signUps: '/api/signups',
+    signUpConfirm: '/api/signups/confirm',
+    signUpTakeBack: '/api/signups/take-back',
+    unsubscribe: (token: string) => `/api/unsubscribe/${part(token)}`,
+    orders: '/api/orders',
+    orderPay: (order: string) => `/api/orders/${part(order)}/pay`,
+    orderCancel: (order: string) => `/api/orders/${part(order)}/cancel`,
+    orderAddress: (order: string) => `/api/orders/${part(order)}/address`,
+    accountOrders: '/api/account/orders',
+    workshops: '/api/workshops',
+    hostWorkshop: (workshop: string, deed: 'open' | 'suspend' | 'reopen') =>
+      `/api/host/workshops/${part(workshop)}/${deed}`,
+    admin: (workshop: string) => `/api/admin/${part(workshop)}`,
+    adminAccount: (workshop: string) => `/api/admin/${part(workshop)}/payment-account`,
+    adminSettings: (workshop: string, what: 'postage' | 'terms' | 'details' | 'destinations' | 'members') =>
+      `/api/admin/${part(workshop)}/settings/${what}`,
+    adminModules: (workshop: string) => `/api/admin/${part(workshop)}/modules`,
+    adminModule: (workshop: string, module: string) => `/api/admin/${part(workshop)}/modules/${part(module)}`,
+    adminModulePart: (
+      workshop: string,
+      module: string,
+      what: 'offers' | 'revisions' | 'lessons' | 'publish' | 'first-unit' | 'parts',
+    ) => `/api/admin/${part(workshop)}/modules/${part(module)}/${what}`,
+    adminRuns: (workshop: string) => `/api/admin/${part(workshop)}/runs`,
+    adminRun: (workshop: string, run: string) => `/api/admin/${part(workshop)}/runs/${part(run)}`,
+    adminRunDeed: (
+      workshop: string,
+      run: string,
+      deed: 'open' | 'lock' | 'call-off' | 'ask-balances' | 'lower-minimum' | 'plan',
+    ) => `/api/admin/${part(workshop)}/runs/${part(run)}/${deed}`,
+    adminBulk: (workshop: string, bulk: string) => `/api/admin/${part(workshop)}/bulk/${part(bulk)}`,
+    packingQueue: (workshop: string) => `/api/packing/${part(workshop)}/queue`,
+    packingParcel: (workshop: string, parcel: string, deed: 'pack' | 'hand-over' | 'reopen') =>
+      `/api/packing/${part(workshop)}/parcels/${part(parcel)}/${deed}`,
+    packingList: (workshop: string) => `/api/packing/${part(workshop)}/list.pdf`,
+    packingSlip: (workshop: string, parcel: string) =>
+      `/api/packing/${part(workshop)}/parcels/${part(parcel)}/slip.pdf`,
+    webhook: '/api/webhooks/stripe',
+  },
+} as const
