@@ -1,0 +1,7 @@
+/**
+ * What can fall due. Each kind has a handler in `lib/tasks/due-kinds.ts`; the subject is the id of the row
+ * it is about (an order for `hold_ended`, a run for `decide_by`, …).
+ */
+export const DUE_KINDS = [] as const
+
+export type DueKind = (typeof DUE_KINDS)[number]

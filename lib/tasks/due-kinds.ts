@@ -1,0 +1,12 @@
+import 'server-only'
+import type { DueKind } from '@/lib/jobs/due-kinds'
+
+export type DueItem = { kind: DueKind; subjectId: string; workshopId: string | null; dueAt: Date }
+
+/**
+ * Does what has fallen due. May run again after a crash: it asks the state of its subject first and does
+ * nothing when the moment has passed. It may set the same kind again for a later instant.
+ */
+export type DueHandler = (item: DueItem, now: Date) => Promise<void>
+
+export const DUE_HANDLERS: { readonly [K in DueKind]: DueHandler } = {}

@@ -1,0 +1,10 @@
+import 'server-only'
+import type { Tasks } from '@/lib/jobs/task'
+import { due } from './due'
+import { evictPages } from './evict-pages'
+
+/** The handler of every job. */
+export const TASKS: Tasks = {
+  due,
+  evict_pages: evictPages,
+}
