@@ -1,0 +1,26 @@
+type Fact = { key?: string; name: React.ReactNode; value: React.ReactNode; kind?: 'text' | 'figures' }
+
+/** Names and values, ruled; values of kind 'figures' stand on a common right edge. */
+export function Facts({ facts }: { facts: readonly Fact[] }) {
+  return (
+    <dl className="border-rule text-15 border-t">
+      {facts.map((fact, index) => (
+        <div
+          key={fact.key ?? index}
+          className="border-rule flex flex-wrap items-baseline justify-between gap-x-6 border-b py-2"
+        >
+          <dt className="text-quiet">{fact.name}</dt>
+          <dd
+            className={
+              fact.kind === 'figures'
+                ? 'figures grow text-right'
+                : 'min-w-0 grow-[2] basis-1/2 sm:max-w-[65%]'
+            }
+          >
+            {fact.value}
+          </dd>
+        </div>
+      ))}
+    </dl>
+  )
+}
