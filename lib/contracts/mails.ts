@@ -312,6 +312,8 @@ export const SECRET_LINKS: { readonly [K in MailKind]?: readonly (keyof MailProp
   staff_invitation: ['acceptUrl'],
 }
 
+export type { MailUnsubscribe } from '@/lib/contracts/mail-facts'
+
 /** Who signs a mail. Read from the workshop when the mail is sent; Brimline itself where there is no workshop. */
 export type MailSender = {
   readonly workshop: string
