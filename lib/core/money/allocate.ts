@@ -56,7 +56,7 @@ function compare(a: bigint, b: bigint): number {
  * Accuracy: exact.
  * Source:   Webster / Sainte-Laguë; Balinski & Young, Fair Representation, app. A.
  * Cost:     independent of the total; weights² at worst.
- * @example  divide(10, [1, 1, 4])  // → ok([2, 1, 7])
+ * @example  divide(10, [1, 1, 4])  // → ok([2, 2, 6])
  */
 export function divide(total: number, weights: readonly number[]): Result<number[], 'no_weight'> {
   if (!Number.isSafeInteger(total) || total < 0) {

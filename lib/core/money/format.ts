@@ -7,7 +7,7 @@ import { plainMoney } from '@/lib/core/money/plain'
  * Domain:   a safe integer, an ISO 4217 currency, a well-formed locale tag → otherwise RangeError.
  * Accuracy: exact: digits are handed to the formatter as text, never as a float.
  * @example  formatMoney(1890050, 'USD', 'en')  // → '$18,900.50'
- * @example  formatMoney(2500, 'HUF', 'en')  // → 'HUF 25.00'
+ * @example  formatMoney(2500, 'HUF', 'en')  // → 'HUF\u00a025.00'
  */
 export function formatMoney(minor: number, code: string, locale: string): string {
   const digits = exponentOf(code)
