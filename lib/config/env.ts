@@ -78,6 +78,13 @@ export function env(): Env {
   return known
 }
 
+/** The database alone, for scripts that need nothing else. Throws when it is not given. */
+export function databaseUrl(): string {
+  const url = given().DATABASE_URL
+  if (!url) throw new Error('DATABASE_URL is missing: the address of the PostgreSQL database.')
+  return url
+}
+
 /** What is wrong with the settings, a sentence each; empty when nothing is. */
 export function checkEnv(): string[] {
   const parsed = Settings.safeParse(given())

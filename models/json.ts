@@ -1,0 +1,108 @@
+import type { Minor } from '@/lib/core/brand'
+import type { OfferKind } from './words'
+
+/** Something on a front panel; millimetres from its top left corner to the centre. */
+export type FrontPanelControl = {
+  kind: 'knob' | 'jack' | 'switch' | 'button' | 'light' | 'slider' | 'display'
+  label: string
+  xMm: number
+  yMm: number
+  /** Diameter, or the longer side; millimetres. */
+  sizeMm: number
+}
+
+export type SpecificationLine = { name: string; value: string }
+
+/** Price of a weight: `upTo` grams, inclusive; tax as the workshop's prices. */
+export type PostageBand = { upTo: number; priceMinor: Minor }
+
+/** What the postage of an order was quoted from. */
+export type PostageQuote = {
+  zoneId: string
+  serviceId: string
+  serviceName: string
+  grams: number
+  priceMinor: Minor
+}
+
+/** An answer as it stood when it was given. `isDefault`: nobody chose it, it stands in. */
+export type ChosenAnswer = {
+  choiceId: string
+  question: string
+  answerId: string
+  label: string
+  surchargeMinor: Minor
+  isDefault: boolean
+}
+
+/** Lines and sums of an order, as a change found or left them. */
+export type OrderTerms = {
+  lines: { runOfferId: string; quantity: number; totalMinor: Minor; choices: ChosenAnswer[] }[]
+  addressId: string | null
+  postageMinor: Minor
+  taxMinor: Minor
+  totalMinor: Minor
+  depositMinor: Minor
+}
+
+/** One difference between the ledger and the provider's list; ids and sums only. */
+export type ReconciliationDifference = {
+  kind: 'missing_here' | 'missing_there' | 'amount' | 'currency'
+  id: string
+  ours: { amount: number; currency: string } | null
+  theirs: { amount: number; currency: string } | null
+}
+
+/** A line of an invoice; `unitMinor` and `grossMinor` with tax. */
+export type InvoiceLine = {
+  text: string
+  quantity: number
+  unitMinor: Minor
+  grossMinor: Minor
+  taxMinor: Minor
+  taxBasisPoints: number
+}
+
+/** A step of a test plan; limits are closed and in `unit`, decimal strings. */
+export type TestStep = {
+  key: string
+  setUp: string
+  measure: string
+  kind: 'measure' | 'yes_no' | 'text'
+  low: string | null
+  high: string | null
+  unit: string | null
+  caution: string | null
+}
+
+/** A step of a schedule; working days. */
+export type PlanStep = {
+  id: string
+  name: string
+  optimistic: number
+  likely: number
+  pessimistic: number
+  after: string[]
+}
+
+/** Who places a part, per offer that needs it. */
+export type PlacedByOffer = { [K in OfferKind]?: 'assembler' | 'maker' | 'buyer' }
+
+/** How a lot was judged: the plan, and the defects found. */
+export type SamplingRecord = {
+  level: string
+  aqlPercent: number
+  sample: number
+  accept: number
+  inspectAll: boolean
+  defects: number
+}
+
+/** A size and format made of a stored picture. */
+export type FileVariant = {
+  sha256: string
+  mediaType: string
+  widthPx: number
+  heightPx: number
+  byteCount: number
+}
