@@ -5,9 +5,9 @@ const words = mailWords.orderCancelled
 
 export const orderCancelled: Write<'order_cancelled'> = (facts, say) => ({
   subject: words.subject(facts.orderNumber, facts.module),
-  preview: words.by[facts.by],
+  preview: words.cause[facts.cause],
   blocks: blocks(
-    para(words.by[facts.by]),
+    para(words.cause[facts.cause]),
     facts.reason !== null && para(words.reason),
     facts.reason !== null && written(facts.reason),
     para(

@@ -12,7 +12,7 @@ export const refundSent: Write<'refund_sent'> = (facts, say) => {
     preview: lead,
     blocks: blocks(
       para(lead),
-      para(words.why[facts.why]),
+      para(words.cause[facts.cause]),
       para(words.wait),
       rows({ label: labels.order, value: facts.orderNumber }, { label: labels.module, value: facts.module }),
       link(labels.orderPage, facts.orderUrl),

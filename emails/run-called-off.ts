@@ -5,7 +5,7 @@ const words = mailWords.runCalledOff
 const { labels } = mailWords
 
 export const runCalledOff: Write<'run_called_off'> = (facts, say) => {
-  const lead = facts.by === 'maker' ? words.byMaker : words.undecided
+  const lead = words[facts.cause]
   const refund = say.money(facts.refundMinor, facts.currency)
   return {
     subject: words.subject(facts.module),

@@ -9,7 +9,12 @@ export const oneLine = (longest = 200) =>
     .regex(/^[^\p{Cc}\u2028\u2029]+$/u, 'must be one line')
 
 /** What a maker wrote: paragraphs are parted by an empty line; no markup is read from it. */
-export const prose = (longest = 10_000) => z.string().min(1).max(longest)
+export const prose = (longest = 10_000) =>
+  z
+    .string()
+    .min(1)
+    .max(longest)
+    .regex(/^[^\0]*$/, 'must not hold a NUL character')
 
 /** An absolute address, made by the caller from lib/paths and the base URL. */
 export const link = z.url({ protocol: /^https?$/ }).max(2000)
@@ -40,8 +45,4 @@ export const offerPromise = z.strictObject({ offer, postedBy: day })
 /** What every mail about an order names. `orderUrl` is the customer's own page of it. */
 export const ofOrder = { orderNumber: oneLine(40), module: oneLine(), orderUrl: link }
 
-/** `pageUrl` is opened by a person, `postUrl` takes the one-click POST of RFC 8058. */
-export const unsubscribe = z.strictObject({ pageUrl: link, postUrl: link })
-
 export type MailLine = z.infer<typeof mailLine>
-export type MailUnsubscribe = z.infer<typeof unsubscribe>

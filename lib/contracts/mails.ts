@@ -13,8 +13,32 @@ import {
   offerPromise,
   oneLine,
   prose,
-  unsubscribe,
 } from '@/lib/contracts/mail-facts'
+
+const REFUND_CAUSES = [
+  'cancelled',
+  'withdrawn',
+  'run_called_off',
+  'late_capture',
+  'surplus',
+  'order_change',
+  'lapsed',
+  'problem',
+  'notice',
+  'postage',
+  'price_fell',
+  'owner',
+] as const
+/** Withdrawal and a called-off run have mails of their own. */
+const CANCEL_CAUSES = [
+  'customer',
+  'owner',
+  'notice',
+  'silence',
+  'broken_promise',
+  'run_closed',
+  'left_queue',
+] as const
 
 const balanceWhen = z.enum(['at_lock', 'units_passed', 'before_packing'])
 const money = { currency }
@@ -27,7 +51,7 @@ const balance = { ...ofOrder, ...money, amountMinor, payUrl: link }
  *
  * A mail is unique on (kind, subject, version), so the subject is what there is *one of per receiver*: the order,
  * the sign-up, the invitation, the parcel, the refund, the problem. What repeats on the same subject counts its
- * version up: `balance_reminder` 1–3, `run_update` the update's number, `delay_notice` the notice's number.
+ * version up: `balance_reminder` 1–3, `place_free` once per offered place, `problem_answered` per answer.
  */
 export const MAILS = {
   /** Subject: the sign-up. `deleteOn`: when an unconfirmed one is deleted. */
@@ -61,7 +85,6 @@ export const MAILS = {
     decideBy: day,
     opensToAllAt: instant,
     takeBackUrl: link,
-    unsubscribe,
   }),
   /** Subject: the order. Also the confirmation of the contract on a durable medium, hence the whole terms. */
   deposit_received: z.strictObject({
@@ -107,11 +130,11 @@ export const MAILS = {
     balanceWhen,
     promises: z.array(offerPromise).min(1),
   }),
-  /** Subject: the order. `by`: the maker, or the product itself when nobody decided in time. */
+  /** Subject: the order. `cause` `clock`: nobody decided in time. */
   run_called_off: z.strictObject({
     ...ofOrder,
     ...money,
-    by: z.enum(['maker', 'undecided']),
+    cause: z.enum(['owner', 'clock']),
     reason: prose(2000).nullable(),
     refundMinor: amountMinor,
   }),
@@ -154,22 +177,21 @@ export const MAILS = {
     depositMinor: amountMinor,
     depositThen: z.enum(['returned', 'kept']),
   }),
-  /** Subject: the order (or the sign-up, for those who asked for news); version: the update's number. */
+  /** Subject: `{update}.{person}`, so that each receiver gets it once whatever they are. */
   run_update: z.strictObject({
     module: oneLine(),
     title: oneLine(),
     text: prose(20_000),
     updateUrl: link,
-    unsubscribe,
   }),
   /**
-   * Subject: the order; version: the notice's number. `occasion` `passed` is the mail of the day on which a promise
-   * passed without a notice. `silenceMeans` with `answerBy` and `refundBy` are those of `delayRule`.
+   * Subject: the notice's answer row, one per order. `occasion` `broken_promise` is the mail of the day on which a
+   * promise passed without a notice. `silenceMeans`, `answerBy` and `refundBy` are those of `delayRule`.
    */
   delay_notice: z.strictObject({
     ...ofOrder,
     ...money,
-    occasion: z.enum(['ahead', 'passed']),
+    occasion: z.enum(['delay', 'broken_promise']),
     delays: z.array(z.strictObject({ offer, promisedBy: day, revisedBy: day.nullable() })).min(1),
     reason: prose(4000).nullable(),
     silenceMeans: z.enum(['wait', 'cancel']),
@@ -178,7 +200,7 @@ export const MAILS = {
     refundBy: day.nullable(),
     noticeUrl: link,
   }),
-  /** Subject: the order; version: the notice's number. Something stated on the page changed; cancelling is free. */
+  /** Subject: the notice's answer row. Something stated on the page changed; cancelling is free. */
   change_notice: z.strictObject({
     ...ofOrder,
     ...money,
@@ -232,23 +254,14 @@ export const MAILS = {
     ...ofOrder,
     ...money,
     amountMinor,
-    why: z.enum([
-      'cancelled',
-      'called_off',
-      'withdrawn',
-      'lapsed',
-      'late_payment',
-      'delay',
-      'problem',
-      'other',
-    ]),
+    cause: z.enum(REFUND_CAUSES),
     cardEnding,
   }),
   /** Subject: the order. */
   order_cancelled: z.strictObject({
     ...ofOrder,
     ...money,
-    by: z.enum(['customer', 'maker', 'silence']),
+    cause: z.enum(CANCEL_CAUSES),
     reason: prose(2000).nullable(),
     refundMinor: amountMinor,
   }),
@@ -296,7 +309,10 @@ export type MailKind = keyof typeof MAILS
 export type MailProps<K extends MailKind> = z.infer<(typeof MAILS)[K]>
 export const MAIL_KINDS = Object.keys(MAILS) as MailKind[]
 
-/** News and invitations: only these may be unsubscribed from; the rest is what the contract needs. */
+/**
+ * News and invitations: only these may be unsubscribed from; the rest is what the contract needs. Their links are
+ * made when the mail is sent.
+ */
 export const UNSUBSCRIBABLE = ['deposits_open', 'run_update'] as const satisfies readonly MailKind[]
 
 /**
@@ -306,13 +322,10 @@ export const UNSUBSCRIBABLE = ['deposits_open', 'run_update'] as const satisfies
 export const SECRET_LINKS: { readonly [K in MailKind]?: readonly (keyof MailProps<K>)[] } = {
   confirm_signup: ['confirmUrl'],
   signup_confirmed: ['takeBackUrl'],
-  deposits_open: ['takeBackUrl', 'unsubscribe'],
-  run_update: ['unsubscribe'],
+  deposits_open: ['takeBackUrl'],
   sign_in_link: ['signInUrl'],
   staff_invitation: ['acceptUrl'],
 }
-
-export type { MailUnsubscribe } from '@/lib/contracts/mail-facts'
 
 /** Who signs a mail. Read from the workshop when the mail is sent; Brimline itself where there is no workshop. */
 export type MailSender = {

@@ -19,7 +19,6 @@ const order = {
   currency: 'EUR',
 }
 const ofOrder = { orderNumber: order.orderNumber, module: order.module, orderUrl: order.orderUrl }
-const unsubscribe = { pageUrl: `${site}/unsubscribe/${token}`, postUrl: `${site}/api/unsubscribe/${token}` }
 const kit = { module: 'Rowlock', offer: 'kit' as const, quantity: 2 }
 const choices = [{ question: 'Front panel finish', answer: 'Sand' }]
 const promises = [{ offer: 'kit' as const, postedBy: '2027-09-30' }]
@@ -47,7 +46,6 @@ export const sampleFacts: { readonly [K in MailKind]: MailProps<K> } = {
     decideBy: '2027-05-04',
     opensToAllAt: '2027-03-03T09:00:00Z',
     takeBackUrl: `${site}/take-back/${token}`,
-    unsubscribe,
   },
   deposit_received: {
     ...order,
@@ -88,7 +86,7 @@ export const sampleFacts: { readonly [K in MailKind]: MailProps<K> } = {
     balanceWhen: 'units_passed',
     promises,
   },
-  run_called_off: { ...order, by: 'maker', reason: 'The slider is no longer made.', refundMinor: 5000 },
+  run_called_off: { ...order, cause: 'owner', reason: 'The slider is no longer made.', refundMinor: 5000 },
   balance_coming: {
     ...order,
     amountMinor: 15190,
@@ -128,11 +126,10 @@ export const sampleFacts: { readonly [K in MailKind]: MailProps<K> } = {
     title: 'the boards are here',
     text: 'All 70 boards arrived on Tuesday.\n\nWe start with the power stage next week:\nthree a day, then the clock inputs.',
     updateUrl: `${site}/w/hollow-pier/rowlock#updates`,
-    unsubscribe,
   },
   delay_notice: {
     ...order,
-    occasion: 'ahead',
+    occasion: 'delay',
     delays: [{ offer: 'kit', promisedBy: '2027-09-30', revisedBy: '2027-11-15' }],
     reason: 'The jacks are late by six weeks.',
     silenceMeans: 'cancel',
@@ -182,8 +179,8 @@ export const sampleFacts: { readonly [K in MailKind]: MailProps<K> } = {
     returnTo: ['Hollow Pier Modular', 'Kai 7', '20457 Hamburg', 'Germany'],
     returnBy: '2027-10-17',
   },
-  refund_sent: { ...order, amountMinor: 20190, why: 'withdrawn', cardEnding: '4242' },
-  order_cancelled: { ...order, by: 'customer', reason: null, refundMinor: 5000 },
+  refund_sent: { ...order, amountMinor: 20190, cause: 'withdrawn', cardEnding: '4242' },
+  order_cancelled: { ...order, cause: 'customer', reason: null, refundMinor: 5000 },
   sign_in_link: { signInUrl: `${site}/signin/link/${token}`, validMinutes: 10 },
   staff_invitation: {
     role: 'packer',

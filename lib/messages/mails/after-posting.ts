@@ -57,15 +57,19 @@ export const withdrawalAcknowledged = {
 
 export const refundSent = {
   subject: (amount: string, number: string) => `${amount} is on its way back: order ${number}`,
-  why: {
+  cause: {
     cancelled: 'Your order was cancelled.',
-    called_off: 'The run was called off.',
     withdrawn: 'You withdrew from the order.',
+    run_called_off: 'The run was called off.',
+    late_capture: 'Your payment came when there was no place for it any more.',
+    surplus: 'More had been paid than was due.',
+    order_change: 'Your order was changed.',
     lapsed: 'The order lapsed.',
-    late_payment: 'Your payment came when there was no place for it any more.',
-    delay: 'The order was not posted by the promised day.',
     problem: 'It settles the problem you reported.',
-    other: 'It belongs to your order.',
+    notice: 'You chose to cancel after our notice.',
+    postage: 'The postage turned out lower.',
+    price_fell: 'The price is lower now, and that holds for your order too.',
+    owner: 'It belongs to your order.',
   },
   lead: (amount: string) => `We have sent ${amount} back, the way it was paid.`,
   toCard: (amount: string, card: string) => `We have sent ${amount} back to the card ending in ${card}.`,
@@ -74,10 +78,14 @@ export const refundSent = {
 
 export const orderCancelled = {
   subject: (number: string, module: string) => `Order ${number} is cancelled: ${module}`,
-  by: {
+  cause: {
     customer: 'You cancelled your order.',
-    maker: 'We had to cancel your order.',
+    owner: 'We had to cancel your order.',
+    notice: 'You chose to cancel after our notice.',
     silence: 'Your order is cancelled, because our notice about the new date was not answered.',
+    broken_promise: 'You cancelled your order after the promised date had passed.',
+    run_closed: 'The run is closed and no place came free for you.',
+    left_queue: 'You left the waiting list.',
   },
   reason: 'The reason:',
   refund: (amount: string) =>

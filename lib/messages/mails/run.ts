@@ -11,8 +11,8 @@ export const runLocked = {
 
 export const runCalledOff = {
   subject: (module: string) => `${module}: the run is called off`,
-  byMaker: 'We have called the run off; it will not be built.',
-  undecided: 'Nobody decided about the run in time, so it called itself off. It will not be built.',
+  owner: 'We have called the run off; it will not be built.',
+  clock: 'Nobody decided about the run in time, so it called itself off. It will not be built.',
   reason: 'The reason:',
   refund: (amount: string) =>
     `You get ${amount} back, the way it was paid. You need not do anything; another mail follows when it is on its way.`,
@@ -36,12 +36,12 @@ export const changeNotice = {
 
 export const delayNotice = {
   subject: {
-    ahead: (module: string) => `${module}: later than promised, please choose`,
-    passed: (module: string) => `${module}: the promised date has passed`,
+    delay: (module: string) => `${module}: later than promised, please choose`,
+    broken_promise: (module: string) => `${module}: the promised date has passed`,
   },
   lead: {
-    ahead: (number: string) => `We cannot post your order ${number} by the day we promised.`,
-    passed: (number: string) =>
+    delay: (number: string) => `We cannot post your order ${number} by the day we promised.`,
+    broken_promise: (number: string) =>
       `Your order ${number} should have been posted by now, and we did not tell you in time. We are sorry.`,
   },
   promised: (promisedBy: string) => `Promised by ${promisedBy}`,
