@@ -1,14 +1,15 @@
 import 'server-only'
 import { DatabaseError, type Transaction } from 'sequelize'
-import type { Result } from '@/lib/core/result'
 import { sequelize } from './sequelize'
 
 const TRIES = 5
 /** Serialization failure and deadlock: nothing was written, the same again may succeed. */
 const WORTH_REPEATING = new Set(['40001', '40P01'])
 
-class Refused<R extends string> extends Error {
-  constructor(readonly refusal: { readonly ok: false; readonly reason: R }) {
+type Refusal = { readonly ok: false; readonly reason: string }
+
+class Refused extends Error {
+  constructor(readonly refusal: Refusal) {
     super(refusal.reason)
   }
 }
@@ -18,9 +19,9 @@ class Refused<R extends string> extends Error {
  * Run again, up to five times in all, when the database broke off a deadlock or a serialization failure; `fn` must
  * therefore do nothing outside `tx`.
  */
-export async function inTransaction<T, R extends string = never>(
-  fn: (tx: Transaction) => Promise<Result<T, R>>,
-): Promise<Result<T, R>> {
+export async function inTransaction<A extends { readonly ok: true } | Refusal>(
+  fn: (tx: Transaction) => Promise<A>,
+): Promise<A> {
   for (let attempt = 1; ; attempt += 1) {
     try {
       return await sequelize.transaction(async (tx) => {
@@ -29,7 +30,7 @@ export async function inTransaction<T, R extends string = never>(
         return result
       })
     } catch (error) {
-      if (error instanceof Refused) return error.refusal as Result<T, R>
+      if (error instanceof Refused) return error.refusal as A
       if (attempt >= TRIES || !isWorthRepeating(error)) throw error
       await pause(attempt)
     }

@@ -27,6 +27,8 @@ export type RouteContext<P, Q, B> = {
   /** The workshop named in the path; absent where the path names none. */
   workshop: { id: string; slug: string; currency: string; timeZone: string; country: string }
   request: Request
+  /** Headers to send along with whatever is answered (a cookie, say). */
+  answer: Headers
 }
 
 type FormAnswer<P, B> = {
@@ -75,7 +77,7 @@ export function route<P = Record<string, string>, Q = unknown, B = unknown>(
       answer.headers.set('x-request-id', requestId)
       return answer
     } catch (error) {
-      log.error({ err: error, requestId, path: new URL(request.url).pathname }, 'request failed')
+      log().error({ error, requestId, path: new URL(request.url).pathname }, 'request failed')
       return bug(requestId)
     }
   }
@@ -133,6 +135,7 @@ async function answerOf<P, Q, B>(
     actor,
     now,
     request,
+    answer: new Headers(),
     params: params?.data ?? (rawParams as P),
     query: query?.data as Q,
     body: (body?.data ?? shaped) as B,
@@ -164,6 +167,7 @@ async function answerOf<P, Q, B>(
     if (held?.state === 'fresh') await held.row.destroy()
     throw error
   }
+  context.answer.forEach((value, name) => answer.headers.append(name, value))
   return answer
 }
 

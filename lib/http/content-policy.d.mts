@@ -1,0 +1,7 @@
+export declare function contentPolicy(page: {
+  scripts: readonly string[]
+  cardPageUrl?: string
+  isDev?: boolean
+  isHttps?: boolean
+}): string
+export declare const BARE_POLICY: string
