@@ -1,3 +1,5 @@
+import { LiveErrors } from '@/components/forms/live-errors'
+import type { FormName } from '@/components/forms/form-contracts'
 import { classNames } from './class-names'
 import { ErrorSummary } from './error-summary'
 import { ButtonRow } from './button'
@@ -6,6 +8,8 @@ import type { FormState } from './form-state'
 type Props = Omit<React.ComponentProps<'form'>, 'action' | 'method' | 'form' | 'hidden'> & {
   action: string
   form?: FormState
+  /** The contract the form is checked against in the browser; without one it is only posted. */
+  contract?: FormName
   /** Values that go along unseen. */
   hidden?: Readonly<Record<string, string>>
   /** The buttons, under the fields. */
@@ -16,7 +20,7 @@ type Props = Omit<React.ComponentProps<'form'>, 'action' | 'method' | 'form' | '
  * A form that is posted by the browser itself: it works without JavaScript. The sentences come from the server, with
  * what was typed, so the browser's own bubbles stay away.
  */
-export function Form({ action, form, hidden = {}, foot, children, className, ...rest }: Props) {
+export function Form({ action, form, contract, hidden = {}, foot, children, className, ...rest }: Props) {
   return (
     <form
       action={action}
@@ -25,7 +29,11 @@ export function Form({ action, form, hidden = {}, foot, children, className, ...
       className={classNames('flex flex-col gap-5', className)}
       {...rest}
     >
-      {form?.errors && Object.keys(form.errors).length > 0 ? <ErrorSummary errors={form.errors} /> : null}
+      {contract ? (
+        <LiveErrors contract={contract} errors={form?.errors} />
+      ) : form?.errors && Object.keys(form.errors).length > 0 ? (
+        <ErrorSummary errors={form.errors} />
+      ) : null}
       {Object.entries(hidden).map(([name, value]) => (
         <input key={name} type="hidden" name={name} value={value} />
       ))}

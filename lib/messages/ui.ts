@@ -40,6 +40,7 @@ export const ui = {
   next: 'Next page',
   paging: 'Pages of this list',
   typeToConfirm: 'Type this to go on:',
+  notSent: 'This could not be sent. Check your connection and try again; what you typed is still here.',
   stepDone: 'done',
   stepNow: 'now',
   stepToCome: 'to come',

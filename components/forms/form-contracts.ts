@@ -1,0 +1,14 @@
+import type { z } from 'zod'
+
+/** The schema behind each form, loaded when somebody begins to fill it in. The server reads the same one. */
+export const FORM_CONTRACTS = {
+  signIn: async () => (await import('@/lib/contracts/sign-in')).SignInInput,
+  signInCode: async () => (await import('@/lib/contracts/sign-in')).SignInCodeInput,
+  signUp: async () => (await import('@/lib/contracts/signups')).SignUpInput,
+  run: async () => (await import('@/lib/contracts/runs')).RunInput,
+  address: async () => (await import('@/lib/contracts/address')).AddressInput,
+  pack: async () => (await import('@/lib/contracts/packing')).PackInput,
+  handOver: async () => (await import('@/lib/contracts/packing')).HandOverInput,
+} satisfies Record<string, () => Promise<z.ZodType>>
+
+export type FormName = keyof typeof FORM_CONTRACTS

@@ -1,0 +1,22 @@
+/** Signing in by a mailed link, and signing out. */
+export const signInWords = {
+  title: 'Sign in',
+  lead: 'We mail you a link. There is no password to remember.',
+  email: 'E-mail address',
+  send: 'Mail me a link',
+  sentTitle: 'Look into your mailbox',
+  sentLead: 'If the address can be reached, a link is on its way. It works once, for ten minutes.',
+  sentOther: 'Opened the link in another browser? It shows a code of six digits. Type it here.',
+  code: 'Code of six digits',
+  useCode: 'Sign in with the code',
+  linkTitle: 'Sign in to Brimline',
+  linkLead: 'One more press, so that a program that reads your mail does not sign in for you.',
+  go: 'Sign in',
+  elsewhereTitle: 'Type this code where you asked for the link',
+  elsewhereLead: 'This browser did not ask for the link, so it is not signed in.',
+  deadTitle: 'This link does not work any more',
+  askAgain: 'Ask for a new link',
+  signedInAs: (email: string) => `Signed in as ${email}`,
+  signOut: 'Sign out',
+  account: 'Your account',
+}
