@@ -73,8 +73,6 @@ create table runs (
   constraint runs_closed_check check ((state = 'closed') = (closed_at is not null))
 );
 create index runs_state_idx on runs (workshop_id, state);
-create unique index runs_one_taking_deposits_key on runs (module_id)
-  where state = 'taking_deposits';
 
 create table run_offers (
   id uuid default gen_random_uuid() constraint run_offers_pkey primary key,

@@ -1,5 +1,5 @@
 import { type CreationOptional, type InferAttributes, type InferCreationAttributes, Model } from 'sequelize'
-import type { AddressWords } from '@/lib/core/post/address'
+import type { Address as PostAddress, AddressWords } from '@/lib/core/post/address'
 import { sequelize } from '@/lib/db/sequelize'
 import { json, key, moment, optional, ref, table, text, texts } from './columns'
 
@@ -40,18 +40,18 @@ export class Address extends Model<InferAttributes<Address>, InferCreationAttrib
   /** When it was blanked; null while readable. */
   declare erasedAt: Date | null
 
-  facts() {
+  facts(): PostAddress {
     return {
       country: this.country,
       name: this.name,
-      organization: this.organization,
       lines: this.lines,
-      city: this.city,
-      region: this.region,
-      postcode: this.postcode,
-      phone: this.phone,
-      taxNumber: this.taxNumber,
-      latin: this.latin,
+      organization: this.organization ?? undefined,
+      city: this.city ?? undefined,
+      region: this.region ?? undefined,
+      postcode: this.postcode ?? undefined,
+      phone: this.phone ?? undefined,
+      taxNumber: this.taxNumber ?? undefined,
+      latin: this.latin ?? undefined,
     }
   }
 }

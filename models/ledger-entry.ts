@@ -6,6 +6,8 @@ import {
   type NonAttribute,
 } from 'sequelize'
 import type { Minor } from '@/lib/core/brand'
+import type { Account } from '@/lib/core/ledger/accounts'
+import type { Entry } from '@/lib/core/ledger/balance'
 import { sequelize } from '@/lib/db/sequelize'
 import { key, money, ref, table, text, whole } from './columns'
 import type { LedgerTransfer } from './ledger-transfer'
@@ -19,7 +21,7 @@ export class LedgerEntry extends Model<InferAttributes<LedgerEntry>, InferCreati
   /** The transfer. */
   declare transferId: string
   /** Account of the books (lib/core/ledger/accounts). */
-  declare account: string
+  declare account: Account
   /** Currency of the amount. */
   declare currency: string
   /** Debit positive, credit negative, minor units; never 0. */
@@ -29,8 +31,8 @@ export class LedgerEntry extends Model<InferAttributes<LedgerEntry>, InferCreati
 
   declare transfer?: NonAttribute<LedgerTransfer>
 
-  facts() {
-    return { account: this.account, currency: this.currency, amountMinor: this.amountMinor }
+  facts(): Entry {
+    return { account: this.account, currency: this.currency, amount: this.amountMinor }
   }
 }
 

@@ -6,6 +6,7 @@ import {
   type NonAttribute,
 } from 'sequelize'
 import type { Day, Minor } from '@/lib/core/brand'
+import type { PricedLine } from '@/lib/core/orders/totals'
 import { sequelize } from '@/lib/db/sequelize'
 import { day, json, key, money, optional, preset, ref, table, text, whole } from './columns'
 import type { ChosenAnswer } from './json'
@@ -57,19 +58,13 @@ export class OrderLine extends Model<InferAttributes<OrderLine>, InferCreationAt
   declare parcelLines?: NonAttribute<ParcelLine[]>
   declare units?: NonAttribute<Unit[]>
 
-  facts() {
+  facts(): PricedLine {
     return {
-      id: this.id,
-      runOfferId: this.runOfferId,
-      offerKind: this.offerKind,
       quantity: this.quantity,
-      unitPriceMinor: this.unitPriceMinor,
-      unitSurchargeMinor: this.unitSurchargeMinor,
-      totalMinor: this.totalMinor,
-      taxBasisPoints: this.taxBasisPoints,
-      taxMinor: this.taxMinor,
-      postedByOn: this.postedByOn,
-      revisedPostedByOn: this.revisedPostedByOn,
+      priceMinor: this.unitPriceMinor,
+      surchargeMinor: this.unitSurchargeMinor,
+      depositMinor: this.unitDepositMinor,
+      basisPoints: this.taxBasisPoints,
     }
   }
 }

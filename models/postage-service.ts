@@ -6,6 +6,7 @@ import {
   type NonAttribute,
 } from 'sequelize'
 import type { Minor } from '@/lib/core/brand'
+import type { PostService } from '@/lib/core/post/postage'
 import { sequelize } from '@/lib/db/sequelize'
 import { flag, json, key, moment, money, optional, preset, ref, table, text, whole } from './columns'
 import type { PostageBand } from './json'
@@ -47,6 +48,15 @@ export class PostageService extends Model<
   declare endedAt: Date | null
 
   declare zone?: NonAttribute<PostageZone>
+
+  facts(): PostService {
+    return {
+      id: this.id,
+      maxGrams: this.maxGrams,
+      maxMm: this.maxMm,
+      bands: this.bands.map(({ upTo, priceMinor }) => ({ upTo, price: priceMinor })),
+    }
+  }
 }
 
 PostageService.init(

@@ -17,7 +17,7 @@ export class PostageZone extends Model<InferAttributes<PostageZone>, InferCreati
   declare workshopId: string
   /** Name the owner gave it. */
   declare name: string
-  /** ISO 3166-1 alpha-2 codes; a country belongs to the first zone that names it. */
+  /** ISO 3166-1 alpha-2 codes, or '*' alone for every country no other zone names. */
   declare countries: string[]
   /** Order among the workshop's zones, from 0. */
   declare position: CreationOptional<number>
