@@ -1,4 +1,10 @@
-import type { AccountFacts, DisputeFacts, PaymentPurpose, RefundFacts, CardFailure } from './types'
+import type {
+  AccountFacts,
+  DisputeFacts,
+  PaymentPurpose,
+  RefundFacts,
+  CardFailure,
+} from '@/lib/gateways/payments/types'
 import type { Minor } from '@/lib/core/brand'
 
 /** Ids and sums of a payment as an event tells them. The newest truth is `getPayment`. */

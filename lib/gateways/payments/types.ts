@@ -1,6 +1,6 @@
 import type { Minor } from '@/lib/core/brand'
 import type { Result } from '@/lib/core/result'
-import type { ProviderEvent } from './changes'
+import type { ProviderEvent } from '@/lib/gateways/payments/changes'
 
 /** The provider's id of a workshop's account (`acct_…`); every call but `createAccount` is made on one. */
 export type AccountId = string

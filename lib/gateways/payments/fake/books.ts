@@ -1,0 +1,103 @@
+import 'server-only'
+import type { PoolClient } from 'pg'
+import { idFor } from '@/lib/gateways/payments/fake/chance'
+import { missing, SandboxBug } from '@/lib/gateways/payments/fake/errors'
+import { PREFIX, type Hidden, type Kind, type Kinds } from '@/lib/gateways/payments/fake/kinds'
+import { sandboxPool } from '@/lib/gateways/payments/fake/pool'
+
+/** The books of one account, open in one transaction under the account's lock. */
+export type Books = { readonly sql: PoolClient; readonly account: string; readonly now: number }
+
+async function businessSeconds(sql: PoolClient): Promise<number> {
+  const known = await sql.query("select to_regclass('public.clock_offset') is not null as has_clock")
+  const hasClock = known.rows[0]?.has_clock === true
+  const offset = hasClock
+    ? (await sql.query('select offset_ms from public.clock_offset')).rows[0]?.offset_ms
+    : 0
+  return Math.floor((Date.now() + Number(offset ?? 0)) / 1000)
+}
+
+/** Opens the books of an account ('' for the platform's own), one caller at a time; commits unless `work` throws. */
+export async function withBooks<T>(account: string, work: (books: Books) => Promise<T>): Promise<T> {
+  const sql = await (await sandboxPool()).connect()
+  try {
+    await sql.query('begin')
+    await sql.query("select pg_advisory_xact_lock(hashtext('sandbox'), hashtext($1))", [account])
+    const done = await work({ sql, account, now: await businessSeconds(sql) })
+    await sql.query('commit')
+    sql.release()
+    return done
+  } catch (error) {
+    const isBroken = await sql.query('rollback').then(
+      () => false,
+      () => true,
+    )
+    sql.release(isBroken)
+    throw error
+  }
+}
+
+export async function nextNumber({ sql }: Books): Promise<number> {
+  return Number((await sql.query("select nextval('sandbox.numbers') as n")).rows[0].n)
+}
+
+export async function newId(books: Books, kind: Kind): Promise<string> {
+  return idFor(PREFIX[kind], await nextNumber(books))
+}
+
+type Extra<K extends Kind> = { hidden: Hidden[K]; dueAt?: number | null }
+
+export async function insert<K extends Kind>(
+  books: Books,
+  kind: K,
+  body: Kinds[K],
+  extra: Extra<K>,
+): Promise<Kinds[K]> {
+  await books.sql.query(
+    'insert into sandbox.objects (id, account, kind, created, body, hidden, due_at) values ($1, $2, $3, $4, $5, $6, $7)',
+    [body.id, books.account, kind, books.now, body, extra.hidden, extra.dueAt ?? null],
+  )
+  return body
+}
+
+/** The object, or the provider's 404. */
+export async function load<K extends Kind>(books: Books, kind: K, id: string): Promise<Kinds[K]> {
+  const { rows } = await books.sql.query(
+    'select body from sandbox.objects where id = $1 and kind = $2 and account = $3',
+    [id, kind, books.account],
+  )
+  if (rows.length === 0) throw missing(kind, id)
+  return rows[0].body
+}
+
+export async function hiddenOf<K extends Kind>(books: Books, kind: K, id: string): Promise<Hidden[K]> {
+  const { rows } = await books.sql.query('select hidden from sandbox.objects where id = $1 and kind = $2', [
+    id,
+    kind,
+  ])
+  if (rows.length === 0) throw missing(kind, id)
+  return rows[0].hidden
+}
+
+export async function save<K extends Kind>(
+  books: Books,
+  kind: K,
+  body: Kinds[K],
+  extra?: Partial<Extra<K>>,
+): Promise<Kinds[K]> {
+  const { rowCount } = await books.sql.query(
+    `update sandbox.objects set body = $3, hidden = coalesce($4, hidden), due_at = case when $5 then $6 else due_at end
+     where id = $1 and kind = $2`,
+    [body.id, kind, body, extra?.hidden ?? null, extra?.dueAt !== undefined, extra?.dueAt ?? null],
+  )
+  if (rowCount !== 1) throw new SandboxBug(`save: no ${kind} ${body.id}`)
+  return body
+}
+
+/** The account whose books hold the object; null when nobody's do. */
+export async function accountOf(id: string): Promise<string | null> {
+  const { rows } = await (
+    await sandboxPool()
+  ).query('select account from sandbox.objects where id = $1', [id])
+  return rows[0]?.account ?? null
+}

@@ -1,0 +1,38 @@
+import 'server-only'
+import Stripe from 'stripe'
+import { type Books, nextNumber } from '@/lib/gateways/payments/fake/books'
+import { chance, idFor, isFault } from '@/lib/gateways/payments/fake/chance'
+
+/**
+ * Writes an event into the books, in the same transaction as its cause. Under faults some are lost, some arrive
+ * twice and some late, so that later ones overtake them; which, is decided by the seed.
+ */
+export async function emit(books: Books, type: Stripe.Event.Type, object: object): Promise<void> {
+  const n = await nextNumber(books)
+  const event = {
+    id: idFor('evt_', n),
+    object: 'event',
+    account: books.account,
+    api_version: Stripe.API_VERSION,
+    created: books.now,
+    data: { object },
+    livemode: false,
+    pending_webhooks: 1,
+    request: { id: null, idempotency_key: null },
+    type,
+  }
+  const isLost = isFault('event_lost', n, 0.06)
+  const delays = [delayMs(n, 'event_late')]
+  if (isFault('event_twice', n, 0.12)) delays.push(delayMs(n, 'event_late_again') + 300)
+  for (const delay of delays) {
+    await books.sql.query(
+      `insert into sandbox.events (id, account, type, body, due_at, state)
+       values ($1, $2, $3, $4, clock_timestamp() + make_interval(secs => $5 / 1000.0), $6)`,
+      [event.id, books.account, type, JSON.stringify(event, null, 2), delay, isLost ? 'lost' : 'waiting'],
+    )
+  }
+}
+
+function delayMs(n: number, label: string): number {
+  return isFault(label, n, 0.25) ? Math.round(100 + 1900 * chance(`${label}_by`, n)) : 0
+}
