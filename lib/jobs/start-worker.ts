@@ -19,7 +19,9 @@ export type RunningWorker = { stop: () => Promise<void>; ended: Promise<void> }
 export async function startWorker(options: Options): Promise<RunningWorker> {
   const { databaseUrl, tasks, concurrency = 5, everyMinute = [] } = options
   const pool = new Pool({ connectionString: databaseUrl, max: concurrency + 3 })
-  pool.on('error', (error) => log().warn({ error }, 'worker lost an idle connection'))
+  const sayLost = (error: unknown) => log().warn({ error }, 'worker lost a connection')
+  pool.on('error', sayLost)
+  pool.on('connect', (client) => client.on('error', sayLost))
 
   let lose!: (error: unknown) => void
   const lost = new Promise<never>((_, reject) => (lose = reject))

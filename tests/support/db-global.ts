@@ -20,16 +20,21 @@ export default async function setUp(project: TestProject) {
   const folder = join(ROOT, String(process.pid))
   const serverUrl = given ?? (await startDatabase(folder, { throwAway: true })).url
   const template = `template_${process.pid}`
-  const url = await ensureDatabase(serverUrl, template)
-  migrate(url)
-  await psql(serverUrl, `alter database "${template}" with is_template true allow_connections false`)
-  project.provide('serverUrl', serverUrl)
-  project.provide('template', template)
-  return async () => {
+  const tearDown = async () => {
     if (!given) return removeDatabase(folder)
     await psql(serverUrl, `alter database "${template}" with is_template false`)
     await psql(serverUrl, `drop database "${template}" with (force)`)
   }
+  try {
+    migrate(await ensureDatabase(serverUrl, template))
+  } catch (error) {
+    await tearDown()
+    throw error
+  }
+  await psql(serverUrl, `alter database "${template}" with is_template true allow_connections false`)
+  project.provide('serverUrl', serverUrl)
+  project.provide('template', template)
+  return tearDown
 }
 
 function migrate(url: string) {

@@ -1,0 +1,1 @@
+export declare function evict(path: string): void

@@ -1,0 +1,25 @@
+import { rmSync, writeFileSync } from 'node:fs'
+import { QueryTypes } from 'sequelize'
+import { sequelize } from '@/lib/db/sequelize'
+import { DEMO_SIGN_INS, seedDemo } from '@/seeders/demo'
+
+// Fills an empty sandbox with the demo, by the services as people act, and names who can sign in. The marker
+// file named by start stays when this is killed, so that the next start begins again.
+const marker = process.argv[2]
+
+async function isEmpty() {
+  const [row] = await sequelize.query<{ found: boolean }>('select exists (select 1 from workshops) as found', {
+    type: QueryTypes.SELECT,
+  })
+  return !row?.found
+}
+
+if (await isEmpty()) {
+  if (marker) writeFileSync(marker, '')
+  process.stdout.write('Making the demo (a minute or so) …\n')
+  await seedDemo((sentence: string) => process.stdout.write(`${sentence}\n`))
+  if (marker) rmSync(marker)
+}
+process.stdout.write('Demo people to sign in as, at /sandbox:\n')
+for (const { email, what } of DEMO_SIGN_INS) process.stdout.write(`  ${email.padEnd(36)}${what}\n`)
+await sequelize.close()
