@@ -9,8 +9,6 @@ function formatIn(zone: string): Intl.DateTimeFormat {
   if (known) return known
   const made = new Intl.DateTimeFormat('en-US', {
     timeZone: zone,
-    calendar: 'iso8601',
-    era: 'short',
     year: 'numeric',
     month: '2-digit',
     day: '2-digit',
@@ -32,30 +30,35 @@ export function isZone(name: string): boolean {
   }
 }
 
+/** `Intl` counts by the Julian calendar before October 1582; nothing here is older than a workshop. */
+const EARLIEST_MS = Date.UTC(1600, 0, 1)
+
 /**
  * The calendar day that an instant falls on in a time zone.
- * Domain:  a valid instant of years 0000 to 9999 and an IANA zone name → otherwise RangeError.
+ * Domain:  a valid instant of years 1600 to 9999 and an IANA zone name → otherwise RangeError.
  * Source:  IANA time zone database, by the runtime's `Intl`.
  * @example dayIn(new Date('2026-03-01T23:30:00Z'), 'Asia/Tokyo')  // → '2026-03-02'
  */
 export function dayIn(instant: Date, zone: string): Day {
-  if (Number.isNaN(instant.getTime()))
-    throw new RangeError(`dayIn: instant must be a valid date, got ${instant}`)
-  const parts = Object.fromEntries(
-    formatIn(zone)
-      .formatToParts(instant)
-      .map(({ type, value }) => [type, value]),
+  const parts = formatIn(zone).formatToParts(checked(instant))
+  const [year, month, day] = (['year', 'month', 'day'] as const).map(
+    (type) => parts.find((part) => part.type === type)?.value,
   )
-  const day = `${parts['year']?.padStart(4, '0')}-${parts['month']}-${parts['day']}`
-  if (!isDay(day) || parts['era'] === 'BC')
-    throw new RangeError(`dayIn: instant must lie in years 0001 to 9999, got ${day}`)
-  return day
+  return `${year}-${month}-${day}`
+}
+
+function checked(instant: Date): Date {
+  const ms = instant.getTime()
+  if (!(ms >= EARLIEST_MS && ms < Date.UTC(10_000, 0, 1))) {
+    throw new RangeError(`dayIn: instant must lie in years 1600 to 9999, got ${instant}`)
+  }
+  return instant
 }
 
 /**
  * The first instant of a calendar day in a time zone: midnight, or when the clocks skip it the moment after.
  * A day that the zone left out altogether starts when the next one does.
- * Domain:  a valid day and an IANA zone name → otherwise RangeError.
+ * Domain:  a valid day of years 1600 to 9999 and an IANA zone name → otherwise RangeError.
  * Accuracy: to the second, the resolution of the zone database.
  * Source:  IANA time zone database, by the runtime's `Intl`.
  * Cost:    some 18 look-ups.
