@@ -1,3 +1,4 @@
+import { exponentOf } from '@/lib/core/money/currency'
 import { LOCALE } from './ui'
 
 type Place = { locale?: string }
@@ -91,4 +92,13 @@ export function writtenPercent(
   if (ratio > 0 && ratio * 100 < step / 2) return `under ${words(step)}`
   if (ratio < 1 && ratio * 100 > 100 - step / 2) return `over ${words(100 - step)}`
   return words(ratio * 100)
+}
+
+/**
+ * A sum without its minor unit, for the axis of a drawing; never for what somebody pays.
+ * @example writtenRoundMoney(-250000, 'GBP')  // → '-£2,500'
+ */
+export function writtenRoundMoney(minor: number, currency: string, { locale = LOCALE }: Place = {}): string {
+  const format = new Intl.NumberFormat(locale, { style: 'currency', currency, maximumFractionDigits: 0 })
+  return format.format(minor / 10 ** exponentOf(currency))
 }
