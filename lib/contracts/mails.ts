@@ -319,7 +319,7 @@ export const UNSUBSCRIBABLE = ['deposits_open', 'run_update'] as const satisfies
  * Links that act for whoever holds them. They are in the outbox only until the mail is sent, so that a stored copy of
  * the table opens nothing.
  */
-export const SECRET_LINKS: { readonly [K in MailKind]?: readonly (keyof MailProps<K>)[] } = {
+export const SECRET_LINKS: { readonly [K in MailKind]?: readonly (keyof MailProps<K> & string)[] } = {
   confirm_signup: ['confirmUrl'],
   signup_confirmed: ['takeBackUrl'],
   deposits_open: ['takeBackUrl'],

@@ -7,6 +7,7 @@ import { z } from 'zod'
 export const JOBS = {
   due: z.object({}),
   evict_pages: z.object({ paths: z.array(z.string()) }),
+  send_mail: z.object({ mailId: z.uuid() }),
 } as const
 
 export type JobName = keyof typeof JOBS

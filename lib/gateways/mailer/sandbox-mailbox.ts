@@ -1,6 +1,6 @@
 import 'server-only'
 import { Pool } from 'pg'
-import { env } from '@/lib/config/env'
+import { databaseUrl, env } from '@/lib/config/env'
 
 export type SandboxMail = {
   id: string
@@ -26,12 +26,7 @@ export async function readSandboxMails({
   limit?: number
 }): Promise<SandboxMail[]> {
   if (!env().SANDBOX) throw new Error('There is no sandbox mailbox while real mail is sent.')
-  pool ??= new Pool({
-    connectionString: env().DATABASE_URL,
-    max: 2,
-    idleTimeoutMillis: 5_000,
-    allowExitOnIdle: true,
-  })
+  pool ??= makePool()
   const { rows: made } = await pool.query<{ made: boolean }>(
     `select to_regclass('sandbox_mail.mails') is not null as made`,
   )
@@ -42,4 +37,22 @@ export async function readSandboxMails({
     [to ?? null, limit],
   )
   return rows.map((row) => ({ ...row, at: row.at.toISOString() }))
+}
+
+/** Lets go of the mailbox's connections; for tests, whose database goes away under it. */
+export async function closeSandboxMailbox(): Promise<void> {
+  await pool?.end()
+  pool = undefined
+}
+
+function makePool(): Pool {
+  const made = new Pool({
+    connectionString: databaseUrl(),
+    max: 2,
+    idleTimeoutMillis: 5_000,
+    allowExitOnIdle: true,
+  })
+  // An idle connection that is lost is opened anew with the next look.
+  made.on('error', () => {})
+  return made
 }
