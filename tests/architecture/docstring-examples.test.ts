@@ -3,8 +3,6 @@ import { join, relative } from 'node:path'
 import { pathToFileURL } from 'node:url'
 import ts from 'typescript'
 import { describe, expect, test } from 'vitest'
-import { minor } from '@/lib/core/brand'
-import { ok, refuse } from '@/lib/core/result'
 
 const root = join(import.meta.dirname, '../..')
 
@@ -14,6 +12,16 @@ function exportsOf(path: string): Export[] {
   const source = ts.createSourceFile(path, readFileSync(path, 'utf8'), ts.ScriptTarget.Latest, true)
   const found: Export[] = []
   for (const statement of source.statements) {
+    if (
+      ts.isExportDeclaration(statement) &&
+      statement.exportClause &&
+      ts.isNamedExports(statement.exportClause)
+    ) {
+      // Passed on from another file of the core, which holds the docstring.
+      for (const { name } of statement.exportClause.elements) {
+        found.push({ name: name.text, documented: true, examples: [] })
+      }
+    }
     const exported =
       ts.canHaveModifiers(statement) &&
       ts.getModifiers(statement)?.some((each) => each.kind === ts.SyntaxKind.ExportKeyword)
@@ -62,7 +70,25 @@ function split(example: string): { expression: string; value: string; approximat
 }
 
 function evaluate(expression: string, scope: Record<string, unknown>): unknown {
-  return new Function(...Object.keys(scope), `'use strict'; return (${expression})`)(...Object.values(scope))
+  return compile(expression, Object.keys(scope))(...Object.values(scope))
+}
+
+/** An example may hold types, but few do, and stripping them takes time. */
+function compile(expression: string, names: readonly string[]): (...values: unknown[]) => unknown {
+  try {
+    return new Function(...names, `return (${expression})`) as (...values: unknown[]) => unknown
+  } catch {
+    const javascript = ts.transpile(`const example = (${expression})`, { target: ts.ScriptTarget.ES2023 })
+    return new Function(...names, `${javascript}\nreturn example`) as (...values: unknown[]) => unknown
+  }
+}
+
+const load = (path: string) => import(pathToFileURL(path).href) as Promise<Record<string, unknown>>
+
+/** Every export of the core by its name, so that an example may build its arguments with a neighbour's function. */
+async function loadNeighbours(): Promise<Record<string, unknown>> {
+  const loaded = await Promise.allSettled(files.map(load))
+  return Object.assign({}, ...loaded.map((each) => (each.status === 'fulfilled' ? each.value : {})))
 }
 
 /** One unit in the last digit that the example prints, but never finer than a double carries. */
@@ -83,6 +109,8 @@ const files = readdirSync(join(root, 'lib/core'), { recursive: true, encoding: '
   .map((path) => join(root, 'lib/core', path))
   .sort()
 
+const neighbours = loadNeighbours()
+
 describe('docstrings of lib/core', () => {
   test('there is a core to look at', () => {
     expect(files.length).toBeGreaterThan(40)
@@ -95,12 +123,7 @@ describe('docstrings of lib/core', () => {
 
     const examples = exported.flatMap((each) => each.examples)
     if (examples.length === 0) return
-    const scope = {
-      ok,
-      refuse,
-      minor,
-      ...((await import(pathToFileURL(path).href)) as Record<string, unknown>),
-    }
+    const scope = { ...(await neighbours), ...(await load(path)) }
     for (const example of examples) {
       const parts = split(example)
       if (parts === null) throw new Error(`an example reads "expression  // → value": ${example}`)
@@ -115,6 +138,28 @@ describe('docstrings of lib/core', () => {
       }
     }
   })
+})
+
+describe('the index in lib/core/README.md', () => {
+  const rows = readFileSync(join(root, 'lib/core/README.md'), 'utf8')
+    .split('\n')
+    .map((line) => line.split('|').map((cell) => cell.trim()))
+    .filter((cells) => /^`\w+`/.test(cells[3] ?? ''))
+
+  test('has a row for every word of the trade', () => {
+    expect(rows.length).toBeGreaterThan(50)
+  })
+
+  test.each(rows.map((cells): [string, string, string] => [cells[1]!, cells[3]!, cells[4]!]))(
+    '%s: %s',
+    (_, names, paths) => {
+      const exported = paths.split(', ').flatMap((path) => exportsOf(join(root, 'lib/core', path)))
+      const missing = [...names.matchAll(/`(\w+)`/g)].filter(
+        ([, name]) => !exported.some((each) => each.name === name),
+      )
+      expect(missing.map(([, name]) => name)).toEqual([])
+    },
+  )
 })
 
 describe('the reader of docstrings itself', () => {
