@@ -1,4 +1,4 @@
-import { ADDRESS_COUNTRIES } from '@/lib/core/data/address-countries'
+import { isCountry } from '@/lib/core/data/country'
 import { ok, refuse, type Result } from '@/lib/core/result'
 
 /** A postal item's number: two letters of service, eight digits, a check digit, the country it was posted in. */
@@ -48,8 +48,7 @@ export function parseS10(text: string): Result<S10, 'length' | 'check_digit' | '
   if (number.length !== 13) return refuse('length')
   if (!/^[A-Z]{2}[0-9]{9}[A-Z]{2}$/.test(number)) return refuse('characters')
   const country = number.slice(11)
-  // XK is used by customs and posts for Kosovo but is not assigned by ISO 3166-1.
-  if (!Object.hasOwn(ADDRESS_COUNTRIES, country) || country === 'XK') return refuse('country')
+  if (!isCountry(country)) return refuse('country')
   const serial = number.slice(2, 10)
   const checkDigit = Number(number[10])
   if (s10CheckDigit(serial) !== checkDigit) return refuse('check_digit')
