@@ -25,6 +25,9 @@ export type DelayRule = {
   readonly refundBy: Day
 }
 
+/** The United States and its territories with a country code of their own (15 U.S.C. 44, "commerce"; from memory). */
+const UNDER_US_RULE: readonly string[] = ['US', 'AS', 'GU', 'MP', 'PR', 'UM', 'VI']
+
 /** The longest first delay to which silence agrees in the United States, and how long silence may last there. */
 const US_DELAY_DAYS = 30
 
@@ -47,7 +50,7 @@ const later = (a: Day, b: Day): Day => (a > b ? a : b)
 
 /**
  * What silence after a delay notice means, and the dates that go into the notice.
- * United States: a first delay of at most 30 days stands unless the buyer cancels before the new date; a longer, unknown
+ * United States and territories: a first delay of at most 30 days stands unless the buyer cancels before the new date; a longer, unknown
  * or further delay cancels the order unless the buyer agrees: within 30 days of the first date (first notice), or before
  * the date that is missed again (further notices). Elsewhere our own rule: silence waits and cancelling stays free;
  * the answer is asked for by the new date, or without one within 30 days of the missed one.
@@ -62,7 +65,7 @@ export function delayRule(notice: DelayNotice): DelayRule {
   assertNotice(notice)
   const { country, promisedBy, revisedBy, sentOn, noticeNumber, holidays } = notice
   const within30 = addDays(promisedBy, US_DELAY_DAYS)
-  if (country !== 'US') {
+  if (!UNDER_US_RULE.includes(country)) {
     const answerBy = later(revisedBy ?? within30, sentOn)
     return { silenceMeans: 'wait', answerBy, refundBy: refundDue(country, answerBy, holidays) }
   }
@@ -87,7 +90,7 @@ export function delayRule(notice: DelayNotice): DelayRule {
 export function refundDue(country: string, endedOn: Day, holidays: readonly Day[]): Day {
   if (!isCountry(country))
     throw new RangeError(`refundDue: country must be an ISO 3166-1 alpha-2 code, got ${country}`)
-  return country === 'US' ? addWorkingDays(endedOn, 7, holidays) : addDays(endedOn, 14)
+  return UNDER_US_RULE.includes(country) ? addWorkingDays(endedOn, 7, holidays) : addDays(endedOn, 14)
 }
 
 /** What a buyer did with a delay notice by the end of its answer-by day. */

@@ -7,6 +7,9 @@ import { addDays } from '@/lib/core/time/day'
 /** States outside the Union that apply Directive 2011/83 (EEA, from memory), and the United Kingdom with its own Act. */
 const LIKE_THE_UNION: readonly string[] = ['GB', 'IS', 'LI', 'NO']
 
+/** Parts of member states with a country code of their own where the law of the Union applies (TFEU Art. 355, from memory). */
+const PARTS_OF_THE_UNION: readonly string[] = ['AX', 'GF', 'GP', 'MF', 'MQ', 'RE', 'YT']
+
 /**
  * Whether consumers of a country may withdraw from a distance sale by law, without a reason.
  * Data with a date (2026), not legal advice; elsewhere the workshop's terms say what is given.
@@ -19,7 +22,7 @@ export function hasWithdrawalRight(country: string): boolean {
   if (!isCountry(country)) {
     throw new RangeError(`hasWithdrawalRight: country must be an ISO 3166-1 alpha-2 code, got ${country}`)
   }
-  return isEuMember(country) || LIKE_THE_UNION.includes(country)
+  return [LIKE_THE_UNION, PARTS_OF_THE_UNION].some((list) => list.includes(country)) || isEuMember(country)
 }
 
 /**

@@ -68,6 +68,12 @@ describe('dates', () => {
     expect(delayRule(late).answerBy).toBe('2026-05-06')
   })
 
+  test('a buyer in Puerto Rico is under the American rule', () => {
+    for (const notice of Object.values(NOTICES)) {
+      expect(delayRule({ country: 'PR', ...notice })).toEqual(delayRule({ country: 'US', ...notice }))
+    }
+  })
+
   test('a third notice is as a second', () => {
     const third = { ...NOTICES.second, country: 'US', noticeNumber: 3 }
     expect(delayRule(third)).toEqual(delayRule({ ...third, noticeNumber: 2 }))

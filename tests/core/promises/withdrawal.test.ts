@@ -12,6 +12,7 @@ describe('withdrawalEnds', () => {
     ['AT', '2025-12-11', ['2025-12-25', '2025-12-26'], '2025-12-29'],
     ['GB', '2026-03-02', [], '2026-03-16'],
     ['NO', '2026-03-02', [], '2026-03-16'],
+    ['RE', '2026-03-02', [], '2026-03-16'],
   ])('%s, delivered %s, off %j: %s', (country, lastDeliveredOn, holidays, end) => {
     expect(withdrawalEnds({ country, lastDeliveredOn, holidays })).toBe(end)
   })
