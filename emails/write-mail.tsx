@@ -22,7 +22,7 @@ export async function writeMail<K extends MailKind>(
 ): Promise<WrittenMail> {
   const checked = MAILS[kind].parse(facts) as MailProps<K>
   const write: Write<K> = LETTERS[kind]
-  const letter = write(checked, sayFor(sender), sender)
+  const letter = write(checked, sayFor(sender.timeZone), sender)
   const foot = footOf(sender, unsubscribeUrl)
   const html = await render(<LetterSheet letter={letter} foot={foot} />)
   return { subject: letter.subject, html, text: plainText(letter, foot) }

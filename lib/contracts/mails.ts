@@ -334,5 +334,4 @@ export type MailSender = {
   readonly replyTo: string | null
   readonly postalAddress: readonly string[]
   readonly timeZone: string
-  readonly locale: string
 }

@@ -7,7 +7,6 @@ export const sampleSender: MailSender = {
   replyTo: 'ines@hollow-pier.example',
   postalAddress: ['Hollow Pier Modular', 'Kai 7', '20457 Hamburg', 'Germany'],
   timeZone: 'Europe/Berlin',
-  locale: 'de-DE',
 }
 
 const site = 'https://brimline.example'

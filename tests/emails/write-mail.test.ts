@@ -119,7 +119,7 @@ test('money follows the currency, instants the zone of the workshop', async () =
   const yen = await write('refund_sent', { currency: 'JPY', amountMinor: 32000 })
   expect(yen.text).toContain('JP¥32,000')
   // 16:30 UTC on 2 April is 18:30 in Berlin: summer time began on 28 March 2027.
-  expect((await write('place_free')).text).toMatch(/2 April 2027 at 18:30 (CEST|GMT\+2)/)
+  expect((await write('place_free')).text).toMatch(/2 April 2027, 18:30 (CEST|GMT\+2)/)
 })
 
 test('what silence means is said with its day', async () => {

@@ -1,9 +1,9 @@
-import { counted } from '@/lib/messages/mails/words'
+import { plural } from '@/lib/messages/plural'
 
 export const signInLink = {
   subject: 'Your sign-in link',
   lead: (minutes: number) =>
-    `Use this link to sign in. It works once, within ${counted(minutes, 'minute', 'minutes')}.`,
+    `Use this link to sign in. It works once, within ${plural(minutes, { one: '# minute', other: '# minutes' })}.`,
   action: 'Sign in',
   notYou: 'If you did not ask for it, do nothing: nobody can sign in without this mail.',
 }
@@ -23,23 +23,27 @@ export const staffInvitation = {
 }
 
 export const ownerDigest = {
-  subject: (workshop: string, n: number) => `${workshop}: ${counted(n, 'thing needs', 'things need')} you`,
+  subject: (workshop: string, n: number) =>
+    `${workshop}: ${plural(n, { one: '# thing needs', other: '# things need' })} you`,
   lead: (day: string) => `What stands at your desk on ${day}:`,
   items: {
-    signups: (n: number) => counted(n, 'new confirmed sign-up', 'new confirmed sign-ups'),
-    deposits: (n: number) => counted(n, 'new deposit', 'new deposits'),
-    cancellations: (n: number) => counted(n, 'order cancelled', 'orders cancelled'),
-    decide_soon: (n: number) => counted(n, 'run to decide within a week', 'runs to decide within a week'),
-    ready_to_lock: (n: number) => counted(n, 'run ready to lock', 'runs ready to lock'),
+    signups: (n: number) => plural(n, { one: '# new confirmed sign-up', other: '# new confirmed sign-ups' }),
+    deposits: (n: number) => plural(n, { one: '# new deposit', other: '# new deposits' }),
+    cancellations: (n: number) => plural(n, { one: '# order cancelled', other: '# orders cancelled' }),
+    decide_soon: (n: number) =>
+      plural(n, { one: '# run to decide within a week', other: '# runs to decide within a week' }),
+    ready_to_lock: (n: number) => plural(n, { one: '# run ready to lock', other: '# runs ready to lock' }),
     balances_failed: (n: number) =>
-      counted(n, 'balance waiting for its buyer', 'balances waiting for their buyers'),
-    problems_open: (n: number) => counted(n, 'problem to answer', 'problems to answer'),
-    notices_due: (n: number) => counted(n, 'delay notice due', 'delay notices due'),
-    quotes_old: (n: number) => counted(n, 'part with an old quote', 'parts with an old quote'),
-    refunds_waiting: (n: number) => counted(n, 'refund waiting', 'refunds waiting'),
-    parcels_ready: (n: number) => counted(n, 'parcel to pack', 'parcels to pack'),
-    mails_bounced: (n: number) => counted(n, 'mail that did not arrive', 'mails that did not arrive'),
-    disputes: (n: number) => counted(n, 'disputed payment', 'disputed payments'),
+      plural(n, { one: '# balance waiting for its buyer', other: '# balances waiting for their buyers' }),
+    problems_open: (n: number) => plural(n, { one: '# problem to answer', other: '# problems to answer' }),
+    notices_due: (n: number) => plural(n, { one: '# delay notice due', other: '# delay notices due' }),
+    quotes_old: (n: number) =>
+      plural(n, { one: '# part with an old quote', other: '# parts with an old quote' }),
+    refunds_waiting: (n: number) => plural(n, { one: '# refund waiting', other: '# refunds waiting' }),
+    parcels_ready: (n: number) => plural(n, { one: '# parcel to pack', other: '# parcels to pack' }),
+    mails_bounced: (n: number) =>
+      plural(n, { one: '# mail that did not arrive', other: '# mails that did not arrive' }),
+    disputes: (n: number) => plural(n, { one: '# disputed payment', other: '# disputed payments' }),
   },
   action: 'Open your desk',
   settings: 'How often this mail comes',

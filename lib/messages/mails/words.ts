@@ -1,16 +1,13 @@
-/** What the mails of every domain share: names of the offers, plurals, and when the balance is asked for. */
+import { plural } from '@/lib/messages/plural'
+
+/** What the mails of every domain share: names of the offers, and when the balance is asked for. */
 export const offerNames = {
   boards: 'PCB and front panel set',
   kit: 'kit',
   built: 'built and tested',
 } as const
 
-const english = new Intl.PluralRules('en')
-
-export const counted = (n: number, one: string, other: string) =>
-  `${n} ${english.select(n) === 'one' ? one : other}`
-
-export const units = (n: number) => counted(n, 'unit', 'units')
+export const units = (count: number) => plural(count, { one: '# unit', other: '# units' })
 
 export const balanceAsked = {
   at_lock: 'The balance is asked for when the run is locked; you are told at least 7 days before.',

@@ -10,7 +10,6 @@ const PLATFORM: MailSender = {
   replyTo: null,
   postalAddress: [],
   timeZone: 'UTC',
-  locale: 'en',
 }
 
 /**
@@ -30,7 +29,6 @@ export async function getMailSender(workshopId: string | null, tx?: Transaction)
     replyTo: row.replyTo,
     postalAddress: linesOf(row),
     timeZone: row.timeZone,
-    locale: row.locale,
   }
 }
 
