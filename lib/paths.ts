@@ -7,6 +7,7 @@ const part = encodeURIComponent
 export const paths = {
   home: '/',
   start: '/start',
+  join: (token: string) => `/join/${part(token)}`,
   terms: '/terms',
   privacy: '/privacy',
   accessibility: '/accessibility',
@@ -46,6 +47,7 @@ export const paths = {
   adminRunDeed: (workshop: string, run: string, deed: 'open' | 'lock' | 'call-off' | 'ask-balances') =>
     `/admin/${part(workshop)}/runs/${part(run)}/${deed}`,
   adminBulk: (workshop: string, bulk: string) => `/admin/${part(workshop)}/bulk/${part(bulk)}`,
+  adminPaymentAccount: (workshop: string) => `/admin/${part(workshop)}/payment-account`,
   adminSettings: (workshop: string) => `/admin/${part(workshop)}/settings`,
   bench: (workshop: string) => `/bench/${part(workshop)}`,
   packing: (workshop: string) => `/packing/${part(workshop)}`,

@@ -4,6 +4,7 @@ import type { z } from 'zod'
 export const FORM_CONTRACTS = {
   signIn: async () => (await import('@/lib/contracts/sign-in')).SignInInput,
   signInCode: async () => (await import('@/lib/contracts/sign-in')).SignInCodeInput,
+  workshop: async () => (await import('@/lib/contracts/workshops')).WorkshopInput,
   signUp: async () => (await import('@/lib/contracts/signups')).SignUpInput,
   run: async () => (await import('@/lib/contracts/runs')).RunInput,
   address: async () => (await import('@/lib/contracts/address')).AddressInput,

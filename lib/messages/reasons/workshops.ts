@@ -1,2 +1,4 @@
-/** Refusals of the services under workshops. */
-export const workshops: Record<string, string> = {}
+/** Refusals of the services under workshops, modules, settings and members. */
+export const workshops: Record<string, string> = {
+  provider_unreachable: 'The payment provider did not answer. Nothing was changed; try again in a minute.',
+}

@@ -54,7 +54,7 @@ export function Drawings() {
           <FrontPanelDrawing
             name="A narrow one"
             widthHp={4}
-            controls={controls.slice(0, 1).map((one) => ({ ...one, xMm: 10 }))}
+            controls={controls.slice(1, 2).map((one) => ({ ...one, xMm: 10 }))}
           />
           <FrontPanelDrawing name="A blank" widthHp={8} controls={[]} size="plain" />
           <FrontPanelDrawing name="Rowlock" widthHp={12} controls={controls} size="plain" />

@@ -1,0 +1,75 @@
+import { z } from 'zod'
+import { isCountry } from '@/lib/core/data/country'
+import { isCurrency } from '@/lib/core/money/currency'
+import { countryCode, email, line, slug } from './fields'
+
+/** Names that are part of other addresses, or that a stranger could take for us. */
+export const RESERVED_SLUGS = [
+  ...['account', 'admin', 'api', 'bench', 'brimline', 'confirm', 'form', 'help', 'host', 'join', 'mail'],
+  ...[
+    'new',
+    'packing',
+    'privacy',
+    'sandbox',
+    'sent',
+    'signin',
+    'start',
+    'support',
+    'take-back',
+    'terms',
+    'w',
+    'www',
+  ],
+] as const
+
+const isReserved = (name: string) => (RESERVED_SLUGS as readonly string[]).includes(name)
+
+export const ownSlug = slug.refine(
+  (name) => !isReserved(name),
+  'This address is kept for the site itself. Choose another.',
+)
+
+/** IANA names this machine knows; "Europe/Berlin". */
+export const timeZone = z
+  .string({ error: 'Choose a time zone.' })
+  .trim()
+  .refine((name) => {
+    try {
+      return new Intl.DateTimeFormat('en', { timeZone: name }).format(0) !== ''
+    } catch {
+      return false
+    }
+  }, 'Choose a time zone, such as Europe/Berlin.')
+
+export const assignedCountry = countryCode.refine((code) => isCountry(code), 'Choose a country.')
+
+/** What starting a workshop asks; the rest is entered at leisure before the host opens it. */
+export const WorkshopInput = z.object({
+  name: line(80, 'Enter the name of your workshop.'),
+  slug: ownSlug,
+  legalName: line(120, 'Enter the name of the person or company buyers contract with.'),
+  country: assignedCountry,
+  currency: z
+    .string({ error: 'Choose a currency.' })
+    .trim()
+    .toUpperCase()
+    .refine((code) => isCurrency(code), 'Enter a currency by its three letters, such as EUR.'),
+  timeZone,
+  replyTo: email,
+})
+export type WorkshopInput = z.infer<typeof WorkshopInput>
+
+/** A workshop as its host sees it: who the trader is, never orders or addresses of buyers. */
+export type HostWorkshop = {
+  slug: string
+  name: string
+  state: 'pending' | 'open' | 'suspended'
+  legalName: string | null
+  country: string
+  currency: string
+  replyTo: string | null
+  chargesEnabled: boolean
+  createdAt: string
+  runs: number
+  units: number
+}

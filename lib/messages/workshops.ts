@@ -1,0 +1,47 @@
+import { plural } from './plural'
+
+/** Starting a workshop, and the host's desk. */
+export const workshopWords = {
+  startTitle: 'Start a workshop',
+  startLead:
+    'A workshop is yours alone: your name, your prices, your own payment account. The host of this site looks at it before it opens.',
+  name: 'Name of the workshop',
+  nameHint: 'As buyers will read it on pages and in mails.',
+  slug: 'Address of its page',
+  slugHint: 'Small letters, digits and hyphens; it stands in every link: /w/your-name.',
+  slugTaken: 'This address is taken. Choose another.',
+  legalName: 'Person or company buyers contract with',
+  legalNameHint: 'Your own name if you have no company.',
+  country: 'Country you post from',
+  currency: 'Currency you sell in',
+  currencyHint:
+    'Three letters, such as EUR. One currency per workshop; it is fixed once somebody has ordered.',
+  timeZone: 'Time zone',
+  timeZoneHint: 'Your dates begin and end here, such as Europe/Berlin.',
+  replyTo: 'E-mail address for buyers’ answers',
+  start: 'Start the workshop',
+  hostTitle: 'Host’s desk',
+  hostLead: 'Who trades here. You see the trader and totals, never orders or buyers’ addresses.',
+  hostTable: 'Workshops',
+  trader: 'Trader',
+  state: 'State',
+  states: { pending: 'waiting to be opened', open: 'open', suspended: 'suspended' },
+  card: 'Card payments',
+  cardReady: 'enabled',
+  cardMissing: 'not enabled',
+  since: 'Started',
+  runs: 'Runs',
+  units: 'Units ordered',
+  open: 'Open',
+  suspend: 'Suspend',
+  reopen: 'Reopen',
+  suspendNote: 'Suspending stops new money only. Refunds, cancellations, notices and buyers’ pages go on.',
+  none: 'Nobody has started a workshop yet.',
+  workshops: (count: number) => plural(count, { one: '# workshop', other: '# workshops' }),
+  accountTitle: 'Payment account',
+  accountReady:
+    'Your account can take card payments. Payouts are manual, so deposits stay where they can be paid back from.',
+  accountNotReady: 'The provider still needs something from you before cards can be charged.',
+  accountConnect: 'Go to the provider’s forms',
+  accountLead: 'Buyers pay you directly, on your own account at the payment provider.',
+}
