@@ -1,4 +1,5 @@
-// People apart from everything else, so that "erase me" blanks one place; users, sessions and links hang on them.
+// People apart from everything else, so that "erase me" blanks one place; users, sessions
+  and links hang on them.
 // Locks: none (new tables). Back: drops them; their data is lost.
 
 type Run = (sql: string) => Promise<unknown>
@@ -19,8 +20,10 @@ create table people (
   constraint people_name_check check (length(name) <= 200),
   constraint people_locale_check check (length(locale) <= 35),
   constraint people_email_or_erased_check check (email_normal is not null or erased_at is not null),
-  constraint people_email_normal_lower_check check (email_normal = lower(email_normal) and email_normal !~ '[[:space:]]'),
-  constraint people_erased_blank_check check (erased_at is null or (email_normal is null and email_shown is null and name is null))
+  constraint people_email_normal_lower_check
+    check (email_normal = lower(email_normal) and email_normal !~ '[[:space:]]'),
+  constraint people_erased_blank_check
+    check (erased_at is null or (email_normal is null and email_shown is null and name is null))
 );
 
 create table users (

@@ -46,7 +46,8 @@ create table workshops (
   constraint workshops_time_zone_check check (length(time_zone) <= 64),
   constraint workshops_country_check check (country ~ '^[A-Z]{2}$'),
   constraint workshops_locale_check check (length(locale) <= 35),
-  constraint workshops_tax_mode_check check (tax_mode in ('not_registered', 'home_rate', 'destination_rate', 'export_without_tax')),
+  constraint workshops_tax_mode_check
+    check (tax_mode in ('not_registered', 'home_rate', 'destination_rate', 'export_without_tax')),
   constraint workshops_tax_note_check check (length(tax_note) <= 500),
   constraint workshops_tax_number_check check (length(tax_number) <= 40),
   constraint workshops_legal_name_check check (length(legal_name) <= 200),
@@ -62,7 +63,8 @@ create table workshops (
   constraint workshops_lapse_after_days_check check (lapse_after_days > 0),
   constraint workshops_payout_delay_days_check check (payout_delay_days >= 0),
   constraint workshops_address_kept_days_check check (address_kept_days >= 30),
-  constraint workshops_created_by_person_id_fkey foreign key (created_by_person_id) references people (id) on delete restrict,
+  constraint workshops_created_by_person_id_fkey foreign key (created_by_person_id)
+    references people (id) on delete restrict,
   constraint workshops_suspended_check check ((state = 'suspended') = (suspended_at is not null)),
   constraint workshops_opened_check check (state = 'pending' or opened_at is not null),
   constraint workshops_charges_check check (charges_enabled_at is null or provider_account_id is not null)
@@ -70,7 +72,8 @@ create table workshops (
 
 create table memberships (
   id uuid default gen_random_uuid() constraint memberships_pkey primary key,
-  workshop_id uuid not null constraint memberships_workshop_id_fkey references workshops (id) on delete restrict,
+  workshop_id uuid not null constraint memberships_workshop_id_fkey
+    references workshops (id) on delete restrict,
   person_id uuid not null,
   role text not null,
   created_at timestamptz not null,
@@ -78,7 +81,8 @@ create table memberships (
   ended_at timestamptz,
   constraint memberships_person_id_fkey foreign key (person_id) references people (id) on delete restrict,
   constraint memberships_role_check check (role in ('owner', 'bench', 'packer')),
-  constraint memberships_created_by_person_id_fkey foreign key (created_by_person_id) references people (id) on delete restrict,
+  constraint memberships_created_by_person_id_fkey foreign key (created_by_person_id)
+    references people (id) on delete restrict,
   constraint memberships_workshop_id_id_key unique (workshop_id, id),
   constraint memberships_person_id_key unique (workshop_id, person_id)
 );
@@ -86,7 +90,8 @@ create index memberships_person_id_idx on memberships (person_id);
 
 create table staff_invitations (
   id uuid default gen_random_uuid() constraint staff_invitations_pkey primary key,
-  workshop_id uuid not null constraint staff_invitations_workshop_id_fkey references workshops (id) on delete restrict,
+  workshop_id uuid not null constraint staff_invitations_workshop_id_fkey
+    references workshops (id) on delete restrict,
   email_normal text not null,
   role text not null,
   token_hash text not null,
@@ -99,8 +104,10 @@ create table staff_invitations (
   constraint staff_invitations_email_normal_check check (length(email_normal) <= 254),
   constraint staff_invitations_role_check check (role in ('owner', 'bench', 'packer')),
   constraint staff_invitations_token_hash_key unique (token_hash),
-  constraint staff_invitations_created_by_person_id_fkey foreign key (created_by_person_id) references people (id) on delete restrict,
-  constraint staff_invitations_accepted_by_person_id_fkey foreign key (accepted_by_person_id) references people (id) on delete restrict,
+  constraint staff_invitations_created_by_person_id_fkey foreign key (created_by_person_id)
+    references people (id) on delete restrict,
+  constraint staff_invitations_accepted_by_person_id_fkey foreign key (accepted_by_person_id)
+    references people (id) on delete restrict,
   constraint staff_invitations_workshop_id_id_key unique (workshop_id, id),
   constraint staff_invitations_accepted_check check ((accepted_at is null) = (accepted_by_person_id is null))
 );
@@ -112,7 +119,8 @@ create table counters (
   workshop_id uuid not null constraint counters_workshop_id_fkey references workshops (id) on delete restrict,
   series text not null,
   last integer not null default 0,
-  constraint counters_series_check check (series in ('order', 'invoice', 'credit_note', 'parcel', 'problem', 'unit', 'lot')),
+  constraint counters_series_check
+    check (series in ('order', 'invoice', 'credit_note', 'parcel', 'problem', 'unit', 'lot')),
   constraint counters_last_check check (last >= 0),
   constraint counters_workshop_id_id_key unique (workshop_id, id),
   constraint counters_series_key unique (workshop_id, series)

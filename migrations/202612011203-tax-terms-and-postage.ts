@@ -12,17 +12,20 @@ create table tax_rates (
   basis_points integer not null,
   valid_from date not null,
   source text not null default '',
-  constraint tax_rates_workshop_id_fkey foreign key (workshop_id) references workshops (id) on delete restrict,
+  constraint tax_rates_workshop_id_fkey foreign key (workshop_id)
+    references workshops (id) on delete restrict,
   constraint tax_rates_country_check check (country ~ '^[A-Z]{2}$'),
   constraint tax_rates_tax_class_check check (tax_class in ('standard', 'reduced', 'zero')),
   constraint tax_rates_basis_points_check check (basis_points between 0 and 10000),
   constraint tax_rates_source_check check (length(source) <= 300)
 );
-alter table tax_rates add constraint tax_rates_country_class_from_key unique nulls not distinct (workshop_id, country, tax_class, valid_from);
+alter table tax_rates
+  add constraint tax_rates_country_class_from_key unique nulls not distinct (workshop_id, country, tax_class, valid_from);
 
 create table terms_versions (
   id uuid default gen_random_uuid() constraint terms_versions_pkey primary key,
-  workshop_id uuid not null constraint terms_versions_workshop_id_fkey references workshops (id) on delete restrict,
+  workshop_id uuid not null constraint terms_versions_workshop_id_fkey
+    references workshops (id) on delete restrict,
   number integer not null,
   body text not null,
   lapse_keeps_deposit boolean not null default false,
@@ -30,7 +33,8 @@ create table terms_versions (
   published_by_person_id uuid not null,
   constraint terms_versions_number_check check (number > 0),
   constraint terms_versions_body_check check (length(body) <= 100000),
-  constraint terms_versions_published_by_person_id_fkey foreign key (published_by_person_id) references people (id) on delete restrict,
+  constraint terms_versions_published_by_person_id_fkey foreign key (published_by_person_id)
+    references people (id) on delete restrict,
   constraint terms_versions_workshop_id_id_key unique (workshop_id, id),
   constraint terms_versions_number_key unique (workshop_id, number)
 );
@@ -39,7 +43,8 @@ create trigger terms_versions_never_changed before update or delete on terms_ver
 
 create table postage_zones (
   id uuid default gen_random_uuid() constraint postage_zones_pkey primary key,
-  workshop_id uuid not null constraint postage_zones_workshop_id_fkey references workshops (id) on delete restrict,
+  workshop_id uuid not null constraint postage_zones_workshop_id_fkey
+    references workshops (id) on delete restrict,
   name text not null,
   countries text[] not null,
   position integer not null default 0,
@@ -52,7 +57,8 @@ create index postage_zones_workshop_id_idx on postage_zones (workshop_id);
 
 create table postage_services (
   id uuid default gen_random_uuid() constraint postage_services_pkey primary key,
-  workshop_id uuid not null constraint postage_services_workshop_id_fkey references workshops (id) on delete restrict,
+  workshop_id uuid not null constraint postage_services_workshop_id_fkey
+    references workshops (id) on delete restrict,
   zone_id uuid not null,
   name text not null,
   kind text not null default 'parcel',
@@ -76,7 +82,8 @@ create table postage_services (
   constraint postage_services_tracking_url_check check (length(tracking_url) <= 300),
   constraint postage_services_position_check check (position >= 0),
   constraint postage_services_workshop_id_id_key unique (workshop_id, id),
-  constraint postage_services_bands_some_check check (jsonb_typeof(bands) = 'array' and jsonb_array_length(bands) > 0)
+  constraint postage_services_bands_some_check
+    check (jsonb_typeof(bands) = 'array' and jsonb_array_length(bands) > 0)
 );
 create index postage_services_zone_id_idx on postage_services (workshop_id, zone_id);
 `

@@ -45,7 +45,8 @@ create table modules (
 
 create table revisions (
   id uuid default gen_random_uuid() constraint revisions_pkey primary key,
-  workshop_id uuid not null constraint revisions_workshop_id_fkey references workshops (id) on delete restrict,
+  workshop_id uuid not null constraint revisions_workshop_id_fkey
+    references workshops (id) on delete restrict,
   module_id uuid not null,
   letter text not null,
   state text not null default 'draft',
@@ -64,12 +65,14 @@ create table revisions (
   constraint revisions_note_check check (length(note) <= 5000),
   constraint revisions_board_width_mm_check check (board_width_mm > 0),
   constraint revisions_board_height_mm_check check (board_height_mm > 0),
-  constraint revisions_first_good_by_person_id_fkey foreign key (first_good_by_person_id) references people (id) on delete restrict,
+  constraint revisions_first_good_by_person_id_fkey foreign key (first_good_by_person_id)
+    references people (id) on delete restrict,
   constraint revisions_first_good_how_check check (length(first_good_how) <= 2000),
   constraint revisions_workshop_id_id_key unique (workshop_id, id),
   constraint revisions_module_id_letter_key unique (module_id, letter),
   constraint revisions_letter_form_check check (letter ~ '^[A-Z]{1,2}$'),
-  constraint revisions_first_good_check check (first_good_at is null or (first_good_by_person_id is not null and first_good_how is not null))
+  constraint revisions_first_good_check
+    check (first_good_at is null or (first_good_by_person_id is not null and first_good_how is not null))
 );
 
 create table lessons (
@@ -95,13 +98,16 @@ create table lessons (
   constraint lessons_how_found_check check (length(how_found) <= 2000),
   constraint lessons_cause_check check (length(cause) <= 2000),
   constraint lessons_remedy_check check (length(remedy) <= 2000),
-  constraint lessons_created_by_person_id_fkey foreign key (created_by_person_id) references people (id) on delete restrict,
+  constraint lessons_created_by_person_id_fkey foreign key (created_by_person_id)
+    references people (id) on delete restrict,
   constraint lessons_mended_in_revision_id_fkey foreign key (workshop_id, mended_in_revision_id)
     references revisions (workshop_id, id) on delete restrict,
-  constraint lessons_waived_by_person_id_fkey foreign key (waived_by_person_id) references people (id) on delete restrict,
+  constraint lessons_waived_by_person_id_fkey foreign key (waived_by_person_id)
+    references people (id) on delete restrict,
   constraint lessons_waived_reason_check check (length(waived_reason) <= 2000),
   constraint lessons_workshop_id_id_key unique (workshop_id, id),
-  constraint lessons_waived_check check ((waived_at is null) = (waived_reason is null) and (waived_at is null) = (waived_by_person_id is null))
+  constraint lessons_waived_check
+    check ((waived_at is null) = (waived_reason is null) and (waived_at is null) = (waived_by_person_id is null))
 );
 create index lessons_module_id_idx on lessons (workshop_id, module_id);
 
@@ -147,7 +153,8 @@ create table offers (
   constraint offers_position_check check (position >= 0),
   constraint offers_workshop_id_id_key unique (workshop_id, id),
   constraint offers_module_id_kind_key unique (module_id, kind),
-  constraint offers_deposit_in_price_check check ((price_minor is null) = (deposit_minor is null) and deposit_minor <= price_minor),
+  constraint offers_deposit_in_price_check
+    check ((price_minor is null) = (deposit_minor is null) and deposit_minor <= price_minor),
   constraint offers_customs_code_digits_check check (customs_code ~ '^[0-9]*$')
 );
 
@@ -171,7 +178,8 @@ create index choices_offer_id_idx on choices (workshop_id, offer_id);
 
 create table choice_answers (
   id uuid default gen_random_uuid() constraint choice_answers_pkey primary key,
-  workshop_id uuid not null constraint choice_answers_workshop_id_fkey references workshops (id) on delete restrict,
+  workshop_id uuid not null constraint choice_answers_workshop_id_fkey
+    references workshops (id) on delete restrict,
   choice_id uuid not null,
   label text not null,
   surcharge_minor bigint not null default 0,
@@ -190,7 +198,8 @@ create unique index choice_answers_one_default_key on choice_answers (choice_id)
 
 create table destinations (
   id uuid default gen_random_uuid() constraint destinations_pkey primary key,
-  workshop_id uuid not null constraint destinations_workshop_id_fkey references workshops (id) on delete restrict,
+  workshop_id uuid not null constraint destinations_workshop_id_fkey
+    references workshops (id) on delete restrict,
   offer_id uuid not null,
   country text not null,
   state text not null default 'open',

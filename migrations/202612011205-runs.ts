@@ -56,7 +56,8 @@ create table runs (
   constraint runs_holding_plan_check check (length(holding_plan) <= 2000),
   constraint runs_terms_version_id_fkey foreign key (workshop_id, terms_version_id)
     references terms_versions (workshop_id, id) on delete restrict,
-  constraint runs_created_by_person_id_fkey foreign key (created_by_person_id) references people (id) on delete restrict,
+  constraint runs_created_by_person_id_fkey foreign key (created_by_person_id)
+    references people (id) on delete restrict,
   constraint runs_lock_reason_check check (length(lock_reason) <= 2000),
   constraint runs_planned_starts_check check (planned_starts > 0),
   constraint runs_call_off_reason_check check (length(call_off_reason) <= 2000),
@@ -66,17 +67,25 @@ create table runs (
   constraint runs_maximum_reaches_minimum_check check (minimum <= maximum),
   constraint runs_minimum_only_falls_check check (minimum <= minimum_first),
   constraint runs_committed_within_maximum_check check (committed_units between 0 and maximum),
-  constraint runs_decide_by_moved_check check (decide_by_on = decide_by_first_on or (decide_by_moved_at is not null and decide_by_on - decide_by_first_on between -30 and 30)),
-  constraint runs_opened_check check (state in ('draft', 'called_off') or (opened_at is not null and opens_to_all_at is not null and terms_version_id is not null)),
+  constraint runs_decide_by_moved_check
+    check (decide_by_on = decide_by_first_on or (decide_by_moved_at is not null
+      and decide_by_on - decide_by_first_on between -30 and 30)),
+  constraint runs_opened_check
+    check (state in ('draft', 'called_off') or (opened_at is not null and opens_to_all_at is not null
+      and terms_version_id is not null)),
   constraint runs_locked_check check (state not in ('locked', 'closed') or locked_at is not null),
-  constraint runs_called_off_check check ((state = 'called_off') = (called_off_at is not null) and (called_off_at is null) = (call_off_reason is null) and (called_off_at is null) = (call_off_cause is null)),
+  constraint runs_called_off_check
+    check ((state = 'called_off') = (called_off_at is not null)
+      and (called_off_at is null) = (call_off_reason is null)
+        and (called_off_at is null) = (call_off_cause is null)),
   constraint runs_closed_check check ((state = 'closed') = (closed_at is not null))
 );
 create index runs_state_idx on runs (workshop_id, state);
 
 create table run_offers (
   id uuid default gen_random_uuid() constraint run_offers_pkey primary key,
-  workshop_id uuid not null constraint run_offers_workshop_id_fkey references workshops (id) on delete restrict,
+  workshop_id uuid not null constraint run_offers_workshop_id_fkey
+    references workshops (id) on delete restrict,
   run_id uuid not null,
   offer_id uuid not null,
   kind text not null,
@@ -101,7 +110,8 @@ create table run_offers (
   constraint run_offers_workshop_id_id_key unique (workshop_id, id),
   constraint run_offers_run_id_offer_id_key unique (run_id, offer_id),
   constraint run_offers_deposit_in_price_check check (deposit_minor <= price_minor),
-  constraint run_offers_committed_within_maximum_check check (committed_units <= coalesce(maximum, committed_units))
+  constraint run_offers_committed_within_maximum_check
+    check (committed_units <= coalesce(maximum, committed_units))
 );
 `
 

@@ -52,7 +52,8 @@ create index signups_person_id_idx on signups (person_id);
 
 create table invitations (
   id uuid default gen_random_uuid() constraint invitations_pkey primary key,
-  workshop_id uuid not null constraint invitations_workshop_id_fkey references workshops (id) on delete restrict,
+  workshop_id uuid not null constraint invitations_workshop_id_fkey
+    references workshops (id) on delete restrict,
   run_id uuid not null,
   signup_id uuid not null,
   person_id uuid not null,

@@ -6,7 +6,8 @@ type Run = (sql: string) => Promise<unknown>
 const UP = `
 create table addresses (
   id uuid default gen_random_uuid() constraint addresses_pkey primary key,
-  workshop_id uuid not null constraint addresses_workshop_id_fkey references workshops (id) on delete restrict,
+  workshop_id uuid not null constraint addresses_workshop_id_fkey
+    references workshops (id) on delete restrict,
   person_id uuid not null,
   country text not null,
   name text not null,
@@ -34,11 +35,13 @@ create table addresses (
   constraint addresses_vat_number_check check (length(vat_number) <= 40),
   constraint addresses_fingerprint_check check (length(fingerprint) <= 64),
   constraint addresses_workshop_id_id_key unique (workshop_id, id),
-  constraint addresses_erased_blank_check check (erased_at is null or (name = '' and lines = '{}' and num_nonnulls(organization, city, region, postcode, phone, tax_number, vat_number, latin) = 0)),
+  constraint addresses_erased_blank_check
+    check (erased_at is null or (name = '' and lines = '{}' and num_nonnulls(organization, city, region, postcode, phone, tax_number, vat_number, latin) = 0)),
   constraint addresses_lines_some_check check (erased_at is not null or cardinality(lines) between 1 and 6)
 );
 create index addresses_person_id_idx on addresses (person_id);
-create trigger addresses_only_added before update or delete on addresses for each row execute function refuse_change_unless_erasing();
+create trigger addresses_only_added before update or delete on addresses
+  for each row execute function refuse_change_unless_erasing();
 
 create table orders (
   id uuid default gen_random_uuid() constraint orders_pkey primary key,
@@ -92,7 +95,9 @@ create table orders (
     references runs (workshop_id, id) on delete restrict,
   constraint orders_person_id_fkey foreign key (person_id) references people (id) on delete restrict,
   constraint orders_kind_check check (kind in ('paid', 'manual')),
-  constraint orders_state_check check (state in ('awaiting_deposit', 'waiting', 'reserved', 'balance_due', 'paid', 'packed', 'posted', 'cancelled', 'expired', 'lapsed', 'withdrawn', 'returned')),
+  constraint orders_state_check
+    check (state in ('awaiting_deposit', 'waiting', 'reserved', 'balance_due', 'paid', 'packed', 'posted'
+       'cancelled', 'expired', 'lapsed', 'withdrawn', 'returned')),
   constraint orders_unit_count_check check (unit_count > 0),
   constraint orders_hold_attempts_check check (hold_attempts >= 0),
   constraint orders_terms_version_id_fkey foreign key (workshop_id, terms_version_id)
@@ -102,7 +107,8 @@ create table orders (
   constraint orders_address_fingerprint_check check (length(address_fingerprint) <= 64),
   constraint orders_country_check check (country ~ '^[A-Z]{2}$'),
   constraint orders_currency_check check (currency ~ '^[A-Z]{3}$'),
-  constraint orders_tax_mode_check check (tax_mode in ('not_registered', 'home_rate', 'destination_rate', 'export_without_tax')),
+  constraint orders_tax_mode_check
+    check (tax_mode in ('not_registered', 'home_rate', 'destination_rate', 'export_without_tax')),
   constraint orders_goods_minor_check check (goods_minor >= 0),
   constraint orders_postage_minor_check check (postage_minor >= 0),
   constraint orders_postage_tax_basis_points_check check (postage_tax_basis_points between 0 and 10000),
@@ -112,33 +118,46 @@ create table orders (
   constraint orders_deposit_minor_check check (deposit_minor >= 0),
   constraint orders_balance_minor_check check (balance_minor >= 0),
   constraint orders_manual_reason_check check (length(manual_reason) <= 500),
-  constraint orders_entered_by_person_id_fkey foreign key (entered_by_person_id) references people (id) on delete restrict,
-  constraint orders_cancel_cause_check check (cancel_cause in ('customer', 'owner', 'withdrawal', 'notice', 'silence', 'broken_promise', 'run_called_off', 'run_closed', 'left_queue')),
+  constraint orders_entered_by_person_id_fkey foreign key (entered_by_person_id)
+    references people (id) on delete restrict,
+  constraint orders_cancel_cause_check
+    check (cancel_cause in ('customer', 'owner', 'withdrawal', 'notice', 'silence', 'broken_promise'
+       'run_called_off', 'run_closed', 'left_queue')),
   constraint orders_cancel_reason_check check (length(cancel_reason) <= 1000),
   constraint orders_workshop_id_id_key unique (workshop_id, id),
   constraint orders_number_key unique (workshop_id, number),
   constraint orders_run_id_queue_no_key unique (run_id, queue_no),
-  constraint orders_sums_check check (total_minor = deposit_minor + balance_minor and total_minor = goods_minor + postage_minor),
+  constraint orders_sums_check
+    check (total_minor = deposit_minor + balance_minor and total_minor = goods_minor + postage_minor),
   constraint orders_tax_within_check check (tax_minor <= total_minor and postage_tax_minor <= tax_minor),
   constraint orders_waiting_has_number_check check (state <> 'waiting' or queue_no is not null),
   constraint orders_held_check check ((state = 'awaiting_deposit') = (hold_until is not null)),
-  constraint orders_manual_check check ((kind = 'manual') = (manual_reason is not null) and (kind = 'manual') = (entered_by_person_id is not null)),
-  constraint orders_paid_complete_check check (kind = 'manual' or (terms_version_id is not null and address_id is not null and address_fingerprint is not null and deposit_minor > 0)),
-  constraint orders_cancelled_check check ((state = 'cancelled') = (cancelled_at is not null) and (cancelled_at is null) = (cancel_cause is null)),
+  constraint orders_manual_check
+    check ((kind = 'manual') = (manual_reason is not null) and (kind = 'manual') = (entered_by_person_id is not null)),
+  constraint orders_paid_complete_check
+    check (kind = 'manual' or (terms_version_id is not null and address_id is not null
+      and address_fingerprint is not null and deposit_minor > 0)),
+  constraint orders_cancelled_check
+    check ((state = 'cancelled') = (cancelled_at is not null)
+      and (cancelled_at is null) = (cancel_cause is null)),
   constraint orders_expired_check check ((state = 'expired') = (expired_at is not null)),
   constraint orders_lapsed_check check ((state = 'lapsed') = (lapsed_at is not null)),
-  constraint orders_posted_check check (state not in ('posted', 'withdrawn', 'returned') or posted_at is not null),
-  constraint orders_paid_at_check check (state not in ('paid', 'packed', 'posted', 'withdrawn', 'returned') or paid_at is not null)
+  constraint orders_posted_check
+    check (state not in ('posted', 'withdrawn', 'returned') or posted_at is not null),
+  constraint orders_paid_at_check
+    check (state not in ('paid', 'packed', 'posted', 'withdrawn', 'returned') or paid_at is not null)
 );
 create unique index orders_one_live_key on orders (run_id, person_id, address_fingerprint)
-  where kind = 'paid' and state in ('waiting', 'awaiting_deposit', 'reserved', 'balance_due', 'paid', 'packed');
+  where kind = 'paid' and state in ('waiting', 'awaiting_deposit', 'reserved', 'balance_due', 'paid'
+     'packed');
 create index orders_run_id_state_idx on orders (workshop_id, run_id, state);
 create index orders_person_id_placed_at_idx on orders (person_id, placed_at);
 create index orders_address_id_idx on orders (address_id);
 
 create table order_lines (
   id uuid default gen_random_uuid() constraint order_lines_pkey primary key,
-  workshop_id uuid not null constraint order_lines_workshop_id_fkey references workshops (id) on delete restrict,
+  workshop_id uuid not null constraint order_lines_workshop_id_fkey
+    references workshops (id) on delete restrict,
   order_id uuid not null,
   run_offer_id uuid not null,
   offer_kind text not null,
@@ -169,14 +188,16 @@ create table order_lines (
   constraint order_lines_tax_basis_points_check check (tax_basis_points between 0 and 10000),
   constraint order_lines_tax_minor_check check (tax_minor >= 0),
   constraint order_lines_workshop_id_id_key unique (workshop_id, id),
-  constraint order_lines_total_check check (total_minor - quantity * (unit_price_minor + unit_surcharge_minor) in (0, tax_minor)),
+  constraint order_lines_total_check
+    check (total_minor - quantity * (unit_price_minor + unit_surcharge_minor) in (0, tax_minor)),
   constraint order_lines_order_id_position_key unique (order_id, position)
 );
 create index order_lines_run_offer_id_idx on order_lines (workshop_id, run_offer_id);
 
 create table order_changes (
   id uuid default gen_random_uuid() constraint order_changes_pkey primary key,
-  workshop_id uuid not null constraint order_changes_workshop_id_fkey references workshops (id) on delete restrict,
+  workshop_id uuid not null constraint order_changes_workshop_id_fkey
+    references workshops (id) on delete restrict,
   order_id uuid not null,
   number integer not null,
   before jsonb not null,
@@ -189,7 +210,8 @@ create table order_changes (
   constraint order_changes_order_id_fkey foreign key (workshop_id, order_id)
     references orders (workshop_id, id) on delete restrict,
   constraint order_changes_number_check check (number > 0),
-  constraint order_changes_by_person_id_fkey foreign key (by_person_id) references people (id) on delete restrict,
+  constraint order_changes_by_person_id_fkey foreign key (by_person_id)
+    references people (id) on delete restrict,
   constraint order_changes_workshop_id_id_key unique (workshop_id, id),
   constraint order_changes_order_id_number_key unique (order_id, number),
   constraint order_changes_one_end_check check (applied_at is null or dropped_at is null)

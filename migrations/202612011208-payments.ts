@@ -6,7 +6,8 @@ type Run = (sql: string) => Promise<unknown>
 const UP = `
 create table payment_attempts (
   id uuid default gen_random_uuid() constraint payment_attempts_pkey primary key,
-  workshop_id uuid not null constraint payment_attempts_workshop_id_fkey references workshops (id) on delete restrict,
+  workshop_id uuid not null constraint payment_attempts_workshop_id_fkey
+    references workshops (id) on delete restrict,
   order_id uuid not null,
   purpose text not null,
   sequence integer not null,
@@ -44,7 +45,8 @@ create table payment_attempts (
   constraint payment_attempts_provider_session_id_check check (length(provider_session_id) <= 200),
   constraint payment_attempts_charge_id_check check (length(charge_id) <= 200),
   constraint payment_attempts_pay_url_check check (length(pay_url) <= 2000),
-  constraint payment_attempts_state_check check (state in ('requested', 'sent', 'unknown', 'needs_customer', 'captured', 'failed', 'abandoned')),
+  constraint payment_attempts_state_check
+    check (state in ('requested', 'sent', 'unknown', 'needs_customer', 'captured', 'failed', 'abandoned')),
   constraint payment_attempts_failure_code_check check (length(failure_code) <= 100),
   constraint payment_attempts_fee_minor_check check (fee_minor >= 0),
   constraint payment_attempts_workshop_id_id_key unique (workshop_id, id),
@@ -52,7 +54,8 @@ create table payment_attempts (
   constraint payment_attempts_provider_account_id_provider_id_key unique (provider_account_id, provider_id),
   constraint payment_attempts_provider_account_id_provider_session_id_key unique (provider_account_id, provider_session_id),
   constraint payment_attempts_purpose_form_check check (purpose ~ '^(deposit|balance|change-[1-9][0-9]*)$'),
-  constraint payment_attempts_ended_check check ((state in ('captured', 'failed', 'abandoned')) = (ended_at is not null))
+  constraint payment_attempts_ended_check
+    check ((state in ('captured', 'failed', 'abandoned')) = (ended_at is not null))
 );
 create unique index payment_attempts_one_live_key on payment_attempts (order_id, purpose)
   where state in ('requested', 'sent', 'unknown', 'needs_customer');
@@ -88,28 +91,34 @@ create table refunds (
   constraint refunds_sequence_check check (sequence > 0),
   constraint refunds_amount_minor_check check (amount_minor > 0),
   constraint refunds_currency_check check (currency ~ '^[A-Z]{3}$'),
-  constraint refunds_cause_check check (cause in ('cancelled', 'withdrawn', 'run_called_off', 'late_capture', 'surplus', 'order_change', 'lapsed', 'problem', 'notice', 'postage', 'price_fell', 'owner')),
+  constraint refunds_cause_check
+    check (cause in ('cancelled', 'withdrawn', 'run_called_off', 'late_capture', 'surplus', 'order_change'
+       'lapsed', 'problem', 'notice', 'postage', 'price_fell', 'owner')),
   constraint refunds_reason_check check (length(reason) <= 1000),
   constraint refunds_idempotency_key_check check (length(idempotency_key) <= 120),
   constraint refunds_idempotency_key_key unique (idempotency_key),
   constraint refunds_provider_id_check check (length(provider_id) <= 200),
-  constraint refunds_state_check check (state in ('requested', 'sent', 'unknown', 'pending', 'succeeded', 'failed')),
+  constraint refunds_state_check
+    check (state in ('requested', 'sent', 'unknown', 'pending', 'succeeded', 'failed')),
   constraint refunds_short_by_minor_check check (short_by_minor >= 0),
   constraint refunds_failure_code_check check (length(failure_code) <= 100),
   constraint refunds_retry_of_id_fkey foreign key (workshop_id, retry_of_id)
     references refunds (workshop_id, id) on delete restrict,
-  constraint refunds_requested_by_person_id_fkey foreign key (requested_by_person_id) references people (id) on delete restrict,
+  constraint refunds_requested_by_person_id_fkey foreign key (requested_by_person_id)
+    references people (id) on delete restrict,
   constraint refunds_workshop_id_id_key unique (workshop_id, id),
   constraint refunds_attempt_id_sequence_key unique (attempt_id, sequence),
   constraint refunds_failed_check check ((state = 'failed') = (failed_at is not null))
 );
 create index refunds_state_idx on refunds (workshop_id, state);
 create index refunds_order_id_idx on refunds (order_id);
-create constraint trigger refunds_within_captured after insert or update on refunds for each row execute function refuse_refund_above_captured();
+create constraint trigger refunds_within_captured after insert or update on refunds
+  for each row execute function refuse_refund_above_captured();
 
 create table provider_customers (
   id uuid default gen_random_uuid() constraint provider_customers_pkey primary key,
-  workshop_id uuid not null constraint provider_customers_workshop_id_fkey references workshops (id) on delete restrict,
+  workshop_id uuid not null constraint provider_customers_workshop_id_fkey
+    references workshops (id) on delete restrict,
   person_id uuid not null,
   provider_account_id text not null,
   provider_id text not null,
@@ -118,7 +127,8 @@ create table provider_customers (
   method_last4 text,
   method_saved_at timestamptz,
   created_at timestamptz not null,
-  constraint provider_customers_person_id_fkey foreign key (person_id) references people (id) on delete restrict,
+  constraint provider_customers_person_id_fkey foreign key (person_id)
+    references people (id) on delete restrict,
   constraint provider_customers_provider_account_id_check check (length(provider_account_id) <= 100),
   constraint provider_customers_provider_id_check check (length(provider_id) <= 200),
   constraint provider_customers_method_id_check check (length(method_id) <= 200),
@@ -163,7 +173,8 @@ create table provider_effects (
   constraint provider_effects_account_check check (length(account) <= 100),
   constraint provider_effects_object_id_check check (length(object_id) <= 200),
   constraint provider_effects_transition_check check (length(transition) <= 60),
-  constraint provider_effects_provider_event_id_fkey foreign key (provider_event_id) references provider_events (id) on delete restrict,
+  constraint provider_effects_provider_event_id_fkey foreign key (provider_event_id)
+    references provider_events (id) on delete restrict,
   constraint provider_effects_account_object_id_transition_key unique (account, object_id, transition)
 );
 
@@ -197,7 +208,8 @@ create index disputes_order_id_idx on disputes (workshop_id, order_id);
 
 create table reconciliations (
   id uuid default gen_random_uuid() constraint reconciliations_pkey primary key,
-  workshop_id uuid not null constraint reconciliations_workshop_id_fkey references workshops (id) on delete restrict,
+  workshop_id uuid not null constraint reconciliations_workshop_id_fkey
+    references workshops (id) on delete restrict,
   day date not null,
   compared_at timestamptz not null,
   item_count integer not null,

@@ -6,7 +6,8 @@ type Run = (sql: string) => Promise<unknown>
 const UP = `
 create table ledger_transfers (
   id uuid default gen_random_uuid() constraint ledger_transfers_pkey primary key,
-  workshop_id uuid not null constraint ledger_transfers_workshop_id_fkey references workshops (id) on delete restrict,
+  workshop_id uuid not null constraint ledger_transfers_workshop_id_fkey
+    references workshops (id) on delete restrict,
   source text not null,
   source_id text not null,
   kind text not null,
@@ -26,13 +27,16 @@ create table ledger_transfers (
 create index ledger_transfers_at_idx on ledger_transfers (workshop_id, at);
 create index ledger_transfers_order_id_idx on ledger_transfers (order_id);
 create index ledger_transfers_run_id_idx on ledger_transfers (run_id);
-create constraint trigger ledger_transfers_balanced after insert on ledger_transfers deferrable initially deferred for each row execute function refuse_unbalanced_transfer();
+create constraint trigger ledger_transfers_balanced after insert on ledger_transfers
+  deferrable initially deferred
+  for each row execute function refuse_unbalanced_transfer();
 create trigger ledger_transfers_never_changed before update or delete on ledger_transfers
   for each row execute function refuse_change();
 
 create table ledger_entries (
   id uuid default gen_random_uuid() constraint ledger_entries_pkey primary key,
-  workshop_id uuid not null constraint ledger_entries_workshop_id_fkey references workshops (id) on delete restrict,
+  workshop_id uuid not null constraint ledger_entries_workshop_id_fkey
+    references workshops (id) on delete restrict,
   transfer_id uuid not null,
   account text not null,
   currency text not null,
@@ -48,7 +52,8 @@ create table ledger_entries (
   constraint ledger_entries_amount_not_zero_check check (amount_minor <> 0)
 );
 create index ledger_entries_account_idx on ledger_entries (workshop_id, account);
-create constraint trigger ledger_entries_balanced after insert on ledger_entries deferrable initially deferred for each row execute function refuse_unbalanced_transfer();
+create constraint trigger ledger_entries_balanced after insert on ledger_entries deferrable initially deferred
+  for each row execute function refuse_unbalanced_transfer();
 create trigger ledger_entries_never_changed before update or delete on ledger_entries
   for each row execute function refuse_change();
 

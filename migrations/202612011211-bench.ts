@@ -6,7 +6,8 @@ type Run = (sql: string) => Promise<unknown>
 const UP = `
 create table test_plans (
   id uuid default gen_random_uuid() constraint test_plans_pkey primary key,
-  workshop_id uuid not null constraint test_plans_workshop_id_fkey references workshops (id) on delete restrict,
+  workshop_id uuid not null constraint test_plans_workshop_id_fkey
+    references workshops (id) on delete restrict,
   revision_id uuid not null,
   version integer not null,
   steps jsonb not null,
@@ -15,7 +16,8 @@ create table test_plans (
   constraint test_plans_revision_id_fkey foreign key (workshop_id, revision_id)
     references revisions (workshop_id, id) on delete restrict,
   constraint test_plans_version_check check (version > 0),
-  constraint test_plans_created_by_person_id_fkey foreign key (created_by_person_id) references people (id) on delete restrict,
+  constraint test_plans_created_by_person_id_fkey foreign key (created_by_person_id)
+    references people (id) on delete restrict,
   constraint test_plans_workshop_id_id_key unique (workshop_id, id),
   constraint test_plans_revision_id_version_key unique (revision_id, version)
 );
@@ -42,7 +44,8 @@ create table readings (
   constraint readings_step_key_check check (length(step_key) <= 60),
   constraint readings_word_check check (length(word) <= 500),
   constraint readings_verdict_check check (verdict in ('pass', 'fail')),
-  constraint readings_taken_by_person_id_fkey foreign key (taken_by_person_id) references people (id) on delete restrict,
+  constraint readings_taken_by_person_id_fkey foreign key (taken_by_person_id)
+    references people (id) on delete restrict,
   constraint readings_workshop_id_id_key unique (workshop_id, id)
 );
 create index readings_unit_id_test_plan_id_idx on readings (workshop_id, unit_id, test_plan_id);

@@ -14,7 +14,9 @@ create table waivers (
   at timestamptz not null,
   constraint waivers_run_id_fkey foreign key (workshop_id, run_id)
     references runs (workshop_id, id) on delete restrict,
-  constraint waivers_key_check check (key in ('first_good_unit', 'lessons', 'quotes', 'samples', 'parts_list', 'post_data', 'promise', 'page', 'repay')),
+  constraint waivers_key_check
+    check (key in ('first_good_unit', 'lessons', 'quotes', 'samples', 'parts_list', 'post_data', 'promise'
+       'page', 'repay')),
   constraint waivers_reason_check check (length(reason) <= 2000),
   constraint waivers_by_person_id_fkey foreign key (by_person_id) references people (id) on delete restrict,
   constraint waivers_workshop_id_id_key unique (workshop_id, id),
@@ -23,7 +25,8 @@ create table waivers (
 
 create table decisions (
   id uuid default gen_random_uuid() constraint decisions_pkey primary key,
-  workshop_id uuid not null constraint decisions_workshop_id_fkey references workshops (id) on delete restrict,
+  workshop_id uuid not null constraint decisions_workshop_id_fkey
+    references workshops (id) on delete restrict,
   run_id uuid not null,
   kind text not null,
   reason text,
@@ -34,7 +37,9 @@ create table decisions (
   at timestamptz not null,
   constraint decisions_run_id_fkey foreign key (workshop_id, run_id)
     references runs (workshop_id, id) on delete restrict,
-  constraint decisions_kind_check check (kind in ('open_deposits', 'lock', 'call_off', 'lower_minimum', 'move_decide_by', 'change_maximum', 'delay_offer', 'close')),
+  constraint decisions_kind_check
+    check (kind in ('open_deposits', 'lock', 'call_off', 'lower_minimum', 'move_decide_by'
+       'change_maximum', 'delay_offer', 'close')),
   constraint decisions_reason_check check (length(reason) <= 2000),
   constraint decisions_core_version_check check (length(core_version) <= 40),
   constraint decisions_by_person_id_fkey foreign key (by_person_id) references people (id) on delete restrict,
@@ -61,7 +66,8 @@ create table plans (
   constraint plans_run_id_fkey foreign key (workshop_id, run_id)
     references runs (workshop_id, id) on delete restrict,
   constraint plans_name_check check (length(name) <= 80),
-  constraint plans_changed_by_person_id_fkey foreign key (changed_by_person_id) references people (id) on delete restrict,
+  constraint plans_changed_by_person_id_fkey foreign key (changed_by_person_id)
+    references people (id) on delete restrict,
   constraint plans_workshop_id_id_key unique (workshop_id, id),
   constraint plans_run_id_name_key unique (run_id, name)
 );
@@ -81,7 +87,8 @@ create table outcomes (
   stored_at timestamptz not null,
   constraint outcomes_run_id_fkey foreign key (workshop_id, run_id)
     references runs (workshop_id, id) on delete restrict,
-  constraint outcomes_class_name_check check (class_name in ('certain', 'likely', 'curious', 'old_signup', 'deposit_paying')),
+  constraint outcomes_class_name_check
+    check (class_name in ('certain', 'likely', 'curious', 'old_signup', 'deposit_paying')),
   constraint outcomes_converted_check check (converted >= 0),
   constraint outcomes_not_converted_check check (not_converted >= 0),
   constraint outcomes_workshop_id_id_key unique (workshop_id, id),

@@ -28,7 +28,8 @@ create table parts (
   constraint parts_value_check check (length(value) <= 80),
   constraint parts_lifecycle_check check (lifecycle in ('active', 'not_for_new_designs', 'last_buy', 'gone')),
   constraint parts_sample_note_check check (length(sample_note) <= 1000),
-  constraint parts_sample_by_person_id_fkey foreign key (sample_by_person_id) references people (id) on delete restrict,
+  constraint parts_sample_by_person_id_fkey foreign key (sample_by_person_id)
+    references people (id) on delete restrict,
   constraint parts_storage_place_check check (length(storage_place) <= 40),
   constraint parts_polarity_note_check check (length(polarity_note) <= 300),
   constraint parts_workshop_id_id_key unique (workshop_id, id),
@@ -38,7 +39,8 @@ create table parts (
 
 create table part_alternates (
   id uuid default gen_random_uuid() constraint part_alternates_pkey primary key,
-  workshop_id uuid not null constraint part_alternates_workshop_id_fkey references workshops (id) on delete restrict,
+  workshop_id uuid not null constraint part_alternates_workshop_id_fkey
+    references workshops (id) on delete restrict,
   part_id uuid not null,
   alternate_id uuid not null,
   note text not null default '',
@@ -54,7 +56,8 @@ create table part_alternates (
 
 create table revision_lines (
   id uuid default gen_random_uuid() constraint revision_lines_pkey primary key,
-  workshop_id uuid not null constraint revision_lines_workshop_id_fkey references workshops (id) on delete restrict,
+  workshop_id uuid not null constraint revision_lines_workshop_id_fkey
+    references workshops (id) on delete restrict,
   revision_id uuid not null,
   part_id uuid not null,
   position integer not null,
@@ -115,7 +118,8 @@ create index quotes_part_id_idx on quotes (workshop_id, part_id);
 
 create table quote_breaks (
   id uuid default gen_random_uuid() constraint quote_breaks_pkey primary key,
-  workshop_id uuid not null constraint quote_breaks_workshop_id_fkey references workshops (id) on delete restrict,
+  workshop_id uuid not null constraint quote_breaks_workshop_id_fkey
+    references workshops (id) on delete restrict,
   quote_id uuid not null,
   from_quantity integer not null,
   unit_price numeric(18,6) not null,
@@ -129,7 +133,8 @@ create table quote_breaks (
 
 create table purchase_lines (
   id uuid default gen_random_uuid() constraint purchase_lines_pkey primary key,
-  workshop_id uuid not null constraint purchase_lines_workshop_id_fkey references workshops (id) on delete restrict,
+  workshop_id uuid not null constraint purchase_lines_workshop_id_fkey
+    references workshops (id) on delete restrict,
   run_id uuid,
   part_id uuid,
   name text not null,
@@ -157,7 +162,8 @@ create table purchase_lines (
   constraint purchase_lines_received_count_check check (received_count >= 0),
   constraint purchase_lines_currency_check check (currency ~ '^[A-Z]{3}$'),
   constraint purchase_lines_cost_minor_check check (cost_minor >= 0),
-  constraint purchase_lines_state_check check (state in ('planned', 'ordered', 'part_received', 'received', 'cancelled')),
+  constraint purchase_lines_state_check
+    check (state in ('planned', 'ordered', 'part_received', 'received', 'cancelled')),
   constraint purchase_lines_workshop_id_id_key unique (workshop_id, id),
   constraint purchase_lines_unit_price_not_negative_check check (unit_price >= 0),
   constraint purchase_lines_received_check check (received_count <= quantity),
@@ -195,7 +201,8 @@ create index lots_state_idx on lots (workshop_id, state);
 
 create table stock_moves (
   id uuid default gen_random_uuid() constraint stock_moves_pkey primary key,
-  workshop_id uuid not null constraint stock_moves_workshop_id_fkey references workshops (id) on delete restrict,
+  workshop_id uuid not null constraint stock_moves_workshop_id_fkey
+    references workshops (id) on delete restrict,
   part_id uuid not null,
   lot_id uuid,
   run_id uuid,
@@ -210,9 +217,11 @@ create table stock_moves (
     references lots (workshop_id, id) on delete restrict,
   constraint stock_moves_run_id_fkey foreign key (workshop_id, run_id)
     references runs (workshop_id, id) on delete restrict,
-  constraint stock_moves_cause_check check (cause in ('counted', 'received', 'used', 'spare', 'scrapped', 'sold')),
+  constraint stock_moves_cause_check
+    check (cause in ('counted', 'received', 'used', 'spare', 'scrapped', 'sold')),
   constraint stock_moves_note_check check (length(note) <= 300),
-  constraint stock_moves_by_person_id_fkey foreign key (by_person_id) references people (id) on delete restrict,
+  constraint stock_moves_by_person_id_fkey foreign key (by_person_id)
+    references people (id) on delete restrict,
   constraint stock_moves_workshop_id_id_key unique (workshop_id, id),
   constraint stock_moves_change_not_zero_check check (change <> 0)
 );

@@ -22,17 +22,20 @@ create table notices (
   constraint notices_run_offer_id_fkey foreign key (workshop_id, run_offer_id)
     references run_offers (workshop_id, id) on delete restrict,
   constraint notices_kind_check check (kind in ('delay', 'change', 'broken_promise')),
-  constraint notices_what_changed_check check (what_changed in ('revision', 'part', 'decide_by', 'minimum', 'other')),
+  constraint notices_what_changed_check
+    check (what_changed in ('revision', 'part', 'decide_by', 'minimum', 'other')),
   constraint notices_number_check check (number > 0),
   constraint notices_reason_check check (length(reason) <= 2000),
   constraint notices_by_person_id_fkey foreign key (by_person_id) references people (id) on delete restrict,
   constraint notices_workshop_id_id_key unique (workshop_id, id)
 );
-alter table notices add constraint notices_run_offer_number_key unique nulls not distinct (run_id, run_offer_id, kind, number);
+alter table notices
+  add constraint notices_run_offer_number_key unique nulls not distinct (run_id, run_offer_id, kind, number);
 
 create table notice_answers (
   id uuid default gen_random_uuid() constraint notice_answers_pkey primary key,
-  workshop_id uuid not null constraint notice_answers_workshop_id_fkey references workshops (id) on delete restrict,
+  workshop_id uuid not null constraint notice_answers_workshop_id_fkey
+    references workshops (id) on delete restrict,
   notice_id uuid not null,
   order_id uuid not null,
   silence_means text not null,
@@ -80,10 +83,12 @@ create table problems (
     references order_lines (workshop_id, id) on delete restrict,
   constraint problems_parcel_id_fkey foreign key (workshop_id, parcel_id)
     references parcels (workshop_id, id) on delete restrict,
-  constraint problems_kind_check check (kind in ('missing_part', 'fault', 'wrong', 'damaged', 'lost', 'other')),
+  constraint problems_kind_check
+    check (kind in ('missing_part', 'fault', 'wrong', 'damaged', 'lost', 'other')),
   constraint problems_story_check check (length(story) <= 5000),
   constraint problems_state_check check (state in ('open', 'answered', 'closed')),
-  constraint problems_remedy_check check (remedy in ('part', 'replacement', 'repair', 'part_refund', 'full_refund', 'message')),
+  constraint problems_remedy_check
+    check (remedy in ('part', 'replacement', 'repair', 'part_refund', 'full_refund', 'message')),
   constraint problems_answer_check check (length(answer) <= 5000),
   constraint problems_lesson_id_fkey foreign key (workshop_id, lesson_id)
     references lessons (workshop_id, id) on delete restrict,
@@ -94,7 +99,8 @@ create table problems (
 );
 create index problems_state_idx on problems (workshop_id, state);
 create index problems_order_id_idx on problems (order_id);
-alter table parcels add constraint parcels_problem_id_fkey foreign key (workshop_id, problem_id) references problems (workshop_id, id) on delete restrict;
+alter table parcels add constraint parcels_problem_id_fkey foreign key (workshop_id, problem_id)
+  references problems (workshop_id, id) on delete restrict;
 
 create table updates (
   id uuid default gen_random_uuid() constraint updates_pkey primary key,
@@ -119,7 +125,8 @@ create index updates_run_id_sent_at_idx on updates (workshop_id, run_id, sent_at
 
 create table questions (
   id uuid default gen_random_uuid() constraint questions_pkey primary key,
-  workshop_id uuid not null constraint questions_workshop_id_fkey references workshops (id) on delete restrict,
+  workshop_id uuid not null constraint questions_workshop_id_fkey
+    references workshops (id) on delete restrict,
   module_id uuid not null,
   person_id uuid,
   question text not null,

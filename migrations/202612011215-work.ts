@@ -6,7 +6,8 @@ type Run = (sql: string) => Promise<unknown>
 const UP = `
 create table bulk_jobs (
   id uuid default gen_random_uuid() constraint bulk_jobs_pkey primary key,
-  workshop_id uuid not null constraint bulk_jobs_workshop_id_fkey references workshops (id) on delete restrict,
+  workshop_id uuid not null constraint bulk_jobs_workshop_id_fkey
+    references workshops (id) on delete restrict,
   kind text not null,
   run_id uuid,
   params jsonb not null default '{}',
@@ -23,7 +24,8 @@ create index bulk_jobs_run_id_idx on bulk_jobs (workshop_id, run_id);
 
 create table bulk_items (
   id uuid default gen_random_uuid() constraint bulk_items_pkey primary key,
-  workshop_id uuid not null constraint bulk_items_workshop_id_fkey references workshops (id) on delete restrict,
+  workshop_id uuid not null constraint bulk_items_workshop_id_fkey
+    references workshops (id) on delete restrict,
   bulk_job_id uuid not null,
   subject_id uuid not null,
   position integer not null,
@@ -69,7 +71,8 @@ create table due_items (
   attempts integer not null default 0,
   last_error text,
   constraint due_items_kind_check check (length(kind) <= 40),
-  constraint due_items_workshop_id_fkey foreign key (workshop_id) references workshops (id) on delete restrict,
+  constraint due_items_workshop_id_fkey foreign key (workshop_id)
+    references workshops (id) on delete restrict,
   constraint due_items_attempts_check check (attempts >= 0),
   constraint due_items_last_error_check check (length(last_error) <= 500),
   constraint due_items_kind_subject_id_key unique (kind, subject_id)
@@ -89,12 +92,14 @@ create table audit_entries (
   at timestamptz not null,
   note text,
   seq bigint generated always as identity,
-  constraint audit_entries_workshop_id_fkey foreign key (workshop_id) references workshops (id) on delete restrict,
+  constraint audit_entries_workshop_id_fkey foreign key (workshop_id)
+    references workshops (id) on delete restrict,
   constraint audit_entries_subject_type_check check (length(subject_type) <= 40),
   constraint audit_entries_from_state_check check (length(from_state) <= 40),
   constraint audit_entries_event_check check (length(event) <= 60),
   constraint audit_entries_to_state_check check (length(to_state) <= 40),
-  constraint audit_entries_by_person_id_fkey foreign key (by_person_id) references people (id) on delete restrict,
+  constraint audit_entries_by_person_id_fkey foreign key (by_person_id)
+    references people (id) on delete restrict,
   constraint audit_entries_note_check check (length(note) <= 2000)
 );
 create index audit_entries_subject_type_subject_id_seq_idx on audit_entries (subject_type, subject_id, seq);
@@ -109,7 +114,8 @@ create table clock_offset (
   constraint clock_offset_one_row_check check (id = 1),
   constraint clock_offset_offset_not_negative_check check (offset_ms >= 0)
 );
-create trigger clock_offset_forward before update on clock_offset for each row execute function refuse_clock_back();
+create trigger clock_offset_forward before update on clock_offset
+  for each row execute function refuse_clock_back();
 insert into clock_offset (id) values (1);
 
 create table rate_limits (key varchar(255) constraint rate_limits_pkey primary key, points integer not null default 0, expire bigint);

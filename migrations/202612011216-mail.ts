@@ -24,14 +24,16 @@ create table mail_outbox (
   claimed_at timestamptz,
   sent_at timestamptz,
   ended_at timestamptz,
-  constraint mail_outbox_workshop_id_fkey foreign key (workshop_id) references workshops (id) on delete restrict,
+  constraint mail_outbox_workshop_id_fkey foreign key (workshop_id)
+    references workshops (id) on delete restrict,
   constraint mail_outbox_kind_check check (length(kind) <= 40),
   constraint mail_outbox_person_id_fkey foreign key (person_id) references people (id) on delete restrict,
   constraint mail_outbox_subject_id_check check (length(subject_id) <= 100),
   constraint mail_outbox_version_check check (version > 0),
   constraint mail_outbox_message_id_check check (length(message_id) <= 300),
   constraint mail_outbox_message_id_key unique (message_id),
-  constraint mail_outbox_state_check check (state in ('queued', 'sending', 'sent', 'given_up', 'dropped', 'bounced')),
+  constraint mail_outbox_state_check
+    check (state in ('queued', 'sending', 'sent', 'given_up', 'dropped', 'bounced')),
   constraint mail_outbox_subject_line_check check (length(subject_line) <= 300),
   constraint mail_outbox_attempts_check check (attempts >= 0),
   constraint mail_outbox_last_error_check check (length(last_error) <= 500),
@@ -51,11 +53,13 @@ create table suppressions (
   cause text not null,
   at timestamptz not null,
   constraint suppressions_email_hash_check check (length(email_hash) <= 64),
-  constraint suppressions_workshop_id_fkey foreign key (workshop_id) references workshops (id) on delete restrict,
+  constraint suppressions_workshop_id_fkey foreign key (workshop_id)
+    references workshops (id) on delete restrict,
   constraint suppressions_scope_check check (scope in ('updates', 'invitations', 'all')),
   constraint suppressions_cause_check check (cause in ('unsubscribed', 'bounced', 'complained'))
 );
-alter table suppressions add constraint suppressions_email_workshop_scope_key unique nulls not distinct (email_hash, workshop_id, scope);
+alter table suppressions
+  add constraint suppressions_email_workshop_scope_key unique nulls not distinct (email_hash, workshop_id, scope);
 
 create table form_drafts (
   id text constraint form_drafts_pkey primary key,

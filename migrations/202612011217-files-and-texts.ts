@@ -44,11 +44,13 @@ create table files (
   constraint files_focal_x_check check (focal_x between 0 and 100),
   constraint files_focal_y_check check (focal_y between 0 and 100),
   constraint files_duration_ms_check check (duration_ms > 0),
-  constraint files_created_by_person_id_fkey foreign key (created_by_person_id) references people (id) on delete restrict
+  constraint files_created_by_person_id_fkey foreign key (created_by_person_id)
+    references people (id) on delete restrict
 );
 create index files_subject_type_subject_id_kind_position_idx on files (subject_type, subject_id, kind, position);
 create index files_sha256_idx on files (sha256);
-alter table revisions add constraint revisions_first_good_file_id_fkey foreign key (first_good_file_id) references files (id) on delete restrict;
+alter table revisions add constraint revisions_first_good_file_id_fkey foreign key (first_good_file_id)
+  references files (id) on delete restrict;
 
 create table texts (
   id uuid default gen_random_uuid() constraint texts_pkey primary key,
