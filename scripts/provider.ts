@@ -16,6 +16,7 @@ for (const signal of ['SIGTERM', 'SIGINT'] as const) process.on(signal, () => en
 
 const server = await startCardPage(Number(new URL(CARD_PAGE_URL).port || 80))
 console.log(`card page: ${CARD_PAGE_URL} (sandbox, no real money)`)
+console.log('ready')
 await runProvider(ending.signal)
 server.close()
 server.closeAllConnections()

@@ -5,26 +5,60 @@ import { missing, SandboxBug } from '@/lib/gateways/payments/fake/errors'
 import { PREFIX, type Hidden, type Kind, type Kinds } from '@/lib/gateways/payments/fake/kinds'
 import { sandboxPool } from '@/lib/gateways/payments/fake/pool'
 
-/** The books of one account, open in one transaction under the account's lock. */
-export type Books = { readonly sql: PoolClient; readonly account: string; readonly now: number }
+/** An event to be written with everything else when the books close. */
+export type Outgoing = { id: string; type: string; body: string; delayMs: number; isLost: boolean }
 
-async function businessSeconds(sql: PoolClient): Promise<number> {
-  const known = await sql.query("select to_regclass('public.clock_offset') is not null as has_clock")
-  const hasClock = known.rows[0]?.has_clock === true
+/** The books of one account, open in one transaction under the account's lock. */
+export type Books = {
+  readonly sql: PoolClient
+  readonly account: string
+  readonly now: number
+  readonly numbers: number[]
+  readonly outbox: Outgoing[]
+}
+
+const NUMBERS_AT_ONCE = 24
+const OPEN = `select pg_advisory_xact_lock(hashtext('sandbox'), hashtext($1)),
+  array(select nextval('sandbox.numbers')::float8 from generate_series(1, ${NUMBERS_AT_ONCE})) as numbers,
+  (select to_regclass('public.clock_offset') is not null) as has_clock`
+
+async function open(sql: PoolClient, account: string): Promise<Books> {
+  await sql.query('begin')
+  const { numbers, has_clock: hasClock } = (await sql.query(OPEN, [account])).rows[0]
   const offset = hasClock
     ? (await sql.query('select offset_ms from public.clock_offset')).rows[0]?.offset_ms
     : 0
-  return Math.floor((Date.now() + Number(offset ?? 0)) / 1000)
+  const now = Math.floor((Date.now() + Number(offset ?? 0)) / 1000)
+  return { sql, account, now, numbers, outbox: [] }
+}
+
+async function close({ sql, account, outbox }: Books): Promise<void> {
+  if (outbox.length > 0) {
+    await sql.query(
+      `insert into sandbox.events (id, account, type, body, due_at, state)
+       select id, $1, type, body, clock_timestamp() + make_interval(secs => delay / 1000.0),
+         case when lost then 'lost' else 'waiting' end
+       from unnest($2::text[], $3::text[], $4::text[], $5::int[], $6::bool[]) as e (id, type, body, delay, lost)`,
+      [
+        account,
+        outbox.map(({ id }) => id),
+        outbox.map(({ type }) => type),
+        outbox.map(({ body }) => body),
+        outbox.map(({ delayMs }) => delayMs),
+        outbox.map(({ isLost }) => isLost),
+      ],
+    )
+  }
+  await sql.query('commit')
 }
 
 /** Opens the books of an account ('' for the platform's own), one caller at a time; commits unless `work` throws. */
 export async function withBooks<T>(account: string, work: (books: Books) => Promise<T>): Promise<T> {
   const sql = await (await sandboxPool()).connect()
   try {
-    await sql.query('begin')
-    await sql.query("select pg_advisory_xact_lock(hashtext('sandbox'), hashtext($1))", [account])
-    const done = await work({ sql, account, now: await businessSeconds(sql) })
-    await sql.query('commit')
+    const books = await open(sql, account)
+    const done = await work(books)
+    await close(books)
     sql.release()
     return done
   } catch (error) {
@@ -37,7 +71,10 @@ export async function withBooks<T>(account: string, work: (books: Books) => Prom
   }
 }
 
-export async function nextNumber({ sql }: Books): Promise<number> {
+/** A number nobody else has; drawn in advance, so that gaps are usual. */
+export async function nextNumber({ sql, numbers }: Books): Promise<number> {
+  const drawn = numbers.shift()
+  if (drawn !== undefined) return drawn
   return Number((await sql.query("select nextval('sandbox.numbers') as n")).rows[0].n)
 }
 

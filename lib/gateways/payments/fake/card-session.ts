@@ -1,5 +1,6 @@
 import 'server-only'
 import type Stripe from 'stripe'
+import { env } from '@/lib/config/env'
 import {
   accountOf,
   type Books,
@@ -54,7 +55,9 @@ export async function cancelIntent(
 /** The session as it is by the clock: one whose time has passed is expired at the latest when somebody looks. */
 export async function sessionNow(books: Books, id: string): Promise<Stripe.Checkout.Session> {
   const session = await load(books, 'checkout_session', id)
-  if (session.status !== 'open' || session.expires_at > books.now) return session
+  if (session.status !== 'open') return session
+  // The card page's port may be another one since the last start.
+  if (session.expires_at > books.now) return { ...session, url: `${env().CARD_PAGE_URL}/pay/${id}` }
   return expireSession(books, session)
 }
 

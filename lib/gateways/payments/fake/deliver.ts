@@ -44,7 +44,7 @@ async function takeDue(isHurried: boolean, taken: readonly string[]): Promise<Du
        where state = 'waiting' and (due_at <= clock_timestamp() or $3) and seq <> all($4::bigint[])
        order by due_at, seq limit $1 for update skip locked)
      returning seq::text, id, body, tries`,
-    [BATCH, LEASE, isHurried, isHurried ? taken : []],
+    [BATCH, LEASE, isHurried, taken],
   )
   return rows.sort((a, b) => Number(a.seq) - Number(b.seq))
 }
@@ -71,8 +71,8 @@ type Options = {
 }
 
 /**
- * Sends the events that are due, until none is. An event the application does not answer with 2xx is tried again
- * later (pauses doubling from 250 ms): at least once, in no promised order.
+ * Sends the events that are due, each once. An event the application does not answer with 2xx is tried again
+ * at a later call (pauses doubling from 250 ms): at least once, in no promised order.
  */
 export async function deliverDueEvents({ deliver = overHttp, isHurried = false }: Options = {}): Promise<{
   delivered: number

@@ -24,13 +24,8 @@ export async function emit(books: Books, type: Stripe.Event.Type, object: object
   const isLost = isFault('event_lost', n, 0.06)
   const delays = [delayMs(n, 'event_late')]
   if (isFault('event_twice', n, 0.12)) delays.push(delayMs(n, 'event_late_again') + 300)
-  for (const delay of delays) {
-    await books.sql.query(
-      `insert into sandbox.events (id, account, type, body, due_at, state)
-       values ($1, $2, $3, $4, clock_timestamp() + make_interval(secs => $5 / 1000.0), $6)`,
-      [event.id, books.account, type, JSON.stringify(event, null, 2), delay, isLost ? 'lost' : 'waiting'],
-    )
-  }
+  const body = JSON.stringify(event, null, 2)
+  for (const delay of delays) books.outbox.push({ id: event.id, type, body, delayMs: delay, isLost })
 }
 
 function delayMs(n: number, label: string): number {

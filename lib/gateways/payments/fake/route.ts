@@ -33,13 +33,17 @@ const textOf = (error: ErrorBody): string => JSON.stringify({ error })
 /** Runs the work inside a savepoint, so that a refusal leaves behind only what it says. */
 async function carryOut(call: Call, work: (call: Call) => Promise<object>): Promise<Answer> {
   const { sql } = call.books
+  const { outbox } = call.books
   await sql.query('savepoint before_call')
   try {
     const answer = await expand(call.books, await work(call), call.params.list('expand'))
     return { status: 200, body: JSON.stringify(answer) }
   } catch (error) {
     if (!(error instanceof ProviderRefusal) || error.keeps === 'nothing') throw error
-    if (error.keeps === 'answer') await sql.query('rollback to savepoint before_call')
+    if (error.keeps === 'answer') {
+      await sql.query('rollback to savepoint before_call')
+      outbox.length = 0
+    }
     return { status: error.status, body: textOf(error.body) }
   }
 }

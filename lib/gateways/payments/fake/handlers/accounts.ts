@@ -12,7 +12,7 @@ import { type Call, route } from '@/lib/gateways/payments/fake/route'
 const LINK_SECONDS = 300
 
 /** An account's object is kept in its own books, whoever asks. */
-const within = ({ sql, now }: Books, account: string): Books => ({ sql, now, account })
+const within = (books: Books, account: string): Books => ({ ...books, account })
 
 async function createAccount({ books, params }: Call): Promise<Stripe.Account> {
   const country = params.text('country')
