@@ -60,8 +60,8 @@ end $$;
 create function refuse_clock_back() returns trigger language plpgsql as $$
 begin
   if new.offset_ms < old.offset_ms then
-    raise exception 'business time only goes forward' using errcode = 'check_violation'
-       constraint = 'clock_offset_forward';
+    raise exception 'business time only goes forward' using errcode = 'check_violation',
+      constraint = 'clock_offset_forward';
   end if;
   return new;
 end $$;

@@ -1,5 +1,4 @@
-// People apart from everything else, so that "erase me" blanks one place; users, sessions
-  and links hang on them.
+// People apart from everything else, so that "erase me" blanks one place; users, sessions and links hang on them.
 // Locks: none (new tables). Back: drops them; their data is lost.
 
 type Run = (sql: string) => Promise<unknown>

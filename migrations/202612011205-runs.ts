@@ -77,7 +77,7 @@ create table runs (
   constraint runs_called_off_check
     check ((state = 'called_off') = (called_off_at is not null)
       and (called_off_at is null) = (call_off_reason is null)
-        and (called_off_at is null) = (call_off_cause is null)),
+      and (called_off_at is null) = (call_off_cause is null)),
   constraint runs_closed_check check ((state = 'closed') = (closed_at is not null))
 );
 create index runs_state_idx on runs (workshop_id, state);

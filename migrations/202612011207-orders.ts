@@ -96,8 +96,8 @@ create table orders (
   constraint orders_person_id_fkey foreign key (person_id) references people (id) on delete restrict,
   constraint orders_kind_check check (kind in ('paid', 'manual')),
   constraint orders_state_check
-    check (state in ('awaiting_deposit', 'waiting', 'reserved', 'balance_due', 'paid', 'packed', 'posted'
-       'cancelled', 'expired', 'lapsed', 'withdrawn', 'returned')),
+    check (state in ('awaiting_deposit', 'waiting', 'reserved', 'balance_due', 'paid', 'packed', 'posted',
+      'cancelled', 'expired', 'lapsed', 'withdrawn', 'returned')),
   constraint orders_unit_count_check check (unit_count > 0),
   constraint orders_hold_attempts_check check (hold_attempts >= 0),
   constraint orders_terms_version_id_fkey foreign key (workshop_id, terms_version_id)
@@ -121,8 +121,8 @@ create table orders (
   constraint orders_entered_by_person_id_fkey foreign key (entered_by_person_id)
     references people (id) on delete restrict,
   constraint orders_cancel_cause_check
-    check (cancel_cause in ('customer', 'owner', 'withdrawal', 'notice', 'silence', 'broken_promise'
-       'run_called_off', 'run_closed', 'left_queue')),
+    check (cancel_cause in ('customer', 'owner', 'withdrawal', 'notice', 'silence', 'broken_promise',
+      'run_called_off', 'run_closed', 'left_queue')),
   constraint orders_cancel_reason_check check (length(cancel_reason) <= 1000),
   constraint orders_workshop_id_id_key unique (workshop_id, id),
   constraint orders_number_key unique (workshop_id, number),
@@ -148,8 +148,8 @@ create table orders (
     check (state not in ('paid', 'packed', 'posted', 'withdrawn', 'returned') or paid_at is not null)
 );
 create unique index orders_one_live_key on orders (run_id, person_id, address_fingerprint)
-  where kind = 'paid' and state in ('waiting', 'awaiting_deposit', 'reserved', 'balance_due', 'paid'
-     'packed');
+  where kind = 'paid' and state in ('waiting', 'awaiting_deposit', 'reserved', 'balance_due', 'paid',
+    'packed');
 create index orders_run_id_state_idx on orders (workshop_id, run_id, state);
 create index orders_person_id_placed_at_idx on orders (person_id, placed_at);
 create index orders_address_id_idx on orders (address_id);

@@ -92,8 +92,8 @@ create table refunds (
   constraint refunds_amount_minor_check check (amount_minor > 0),
   constraint refunds_currency_check check (currency ~ '^[A-Z]{3}$'),
   constraint refunds_cause_check
-    check (cause in ('cancelled', 'withdrawn', 'run_called_off', 'late_capture', 'surplus', 'order_change'
-       'lapsed', 'problem', 'notice', 'postage', 'price_fell', 'owner')),
+    check (cause in ('cancelled', 'withdrawn', 'run_called_off', 'late_capture', 'surplus', 'order_change',
+      'lapsed', 'problem', 'notice', 'postage', 'price_fell', 'owner')),
   constraint refunds_reason_check check (length(reason) <= 1000),
   constraint refunds_idempotency_key_check check (length(idempotency_key) <= 120),
   constraint refunds_idempotency_key_key unique (idempotency_key),

@@ -31,8 +31,8 @@ create table units (
   constraint units_workshop_id_id_key unique (workshop_id, id),
   constraint units_serial_key unique (workshop_id, serial),
   constraint units_allocated_check
-    check ((state in ('allocated', 'posted')) = (order_line_id is not null) or state in ('returned'
-       'rework', 'scrapped')),
+    check ((state in ('allocated', 'posted')) = (order_line_id is not null) or state in ('returned',
+      'rework', 'scrapped')),
   constraint units_scrapped_check check ((state = 'scrapped') = (scrapped_at is not null))
 );
 create index units_run_id_state_idx on units (workshop_id, run_id, state);

@@ -15,8 +15,8 @@ create table waivers (
   constraint waivers_run_id_fkey foreign key (workshop_id, run_id)
     references runs (workshop_id, id) on delete restrict,
   constraint waivers_key_check
-    check (key in ('first_good_unit', 'lessons', 'quotes', 'samples', 'parts_list', 'post_data', 'promise'
-       'page', 'repay')),
+    check (key in ('first_good_unit', 'lessons', 'quotes', 'samples', 'parts_list', 'post_data', 'promise',
+      'page', 'repay')),
   constraint waivers_reason_check check (length(reason) <= 2000),
   constraint waivers_by_person_id_fkey foreign key (by_person_id) references people (id) on delete restrict,
   constraint waivers_workshop_id_id_key unique (workshop_id, id),
@@ -38,8 +38,8 @@ create table decisions (
   constraint decisions_run_id_fkey foreign key (workshop_id, run_id)
     references runs (workshop_id, id) on delete restrict,
   constraint decisions_kind_check
-    check (kind in ('open_deposits', 'lock', 'call_off', 'lower_minimum', 'move_decide_by'
-       'change_maximum', 'delay_offer', 'close')),
+    check (kind in ('open_deposits', 'lock', 'call_off', 'lower_minimum', 'move_decide_by',
+      'change_maximum', 'delay_offer', 'close')),
   constraint decisions_reason_check check (length(reason) <= 2000),
   constraint decisions_core_version_check check (length(core_version) <= 40),
   constraint decisions_by_person_id_fkey foreign key (by_person_id) references people (id) on delete restrict,
