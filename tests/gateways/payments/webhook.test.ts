@@ -1,3 +1,4 @@
+import { readFileSync } from 'node:fs'
 import fc from 'fast-check'
 import Stripe from 'stripe'
 import { beforeAll, describe, expect, test } from 'vitest'
@@ -6,6 +7,7 @@ import type { ProviderChange } from '@/lib/gateways/payments/changes'
 import { disputePayment } from '@/lib/gateways/payments/fake/controls'
 import { deliverDueEvents } from '@/lib/gateways/payments/fake/deliver'
 import { readEvent } from '@/lib/gateways/payments/read-event'
+import { WEBHOOK_EVENTS } from '@/lib/gateways/payments/webhook-events'
 import { newBuyer, openAccount, paidDeposit, reasonOf, valueOf } from './support'
 
 const SECRET = 'whsec_one'
@@ -134,6 +136,12 @@ describe('what an event says', () => {
       { state: 'needs_response', amount: 2500 },
     ])
     expect(only('account_changed')).toMatchObject([{ account, chargesEnabled: true }])
+  })
+
+  test('the endpoint is subscribed to exactly what is read', () => {
+    const source = readFileSync('lib/gateways/payments/read-event.ts', 'utf8')
+    const read = [...source.matchAll(/case '([a-z_.]+)':/g)].map(([, type]) => type)
+    expect([...WEBHOOK_EVENTS].sort()).toEqual(read.sort())
   })
 
   test('what we do not act on is ignored, not refused', () => {

@@ -2,12 +2,14 @@ import 'server-only'
 import Stripe from 'stripe'
 import { type Books, nextNumber } from '@/lib/gateways/payments/fake/books'
 import { chance, idFor, isFault } from '@/lib/gateways/payments/fake/chance'
+import { WEBHOOK_EVENTS } from '@/lib/gateways/payments/webhook-events'
 
 /**
  * Writes an event into the books, in the same transaction as its cause. Under faults some are lost, some arrive
  * twice and some late, so that later ones overtake them; which, is decided by the seed.
  */
 export async function emit(books: Books, type: Stripe.Event.Type, object: object): Promise<void> {
+  if (!WEBHOOK_EVENTS.includes(type)) return
   const n = await nextNumber(books)
   const event = {
     id: idFor('evt_', n),
