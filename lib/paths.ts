@@ -69,7 +69,6 @@ export const paths = {
     signInCallback: '/api/auth/callback/email',
     signOut: '/api/signout',
     secondFactor: '/api/account/second-factor',
-    secondFactorCode: '/api/account/second-factor/code',
     module: (workshop: string, module: string) => `/api/w/${part(workshop)}/${part(module)}`,
     signUps: '/api/signups',
     signUpConfirm: '/api/signups/confirm',

@@ -4,6 +4,7 @@ import type { z } from 'zod'
 import { fieldsToBody } from '@/lib/contracts/form-fields'
 import type { Problem } from '@/lib/contracts/problem'
 import { ui } from '@/lib/messages/ui'
+import { paths } from '@/lib/paths'
 import { FORM_CONTRACTS, type FormName } from './form-contracts'
 import { showFieldErrors } from './show-field-errors'
 
@@ -79,6 +80,7 @@ async function send(form: HTMLFormElement, button: HTMLElement | null, refuse: (
       return
     }
     const problem = (await answer.json()) as Problem
+    if (problem.reason === 'second_factor') return location.assign(paths.secondFactor(location.pathname))
     const errors =
       problem.errors && Object.keys(problem.errors).length > 0 ? problem.errors : { '': problem.title }
     refuse(errors)

@@ -5,6 +5,7 @@ export const FORM_CONTRACTS = {
   signIn: async () => (await import('@/lib/contracts/sign-in')).SignInInput,
   signInCode: async () => (await import('@/lib/contracts/sign-in')).SignInCodeInput,
   workshop: async () => (await import('@/lib/contracts/workshops')).WorkshopInput,
+  secondFactor: async () => (await import('@/lib/contracts/sign-in')).SecondFactorInput,
   signUp: async () => (await import('@/lib/contracts/signups')).SignUpInput,
   run: async () => (await import('@/lib/contracts/runs')).RunInput,
   address: async () => (await import('@/lib/contracts/address')).AddressInput,

@@ -19,3 +19,17 @@ export const SignInCodeInput = z.object({
 })
 
 export const SignInLinkInput = z.object({ token })
+
+/** Six digits of an authenticator, or ten characters of a recovery code. */
+export const SecondFactorInput = z.object({
+  code: z
+    .string({ error: 'Enter the code.' })
+    .transform((typed) => typed.replaceAll(/[\s-]/g, ''))
+    .pipe(
+      z
+        .string()
+        .regex(/^(\d{6}|[0-9a-fA-F]{10})$/, 'Enter six digits, or a recovery code of ten characters.'),
+    ),
+  next: ownPath,
+})
+export type SecondFactorInput = z.infer<typeof SecondFactorInput>

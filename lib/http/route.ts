@@ -121,7 +121,7 @@ async function answerOf<P, Q, B>(
   const back = (reason: string, errors: Record<string, string> = {}) =>
     refused(spec, request, params?.data ?? (rawParams as P), carried, reason, errors)
 
-  if (spec.deed && needsSecondFactor(spec.deed) && !secondFactorFresh(actor, now)) {
+  if (spec.deed && needsSecondFactor(spec.deed) && !secondFactorFresh(actor, new Date())) {
     if (wantsPage(request, carried)) return seeOther(paths.secondFactor(refererPath(request)))
     return problem('second_factor')
   }

@@ -1,10 +1,11 @@
+import { breakEven } from '@/lib/core/costs/break-even'
 import { FillGauge } from '@/components/charts/fill-gauge'
 import { FrontPanelDrawing } from '@/components/charts/front-panel-drawing'
 import { RunLine } from '@/components/charts/run-line'
 import { StepChart } from '@/components/charts/step-chart'
 import { Columns } from '@/components/ui/columns'
 import { Sheet } from '@/components/ui/sheet'
-import { controls, profits, steps } from './examples'
+import { controls, curve, steps } from './examples'
 
 const open = { minimum: 60, maximum: 100, daysLeft: 17, decideBy: '2027-05-18' }
 
@@ -70,28 +71,21 @@ export function Drawings() {
       <Sheet id="step-chart" title="Step chart">
         <div className="flex flex-col gap-8">
           <StepChart
-            profits={profits(100)}
+            profits={curve(100).map(({ profit }) => profit)}
             currency="EUR"
             minimum={60}
             maximum={100}
             deposited={41}
             forecast={{ mean: 66, low: 57, high: 76 }}
-            breakEven={{
-              firstProfit: 46,
-              safeFrom: 55,
-              lossGaps: [
-                [1, 45],
-                [51, 54],
-              ],
-            }}
+            breakEven={breakEven(curve(100))}
           />
           <StepChart
-            profits={profits(30)}
+            profits={curve(30).map(({ profit }) => profit)}
             currency="GBP"
             minimum={25}
             maximum={30}
             deposited={12}
-            breakEven={{ firstProfit: null, safeFrom: null, lossGaps: [[1, 30]] }}
+            breakEven={breakEven(curve(30))}
           />
           <StepChart
             profits={[]}
@@ -99,7 +93,7 @@ export function Drawings() {
             minimum={25}
             maximum={30}
             deposited={12}
-            breakEven={{ firstProfit: null, safeFrom: null, lossGaps: [] }}
+            breakEven={breakEven([])}
           />
         </div>
       </Sheet>

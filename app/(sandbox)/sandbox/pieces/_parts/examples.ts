@@ -1,3 +1,5 @@
+import { minor } from '@/lib/core/brand'
+import type { Curve } from '@/lib/core/costs/curve'
 import type { FrontPanelControl } from '@/components/charts/front-panel-drawing'
 import type { RunStep } from '@/components/charts/run-line'
 
@@ -32,9 +34,16 @@ export const steps: RunStep[] = [
   { key: 'packing', name: 'Packing', from: '2027-08-11', to: '2027-08-20', state: 'to_come' },
 ]
 
-/** A made-up cost with a set-up and two jumps, so that the steps can be seen. */
-export const profits = (upTo: number): number[] =>
+/** A made-up cost with a set-up and a jump, so that the steps can be seen. */
+export const curve = (upTo: number): Curve =>
   Array.from({ length: upTo }, (_, index) => {
     const units = index + 1
-    return units * 9_500 - 380_000 - (units > 50 ? 120_000 : 0) - Math.ceil(units / 10) * 9_000
+    const revenue = units * 9_500
+    const cost = 380_000 + (units > 50 ? 120_000 : 0) + Math.ceil(units / 10) * 9_000
+    return {
+      revenue: minor(revenue),
+      cost: minor(cost),
+      profit: minor(revenue - cost),
+      unitCost: minor(Math.round(cost / units)),
+    }
   })
