@@ -9,7 +9,8 @@ const shared = {
 
 /**
  * unit: pure code and the architecture, no database. db: services, queries and HTTP handlers against a
- * real PostgreSQL (a clone of a template per worker). ui: components in jsdom.
+ * real PostgreSQL (a clone of a migrated template per file). ui: components in jsdom. faults: whole processes
+ * killed and started again, one file at a time.
  */
 export default defineConfig({
   test: {
@@ -34,6 +35,19 @@ export default defineConfig({
           testTimeout: 20_000,
           hookTimeout: 60_000,
           maxWorkers: 2,
+        },
+      },
+      {
+        ...shared,
+        test: {
+          name: 'faults',
+          include: ['tests/faults/**/*.test.ts'],
+          environment: 'node',
+          setupFiles: ['tests/support/db-setup.ts'],
+          globalSetup: ['tests/support/db-global.ts'],
+          testTimeout: 120_000,
+          hookTimeout: 120_000,
+          maxWorkers: 1,
         },
       },
       {

@@ -1,5 +1,14 @@
 import { randomBytes } from 'node:crypto'
-import { appendFileSync, chownSync, existsSync, mkdirSync, readFileSync, readlinkSync, rmSync, writeFileSync } from 'node:fs'
+import {
+  appendFileSync,
+  chownSync,
+  existsSync,
+  mkdirSync,
+  readFileSync,
+  readlinkSync,
+  rmSync,
+  writeFileSync,
+} from 'node:fs'
 import { join } from 'node:path'
 import { pathToFileURL } from 'node:url'
 import { withLock } from './support/lock.mjs'
@@ -55,7 +64,8 @@ export function databaseUrl(dataFolder, database = USER) {
 export async function ensureDatabase(serverUrl, name = USER) {
   const url = new URL(serverUrl)
   url.pathname = `/${name}`
-  const isThere = async () => (await psql(serverUrl, `select 1 from pg_database where datname = '${name}'`)) === '1'
+  const isThere = async () =>
+    (await psql(serverUrl, `select 1 from pg_database where datname = '${name}'`)) === '1'
   if (await isThere()) return url.href
   await psql(serverUrl, `create database "${name}"`).catch(async (error) => {
     // Another start was quicker; anything else is a failure.
@@ -75,7 +85,15 @@ export async function removeDatabase(dataFolder) {
 /** One statement through PostgreSQL's own client, for the moments before node_modules exist. */
 export async function psql(url, statement) {
   const bin = await ensureBinaries()
-  const { output } = await run(join(bin, 'psql'), ['-XAtq', '-v', 'ON_ERROR_STOP=1', '-d', url, '-c', statement])
+  const { output } = await run(join(bin, 'psql'), [
+    '-XAtq',
+    '-v',
+    'ON_ERROR_STOP=1',
+    '-d',
+    url,
+    '-c',
+    statement,
+  ])
   return output.trim()
 }
 
@@ -85,12 +103,16 @@ async function initialise(place, bin, throwAway) {
   mkdirSync(cluster(place), { mode: 0o700 })
   const password = join(place, 'password')
   writeFileSync(password, randomBytes(24).toString('hex'), { mode: 0o600 })
-  if (account.uid !== undefined) for (const path of [cluster(place), password]) chownSync(path, account.uid, account.gid)
+  if (account.uid !== undefined)
+    for (const path of [cluster(place), password]) chownSync(path, account.uid, account.gid)
   const options = ['-D', cluster(place), '-U', USER, '-A', 'scram-sha-256', `--pwfile=${password}`]
   options.push('-E', 'UTF8', '--locale=C.UTF-8', ...(throwAway ? ['--no-sync'] : []))
   await run(join(bin, 'initdb'), options, asServer())
   const settings = Object.entries({ ...SETTINGS, ...(throwAway ? THROW_AWAY : {}) })
-  appendFileSync(join(cluster(place), 'postgresql.conf'), settings.map(([key, value]) => `${key} = ${value}\n`).join(''))
+  appendFileSync(
+    join(cluster(place), 'postgresql.conf'),
+    settings.map(([key, value]) => `${key} = ${value}\n`).join(''),
+  )
   // Written last: without it a killed initdb is begun again.
   writeFileSync(join(place, 'ready'), 'ready\n')
 }
@@ -105,7 +127,11 @@ async function launch(place, bin, wanted) {
     rmSync(join(cluster(place), 'postmaster.pid'), { force: true })
     const args = ['start', '-D', cluster(place), '-l', log, '-w', '-t', '60', '-o', `-p ${port}`]
     // A pipe would be inherited by the server and never close.
-    const result = await run(join(bin, 'pg_ctl'), args, { ...asServer(), stdio: 'ignore', allowFailure: true })
+    const result = await run(join(bin, 'pg_ctl'), args, {
+      ...asServer(),
+      stdio: 'ignore',
+      allowFailure: true,
+    })
     if (result.code === 0) {
       writeFileSync(remembered, String(port))
       return port
@@ -144,7 +170,11 @@ function urlOf(place, port, database = 'postgres') {
 }
 
 const cluster = (place) => join(place, 'cluster')
-const asServer = () => ({ ...serverAccount(), cwd: '/', env: { ...process.env, LC_ALL: 'C.UTF-8', PGTZ: 'UTC' } })
+const asServer = () => ({
+  ...serverAccount(),
+  cwd: '/',
+  env: { ...process.env, LC_ALL: 'C.UTF-8', PGTZ: 'UTC' },
+})
 
 if (import.meta.url === pathToFileURL(process.argv[1] ?? '').href) {
   main(async () => {

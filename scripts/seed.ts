@@ -8,9 +8,12 @@ import { DEMO_SIGN_INS, seedDemo } from '@/seeders/demo'
 const marker = process.argv[2]
 
 async function isEmpty() {
-  const [row] = await sequelize.query<{ found: boolean }>('select exists (select 1 from workshops) as found', {
-    type: QueryTypes.SELECT,
-  })
+  const [row] = await sequelize.query<{ found: boolean }>(
+    'select exists (select 1 from workshops) as found',
+    {
+      type: QueryTypes.SELECT,
+    },
+  )
   return !row?.found
 }
 

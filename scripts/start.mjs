@@ -38,7 +38,8 @@ async function start(dataFolder, running) {
   await ensureModules()
   const databaseUrl = await database(dataFolder)
   const env = await childSettings(process.env, { dataFolder, databaseUrl, isDev })
-  if (wantsSandbox(process.env)) say('No payment key and no mail server given: the sandbox plays both. Nothing is charged or sent.')
+  if (wantsSandbox(process.env))
+    say('No payment key and no mail server given: the sandbox plays both. Nothing is charged or sent.')
   await checkSettings(env)
   await Promise.all([prepareData(env, dataFolder), isDev ? undefined : ensureBuild()])
   say('Starting web, worker and what they need …')
@@ -51,13 +52,17 @@ async function start(dataFolder, running) {
   process.on('SIGINT', () => isEnding && parts.kill())
   writeFileSync(running, env.BASE_URL)
   await seed(env, dataFolder)
-  say(`\nBrimline is at ${env.BASE_URL} (ready in ${Math.round((performance.now() - began) / 1000)} s). Ctrl-C stops it.`)
+  say(
+    `\nBrimline is at ${env.BASE_URL} (ready in ${Math.round((performance.now() - began) / 1000)} s). Ctrl-C stops it.`,
+  )
 }
 
 /** A given server is used as it is; otherwise the project's own is started, and stopped with us. */
 async function database(dataFolder) {
   if (process.env.DATABASE_URL) return process.env.DATABASE_URL
-  const { url, port } = await startDatabase(dataFolder, { port: Number(process.env.POSTGRES_PORT) || undefined })
+  const { url, port } = await startDatabase(dataFolder, {
+    port: Number(process.env.POSTGRES_PORT) || undefined,
+  })
   stopEverything = () => stopDatabase(dataFolder)
   if (existsSync(join(dataFolder, 'seeding'))) {
     say('The last start was cut short while it made the demo; beginning that again.')

@@ -1,7 +1,7 @@
 import { checkEnv, env } from '@/lib/config/env'
 import { log } from '@/lib/config/log'
 import { sequelize } from '@/lib/db/sequelize'
-import { startWorker } from '@/lib/jobs/start-worker'
+import { startWorker } from './support/start-worker'
 import { TASKS } from '@/lib/tasks'
 
 // Does the queued work. Run as many as you like beside each other.

@@ -3,8 +3,16 @@ import { z } from 'zod'
 const list = z
   .string()
   .default('')
-  .transform((text) => text.split(',').map((entry) => entry.trim()).filter(Boolean))
-const flag = z.enum(['0', '1']).default('0').transform((text) => text === '1')
+  .transform((text) =>
+    text
+      .split(',')
+      .map((entry) => entry.trim())
+      .filter(Boolean),
+  )
+const flag = z
+  .enum(['0', '1'])
+  .default('0')
+  .transform((text) => text === '1')
 const count = (fallback: number) => z.coerce.number().int().positive().default(fallback)
 
 const isLoopback = (host: string) => ['localhost', '127.0.0.1', '[::1]'].includes(host)
@@ -48,9 +56,11 @@ const Settings = z
     const say = (path: string, message: string) => context.addIssue({ code: 'custom', path: [path], message })
     const key = settings.STRIPE_SECRET_KEY
     if (!settings.SANDBOX && !key) say('STRIPE_SECRET_KEY', 'is missing while the sandbox is off')
-    if (settings.SANDBOX && key?.startsWith('sk_live_')) say('SANDBOX', 'cannot be on together with a live key')
+    if (settings.SANDBOX && key?.startsWith('sk_live_'))
+      say('SANDBOX', 'cannot be on together with a live key')
     if (settings.STRIPE_WEBHOOK_SECRETS.length === 0) say('STRIPE_WEBHOOK_SECRETS', 'is missing')
-    if (settings.SANDBOX && !settings.CARD_PAGE_URL) say('CARD_PAGE_URL', 'is missing while the sandbox is on')
+    if (settings.SANDBOX && !settings.CARD_PAGE_URL)
+      say('CARD_PAGE_URL', 'is missing while the sandbox is on')
     if (!URL.canParse(settings.BASE_URL ?? 'http://localhost')) return
     const base = new URL(settings.BASE_URL ?? 'http://localhost')
     const isSafe = base.protocol === 'https:' || (base.protocol === 'http:' && isLoopback(base.hostname))

@@ -2,7 +2,21 @@ import { pino } from 'pino'
 import { env } from '@/lib/config/env'
 
 /** Names under which personal data, secrets and card data travel; they never reach a log line. */
-const SECRET = ['email', 'to', 'address', 'name', 'phone', 'token', 'password', 'secret', 'cookie', 'authorization', 'html', 'text', 'props']
+const SECRET = [
+  'email',
+  'to',
+  'address',
+  'name',
+  'phone',
+  'token',
+  'password',
+  'secret',
+  'cookie',
+  'authorization',
+  'html',
+  'text',
+  'props',
+]
 
 /** Writes one line of JSON per event: ids and counts, never people. */
 export function log() {

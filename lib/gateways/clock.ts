@@ -17,7 +17,8 @@ async function now(): Promise<Date> {
 /** Moves business time forward by whole or part hours; sandbox only. Gives back the new time. */
 async function advance(hours: number): Promise<Date> {
   if (!env().SANDBOX) throw new Error('The clock moves by hand in the sandbox only.')
-  if (!(hours > 0 && Number.isFinite(hours))) throw new RangeError(`advance: hours must be above 0, got ${hours}`)
+  if (!(hours > 0 && Number.isFinite(hours)))
+    throw new RangeError(`advance: hours must be above 0, got ${hours}`)
   await sequelize.query('update clock_offset set offset_ms = offset_ms + :ms', {
     replacements: { ms: Math.round(hours * 3_600_000) },
   })

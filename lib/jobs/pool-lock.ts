@@ -63,7 +63,8 @@ export class PoolLock {
     const unheld = new Set(rows.map((row) => row.id))
     const dead = [...unheld].filter((id) => this.suspects.has(id))
     this.suspects = unheld
-    if (dead.length > 0) await this.pool.query('select graphile_worker.force_unlock_workers($1::text[])', [dead])
+    if (dead.length > 0)
+      await this.pool.query('select graphile_worker.force_unlock_workers($1::text[])', [dead])
     return dead
   }
 }

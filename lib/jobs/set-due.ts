@@ -20,8 +20,11 @@ export async function setDue(
 
 /** Takes it off again: what was to happen no longer can. Nothing there is fine. */
 export async function dropDue(tx: Transaction, kind: DueKind, subjectId: string): Promise<void> {
-  await sequelize.query('delete from due_items where kind = :kind and subject_id = :subjectId and done_at is null', {
-    replacements: { kind, subjectId },
-    transaction: tx,
-  })
+  await sequelize.query(
+    'delete from due_items where kind = :kind and subject_id = :subjectId and done_at is null',
+    {
+      replacements: { kind, subjectId },
+      transaction: tx,
+    },
+  )
 }

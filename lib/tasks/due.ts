@@ -28,5 +28,6 @@ export const due: Task<'due'> = async () => {
       }
     }
   }
-  if (failed.size > 0) throw new Error(`${failed.size} due items failed: ${[...failed].slice(0, 5).join(', ')}`)
+  if (failed.size > 0)
+    throw new Error(`${failed.size} due items failed: ${[...failed].slice(0, 5).join(', ')}`)
 }

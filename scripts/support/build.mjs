@@ -4,8 +4,25 @@ import { join } from 'node:path'
 import { withLock } from './lock.mjs'
 import { run, say } from './shell.mjs'
 
-const SOURCES = ['app', 'components', 'emails', 'fonts', 'lib', 'models', 'public', 'package-lock.json', 'tsconfig.json']
-const FRAMEWORK = ['next.config.mjs', 'cache-handler.mjs', 'proxy.ts', 'instrumentation.ts', 'tailwind.config.ts', 'postcss.config.mjs']
+const SOURCES = [
+  'app',
+  'components',
+  'emails',
+  'fonts',
+  'lib',
+  'models',
+  'public',
+  'package-lock.json',
+  'tsconfig.json',
+]
+const FRAMEWORK = [
+  'next.config.mjs',
+  'cache-handler.mjs',
+  'proxy.ts',
+  'instrumentation.ts',
+  'tailwind.config.ts',
+  'postcss.config.mjs',
+]
 const MARKER = join('.next', 'built-from')
 
 /** Builds the application when its sources differ from those of the last whole build. */
@@ -25,12 +42,15 @@ const isCurrent = (sources) => existsSync(MARKER) && readFileSync(MARKER, 'utf8'
 
 function hashOfSources() {
   const hash = createHash('sha256')
-  for (const file of [...SOURCES, ...FRAMEWORK].flatMap(filesUnder)) hash.update(file).update('\0').update(readFileSync(file))
+  for (const file of [...SOURCES, ...FRAMEWORK].flatMap(filesUnder))
+    hash.update(file).update('\0').update(readFileSync(file))
   return hash.digest('hex')
 }
 
 function filesUnder(path) {
   if (!existsSync(path)) return []
   if (!statSync(path).isDirectory()) return [path]
-  return readdirSync(path).sort().flatMap((name) => filesUnder(join(path, name)))
+  return readdirSync(path)
+    .sort()
+    .flatMap((name) => filesUnder(join(path, name)))
 }

@@ -90,7 +90,9 @@ export function keepRunning({ name, script, args = [], env, logFolder, watch = f
 
 function flags(watch) {
   const parent = ['--import', fromHere('end-with-parent.mjs')]
-  return watch ? [...parent, fromHere('../../node_modules/tsx/dist/cli.mjs'), 'watch'] : [...parent, '--import', 'tsx']
+  return watch
+    ? [...parent, fromHere('../../node_modules/tsx/dist/cli.mjs'), 'watch']
+    : [...parent, '--import', 'tsx']
 }
 
 function openLog(folder, name) {

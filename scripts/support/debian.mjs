@@ -14,7 +14,9 @@ export async function installPackages(packages, reason) {
     const first = sparesCluster
       ? `mkdir -p /etc/postgresql-common && echo create_main_cluster = false >> ${CLUSTER_SETTINGS} && `
       : ''
-    throw new Stop(`${reason} Please run this once, then start again:\n  sudo sh -c '${first}apt-get update && ${command}'`)
+    throw new Stop(
+      `${reason} Please run this once, then start again:\n  sudo sh -c '${first}apt-get update && ${command}'`,
+    )
   }
   say(`${reason} Installing ${packages.join(', ')} from Debian's packages …`)
   if (sparesCluster) refuseSystemCluster()
@@ -30,5 +32,8 @@ function refuseSystemCluster() {
   const before = existsSync(CLUSTER_SETTINGS) ? readFileSync(CLUSTER_SETTINGS, 'utf8') : ''
   if (/^\s*create_main_cluster\s*=\s*false/m.test(before)) return
   const kept = before.replace(/^\s*create_main_cluster\s*=.*$/gm, '')
-  writeFileSync(CLUSTER_SETTINGS, `${kept}${kept && !kept.endsWith('\n') ? '\n' : ''}create_main_cluster = false\n`)
+  writeFileSync(
+    CLUSTER_SETTINGS,
+    `${kept}${kept && !kept.endsWith('\n') ? '\n' : ''}create_main_cluster = false\n`,
+  )
 }

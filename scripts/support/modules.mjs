@@ -8,7 +8,8 @@ const INSTALLED = join('node_modules', '.package-lock.json')
 /** Installs the packages of the lock file when node_modules are missing or hold others. */
 export async function ensureModules() {
   const [major, minor] = process.versions.node.split('.').map(Number)
-  if (major < 20 || (major === 20 && minor < 12)) throw new Stop(`Node 20.12 or newer is needed; this is ${process.version}.`)
+  if (major < 20 || (major === 20 && minor < 12))
+    throw new Stop(`Node 20.12 or newer is needed; this is ${process.version}.`)
   if (matchesLock()) return
   await withLock(join('.data', 'modules.lock'), async () => {
     if (matchesLock()) return

@@ -10,11 +10,14 @@ const NEEDED = ['initdb', 'pg_ctl', 'postgres', 'psql']
 
 /** The folder with PostgreSQL's programs: of `version` when a cluster already has one, else the newest. */
 export function findBinaries(version) {
-  const versions = existsSync(DEBIAN_ROOT) ? readdirSync(DEBIAN_ROOT).filter((name) => /^\d+$/.test(name)) : []
+  const versions = existsSync(DEBIAN_ROOT)
+    ? readdirSync(DEBIAN_ROOT).filter((name) => /^\d+$/.test(name))
+    : []
   const debian = versions.sort((a, b) => b - a).map((name) => join(DEBIAN_ROOT, name, 'bin'))
   const elsewhere = (process.env.PATH ?? '').split(delimiter)
   return [...debian, ...elsewhere].find(
-    (folder) => NEEDED.every((name) => existsSync(join(folder, name))) && (!version || versionOf(folder) === version),
+    (folder) =>
+      NEEDED.every((name) => existsSync(join(folder, name))) && (!version || versionOf(folder) === version),
   )
 }
 
@@ -22,16 +25,22 @@ export function findBinaries(version) {
 export async function ensureBinaries(version) {
   const found = findBinaries(version)
   if (found) return found
-  await installPackages(['postgresql'], version ? `PostgreSQL ${version} is missing.` : 'PostgreSQL is missing.')
+  await installPackages(
+    ['postgresql'],
+    version ? `PostgreSQL ${version} is missing.` : 'PostgreSQL is missing.',
+  )
   const installed = findBinaries(version)
-  if (!installed) throw new Stop(`The cluster was made by PostgreSQL ${version}, and Debian's package is another version.`)
+  if (!installed)
+    throw new Stop(`The cluster was made by PostgreSQL ${version}, and Debian's package is another version.`)
   return installed
 }
 
 /** Who the server runs as: it refuses root, so root hands it to the account of Debian's package. */
 export function serverAccount() {
   if (!isRoot()) return {}
-  const line = readFileSync('/etc/passwd', 'utf8').split('\n').find((entry) => entry.startsWith('postgres:'))
+  const line = readFileSync('/etc/passwd', 'utf8')
+    .split('\n')
+    .find((entry) => entry.startsWith('postgres:'))
   if (!line) throw new Stop('PostgreSQL refuses to run as root and there is no account named postgres.')
   const [, , uid, gid] = line.split(':')
   return { uid: Number(uid), gid: Number(gid) }

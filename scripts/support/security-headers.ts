@@ -18,9 +18,9 @@ const KEPT_ELSEWHERE = /^s-maxage=/
 export function setSecurityHeaders(request: IncomingMessage, response: ServerResponse): void {
   for (const [name, value] of Object.entries(ALWAYS)) response.setHeader(name, value)
   if (env().IS_HTTPS) response.setHeader('Strict-Transport-Security', 'max-age=63072000; includeSubDomains')
-  // A link from a mail carries a token in its address: it must not travel on.
+  // A link from a mail carries a token in its address: it must not leave us (but `no-referrer` would blank Origin too).
   if (/^\/(confirm|take-back|unsubscribe|invitation|signin)\b/.test(request.url ?? '')) {
-    response.setHeader('Referrer-Policy', 'no-referrer')
+    response.setHeader('Referrer-Policy', 'same-origin')
   }
   const writeHead = response.writeHead.bind(response) as (...parts: unknown[]) => ServerResponse
   response.writeHead = ((...parts: unknown[]) => {

@@ -52,7 +52,8 @@ async function webPort(given) {
   const wanted = Number(given.PORT) || DEFAULT_PORT
   const found = await freePort(wanted)
   if (found === wanted) return wanted
-  if (given.PORT) throw new Stop(`PORT ${wanted} is taken by another program. Give another one: PORT=3100 npm start`)
+  if (given.PORT)
+    throw new Stop(`PORT ${wanted} is taken by another program. Give another one: PORT=3100 npm start`)
   say(`Port ${wanted} is taken by another program; using ${found}.`)
   return found
 }
@@ -61,7 +62,10 @@ function keptSecrets(dataFolder) {
   const file = join(dataFolder, 'secrets.json')
   if (!existsSync(file)) {
     mkdirSync(dataFolder, { recursive: true })
-    const made = { auth: randomBytes(32).toString('hex'), webhook: `whsec_${randomBytes(24).toString('hex')}` }
+    const made = {
+      auth: randomBytes(32).toString('hex'),
+      webhook: `whsec_${randomBytes(24).toString('hex')}`,
+    }
     writeFileSync(file, JSON.stringify(made), { mode: 0o600 })
   }
   return JSON.parse(readFileSync(file, 'utf8'))

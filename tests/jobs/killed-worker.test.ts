@@ -28,7 +28,12 @@ const addJob = (path: string, queue: string | null) =>
   ])
 
 const begun = async (path: string) =>
-  (await client.query<{ pid: number; attempt: number }>('select pid, attempt from begun where path = $1 order by attempt', [path])).rows
+  (
+    await client.query<{ pid: number; attempt: number }>(
+      'select pid, attempt from begun where path = $1 order by attempt',
+      [path],
+    )
+  ).rows
 
 beforeAll(async () => {
   await client.connect()
@@ -61,7 +66,15 @@ describe('with two workers running', () => {
     const [, second] = await begun(path)
     expect(second?.pid).not.toBe(first?.pid)
     await expect
-      .poll(async () => (await client.query('select 1 from graphile_worker.jobs where task_identifier = $1 and locked_at is null', ['evict_pages'])).rowCount)
+      .poll(
+        async () =>
+          (
+            await client.query(
+              'select 1 from graphile_worker.jobs where task_identifier = $1 and locked_at is null',
+              ['evict_pages'],
+            )
+          ).rowCount,
+      )
       .toBe(0)
     await startOne()
   })
@@ -73,7 +86,11 @@ test('the jobs of a living worker stay its own', async () => {
   const pool = new Pool({ connectionString: databaseUrl })
   const onlooker = await PoolLock.open(databaseUrl, pool, fail)
 
-  const looks = [await onlooker.freeDeadPools(), await onlooker.freeDeadPools(), await onlooker.freeDeadPools()]
+  const looks = [
+    await onlooker.freeDeadPools(),
+    await onlooker.freeDeadPools(),
+    await onlooker.freeDeadPools(),
+  ]
 
   expect(looks).toEqual([[], [], []])
   expect(await begun('long')).toHaveLength(1)

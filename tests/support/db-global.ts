@@ -1,8 +1,5 @@
-import { spawnSync } from 'node:child_process'
-import { existsSync, readdirSync } from 'node:fs'
-import { join } from 'node:path'
 import type { TestProject } from 'vitest/node'
-import { ensureDatabase, psql, removeDatabase, startDatabase } from '../../scripts/database.mjs'
+import { openTestServer } from './test-server'
 
 declare module 'vitest' {
   interface ProvidedContext {
@@ -11,42 +8,10 @@ declare module 'vitest' {
   }
 }
 
-const ROOT = '.data/test'
-
 /** One server for the run and one migrated template in it; each test file gets a clone (db-setup.ts). */
 export default async function setUp(project: TestProject) {
-  const given = process.env.TEST_DATABASE_URL
-  await sweep()
-  const folder = join(ROOT, String(process.pid))
-  const serverUrl = given ?? (await startDatabase(folder, { throwAway: true })).url
-  const template = `template_${process.pid}`
-  const tearDown = async () => {
-    if (!given) return removeDatabase(folder)
-    await psql(serverUrl, `alter database "${template}" with is_template false`)
-    await psql(serverUrl, `drop database "${template}" with (force)`)
-  }
-  try {
-    migrate(await ensureDatabase(serverUrl, template))
-  } catch (error) {
-    await tearDown()
-    throw error
-  }
-  await psql(serverUrl, `alter database "${template}" with is_template true allow_connections false`)
+  const { serverUrl, template, remove } = await openTestServer()
   project.provide('serverUrl', serverUrl)
   project.provide('template', template)
-  return tearDown
-}
-
-function migrate(url: string) {
-  const env = { ...process.env, DATABASE_URL: url, NODE_ENV: 'test' as const }
-  const result = spawnSync(process.execPath, ['scripts/run.mjs', 'scripts/migrate.ts'], { env, encoding: 'utf8' })
-  if (result.status !== 0) throw new Error(`The template did not migrate:\n${result.stdout}${result.stderr}`)
-}
-
-/** Clusters of runs that were killed. */
-async function sweep() {
-  if (!existsSync(ROOT)) return
-  for (const name of readdirSync(ROOT)) {
-    if (/^\d+$/.test(name) && !existsSync(`/proc/${name}`)) await removeDatabase(join(ROOT, name))
-  }
+  return remove
 }

@@ -7,7 +7,9 @@ const complaints: string[] = []
 // A console error is a defect the assertions did not look for.
 beforeEach(() => {
   complaints.length = 0
-  vi.spyOn(console, 'error').mockImplementation((...parts: unknown[]) => void complaints.push(parts.map(String).join(' ')))
+  vi.spyOn(console, 'error').mockImplementation(
+    (...parts: unknown[]) => void complaints.push(parts.map(String).join(' ')),
+  )
 })
 
 afterEach(() => {

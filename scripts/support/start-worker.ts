@@ -1,11 +1,10 @@
-import 'server-only'
 import { Logger, parseCronItems, run, type TaskList, type WorkerEvents } from 'graphile-worker'
 import { EventEmitter } from 'node:events'
 import { Pool } from 'pg'
 import { log } from '@/lib/config/log'
-import { JOBS, type JobName, type JobPayload } from './names'
-import { PoolLock } from './pool-lock'
-import type { Task, Tasks } from './task'
+import { JOBS, type JobName, type JobPayload } from '@/lib/jobs/names'
+import { PoolLock } from '@/lib/jobs/pool-lock'
+import type { Task, Tasks } from '@/lib/jobs/task'
 
 type Options = { databaseUrl: string; tasks: Tasks; concurrency?: number; everyMinute?: JobName[] }
 
