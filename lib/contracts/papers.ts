@@ -1,0 +1,63 @@
+import type { OfferKind } from '@/lib/contracts/fields'
+import type { Day } from '@/lib/core/brand'
+
+export type PaperSize = 'A4' | 'Letter'
+
+/** What stands in the title block of every sheet beside "sheet n of m". */
+export type PaperIssue = {
+  workshop: string
+  /** Who had it made. */
+  printedBy: string
+  printedOn: Day
+  size: PaperSize
+}
+
+/** One thing to be put into a parcel, as it was ordered. */
+export type PaperLine = {
+  module: string
+  offer: OfferKind
+  quantity: number
+  /** Answers in words, such as `Front panel finish: sand`. */
+  choices: readonly string[]
+  /** Serial numbers of the very pieces; empty where none are recorded. */
+  serials: readonly string[]
+}
+
+export type FulfilmentOrder = {
+  /** What people quote and scanners read. */
+  number: string
+  name: string
+  /** ISO 3166-1 alpha-2. */
+  country: string
+  postedBy: Day
+  lines: readonly PaperLine[]
+  /** Something to mind, in the workshop's words; null if nothing. */
+  note: string | null
+}
+
+/** Orders in the order of packing: oldest promise first. Orders of the same contents are put together on the paper. */
+export type FulfilmentList = PaperIssue & {
+  /** What the list is of, such as `Fairlead, revision B, run 1`. */
+  title: string
+  orders: readonly FulfilmentOrder[]
+}
+
+export type PackingSlip = {
+  orderNumber: string
+  /** This parcel among those of the order, both from 1. */
+  parcel: { nth: number; of: number }
+  isReplacement: boolean
+  /** Lines of the label in Latin letters, with the country line. */
+  to: readonly string[]
+  /** The same in the buyer's own script; null where it is the same. */
+  toOwnScript: readonly string[] | null
+  lines: readonly PaperLine[]
+  /** Where a problem is reported, to be typed by hand. */
+  problemUrl: string
+}
+
+export type PackingSlips = PaperIssue & {
+  /** Sender and return address. */
+  from: readonly string[]
+  slips: readonly PackingSlip[]
+}

@@ -1,0 +1,40 @@
+import { offerNames } from '@/lib/messages/mails/words'
+import { plural } from '@/lib/messages/plural'
+
+const orders = (count: number) => plural(count, { one: '# order', other: '# orders' })
+const units = (count: number) => plural(count, { one: '# unit', other: '# units' })
+
+/** Every word on the printed papers. */
+export const papers = {
+  offers: offerNames,
+  sheet: (n: number, of: number) => `${n} of ${of}`,
+  block: { what: 'What', workshop: 'Workshop', by: 'Made by', on: 'Made on', sheet: 'Sheet' },
+  unprintable:
+    'Some letters could not be printed as written: accents are left off, or a ? stands for the letter. The screen shows them.',
+  list: {
+    name: 'Fulfilment list',
+    summary: (orderCount: number, unitCount: number) =>
+      `${orders(orderCount)}, ${units(unitCount)}, oldest promise first. Orders of the same contents stand together.`,
+    pick: 'To take from the shelf',
+    continued: (contents: string) => `${contents} (continued)`,
+    same: (count: number) => `The same in ${orders(count)}`,
+    nothing: 'Nothing waits to be packed.',
+    note: 'Mind:',
+  },
+  slip: {
+    name: 'Packing slip',
+    order: (number: string) => `Order ${number}`,
+    parcel: (nth: number, of: number) => (of === 1 ? 'The whole order' : `Parcel ${nth} of ${of}`),
+    replacement: 'Replacement',
+    from: 'From',
+    to: 'To',
+    ownScriptLeftOut:
+      'The address in the buyer’s own script is on the screen; this paper has no letters for it.',
+    columns: { quantity: 'Quantity', thing: 'What' },
+    serials: (list: readonly string[]) =>
+      `${list.length === 1 ? 'Serial number' : 'Serial numbers'} ${list.join(', ')}`,
+    more: 'The rest of the order comes in another parcel.',
+    problem: 'Something missing, damaged or faulty? Tell us here:',
+    noInvoice: 'This is not an invoice.',
+  },
+}
