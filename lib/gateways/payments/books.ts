@@ -49,6 +49,7 @@ function feeLine(booked: Stripe.BalanceTransaction): BookLine | null {
   return line('fee', { ...booked, amount }, paymentOfSource(booked))
 }
 
+/** The lists behind the daily comparison; every page is read through the SDK. */
 export function bookCalls(stripe: Stripe): Part {
   const on = (window: Window) => ({ stripeAccount: window.account })
   return {

@@ -23,6 +23,7 @@ function outcomeOf(payment: PaymentFacts): ChargeOutcome {
   }
 }
 
+/** Charging a saved card, and what becomes of that payment. Differences of the fake: fake/README.md. */
 export function chargeCalls(stripe: Stripe): Part {
   const whole = async (account: string, id: string) =>
     paymentFacts(

@@ -11,6 +11,7 @@ type Part = Pick<Payments, 'ensureCustomer' | 'createCheckout' | 'getCheckout' |
 /** What `checkoutFacts` needs to tell the whole payment. */
 export const WHOLE_SESSION = ['payment_intent.latest_charge.balance_transaction']
 
+/** Customers and hosted card sessions. Differences of the fake: fake/README.md. */
 export function checkoutCalls(stripe: Stripe): Part {
   const whole = async (account: string, sessionId: string) =>
     checkoutFacts(

@@ -4,6 +4,7 @@ import Stripe from 'stripe'
 /** The key that means: no provider, the fake answers. No real key looks like it. */
 export const SANDBOX_KEY = 'sk_test_brimline_sandbox'
 
+/** Whom the SDK talks to. */
 export type ClientSettings = {
   readonly secretKey: string
   /** Another server that speaks the provider's API, such as 'http://127.0.0.1:12111'; only with a test key. */

@@ -21,6 +21,7 @@ function evidenceParams(evidence: DisputeEvidence): Stripe.DisputeUpdateParams.E
   return Object.fromEntries(Object.entries(params).filter(([, text]) => text !== undefined))
 }
 
+/** Reading a dispute and answering it with evidence. */
 export function disputeCalls(stripe: Stripe): Part {
   return {
     getDispute: ({ account, dispute }) =>

@@ -17,7 +17,9 @@ export function idOf(ref: string | { id: string } | null | undefined): string | 
   return typeof ref === 'string' ? ref : ref.id
 }
 
+/** Whole seconds as the provider counts time, rounded down. */
 export const seconds = (at: Date): number => Math.floor(at.getTime() / 1000)
+/** The instant of the provider’s seconds. */
 export const fromSeconds = (at: number): Date => new Date(at * 1000)
 
 /** Whose payment it is, from the metadata we put there; null for one that did not come from us. */
@@ -111,6 +113,7 @@ const REFUND_STATES: Readonly<Record<string, RefundFacts['state']>> = {
   canceled: 'failed',
 }
 
+/** A refund as the provider has it now. */
 export function refundFacts(refund: Stripe.Refund): RefundFacts {
   const currency = refund.currency.toUpperCase()
   return {
@@ -136,6 +139,7 @@ const DISPUTE_STATES: Readonly<Record<string, DisputeFacts['state']>> = {
   prevented: 'closed',
 }
 
+/** A dispute as the provider has it now; its dozen states in five of ours. */
 export function disputeFacts(dispute: Stripe.Dispute): DisputeFacts {
   const currency = dispute.currency.toUpperCase()
   const dueBy = dispute.evidence_details.due_by

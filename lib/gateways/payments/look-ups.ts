@@ -13,6 +13,7 @@ const inList = (paths: readonly string[]): string[] => paths.map((path) => `data
 /** The provider expands four levels at most, counting `data`. */
 const SESSIONS = inList(['payment_intent.latest_charge'])
 
+/** The look-ups that end an unknown outcome; they only read, so they may be repeated at will. */
 export function lookUpCalls(stripe: Stripe): Part {
   async function sessionOf(account: string, customer: string, attemptId: string) {
     const sessions = stripe.checkout.sessions.list(

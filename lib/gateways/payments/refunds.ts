@@ -7,6 +7,7 @@ import type { Payments } from '@/lib/gateways/payments/types'
 
 type Part = Pick<Payments, 'refund' | 'getRefund'>
 
+/** Paying back, in part or all; a refund that fails later is told by an event or `getRefund`. */
 export function refundCalls(stripe: Stripe): Part {
   return {
     refund: async ({ account, key, payment, amount, currency, refundId }) => {

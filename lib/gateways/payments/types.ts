@@ -129,6 +129,7 @@ export type ChargeOutcome =
 export type FinishOutcome =
   ChargeOutcome | { readonly state: 'go'; readonly url: string; readonly payment: PaymentFacts }
 
+/** A refund as the provider has it. */
 export type RefundFacts = {
   readonly id: string
   readonly state: 'pending' | 'succeeded' | 'failed'
@@ -143,6 +144,7 @@ export type RefundFacts = {
   readonly createdAt: Date
 }
 
+/** A dispute as the provider has it; while it is open or lost the charge cannot be refunded. */
 export type DisputeFacts = {
   readonly id: string
   readonly state: 'needs_response' | 'under_review' | 'won' | 'lost' | 'closed'
@@ -155,6 +157,7 @@ export type DisputeFacts = {
   readonly createdAt: Date
 }
 
+/** What lies on the account, by currency. */
 export type BalanceFacts = {
   /** May be paid out or refunded now. */
   readonly available: readonly { readonly currency: string; readonly amount: Minor }[]
@@ -177,6 +180,7 @@ export type BookLine = {
   readonly payment: string | null
 }
 
+/** from ≤ created < to, in whole seconds of the provider’s clock. */
 export type Window = { readonly account: AccountId; readonly from: Date; readonly to: Date }
 
 /** Evidence for a dispute, as far as the order holds it. Texts ≤ 20,000 characters each. */
@@ -192,7 +196,9 @@ export type DisputeEvidence = {
   readonly notes?: string
 }
 
+/** The answer of a change. */
 export type Changed<T> = Promise<Result<T, ChangeReason>>
+/** The answer of a look-up. */
 export type Found<T> = Promise<Result<T, LookupReason>>
 
 /**

@@ -65,6 +65,7 @@ export async function book(books: Books, booking: Booking): Promise<Stripe.Balan
   )
 }
 
+/** A balance in the provider’s units. */
 export type Sum = { currency: string; available: number; pending: number }
 
 /** The account's balance by currency. */

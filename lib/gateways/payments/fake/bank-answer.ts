@@ -4,6 +4,7 @@ import { accountOf, hiddenOf, load, withBooks } from '@/lib/gateways/payments/fa
 import { sessionNow } from '@/lib/gateways/payments/fake/card-session'
 import { type Tried, refuseCard, tryCard } from '@/lib/gateways/payments/fake/try-card'
 
+/** What came of the bank’s question, and where the buyer goes next. */
 export type BankAnswer = (Tried | { state: 'not_asked'; intent: Stripe.PaymentIntent }) & {
   session: Stripe.Checkout.Session | null
   returnUrl: string | null

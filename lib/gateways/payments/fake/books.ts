@@ -78,12 +78,14 @@ export async function nextNumber({ sql, numbers }: Books): Promise<number> {
   return Number((await sql.query("select nextval('sandbox.numbers') as n")).rows[0].n)
 }
 
+/** An id of the provider’s kind, never used before. */
 export async function newId(books: Books, kind: Kind): Promise<string> {
   return idFor(PREFIX[kind], await nextNumber(books))
 }
 
 type Extra<K extends Kind> = { hidden: Hidden[K]; dueAt?: number | null }
 
+/** Writes a new object into the books. */
 export async function insert<K extends Kind>(
   books: Books,
   kind: K,
@@ -107,6 +109,7 @@ export async function load<K extends Kind>(books: Books, kind: K, id: string): P
   return rows[0].body
 }
 
+/** What the provider knows of an object and never tells. */
 export async function hiddenOf<K extends Kind>(books: Books, kind: K, id: string): Promise<Hidden[K]> {
   const { rows } = await books.sql.query('select hidden from sandbox.objects where id = $1 and kind = $2', [
     id,
@@ -116,6 +119,7 @@ export async function hiddenOf<K extends Kind>(books: Books, kind: K, id: string
   return rows[0].hidden
 }
 
+/** Replaces an object; `hidden` and `dueAt` stay unless given. */
 export async function save<K extends Kind>(
   books: Books,
   kind: K,

@@ -36,6 +36,7 @@ export async function expireSession(
   return expired
 }
 
+/** Ends a payment for good. */
 export async function cancelIntent(
   books: Books,
   intent: Stripe.PaymentIntent,
@@ -83,6 +84,7 @@ async function intentOf(books: Books, session: Stripe.Checkout.Session): Promise
   return intent
 }
 
+/** What came of a card handed in. */
 export type HandedIn =
   Tried | { state: 'no_session' | 'unknown_card' } | { state: 'not_open'; session: Stripe.Checkout.Session }
 

@@ -94,10 +94,12 @@ export const CARDS: Readonly<Record<string, CardBehaviour>> = {
 /** The digits of a card number as typed. */
 export const digitsOf = (typed: string): string => typed.replace(/[\s-]/g, '')
 
+/** How a number behaves; undefined for one that is not published. */
 export function cardOf(number: string): CardBehaviour | undefined {
   return CARDS[number]
 }
 
+/** The bank’s answer to one try. */
 export type Verdict = 'pays' | 'asks' | { readonly code: string; readonly declineCode: string }
 
 /** What the bank says to one try. */

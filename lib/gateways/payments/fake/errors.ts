@@ -5,6 +5,7 @@ export class SandboxBug extends Error {
   override name = 'SandboxBug'
 }
 
+/** The published shape of an error. */
 export type ErrorBody = {
   type: 'card_error' | 'invalid_request_error' | 'idempotency_error' | 'api_error' | 'rate_limit_error'
   message: string
@@ -30,6 +31,7 @@ export class ProviderRefusal extends Error {
   }
 }
 
+/** A parameter that cannot be; nothing was begun. */
 export function invalid(message: string, param?: string, code?: string): ProviderRefusal {
   const body: ErrorBody = { type: 'invalid_request_error', message }
   if (param !== undefined) body.param = param
@@ -37,6 +39,7 @@ export function invalid(message: string, param?: string, code?: string): Provide
   return new ProviderRefusal(400, body, 'nothing')
 }
 
+/** The provider’s 404. */
 export function missing(kind: string, id: string): ProviderRefusal {
   const message = `No such ${kind.replaceAll('_', ' ')}: '${id}'`
   return new ProviderRefusal(
@@ -51,6 +54,7 @@ export function unexpected(code: string, message: string): ProviderRefusal {
   return new ProviderRefusal(400, { type: 'invalid_request_error', code, message }, 'answer')
 }
 
+/** The card was refused (HTTP 402); charge and payment tell of the try. */
 export function cardError(body: Omit<ErrorBody, 'type'>): ProviderRefusal {
   return new ProviderRefusal(402, { type: 'card_error', ...body }, 'effects')
 }

@@ -35,6 +35,7 @@ export async function remembered(books: Books, key: string, request: string) {
   return { status: Number(rows[0].status), body: String(rows[0].body) }
 }
 
+/** Keeps the first answer under a key. */
 export async function remember(
   books: Books,
   key: string,

@@ -14,6 +14,7 @@ export type Kinds = {
   balance_transaction: Stripe.BalanceTransaction
   payout: Stripe.Payout
 }
+/** The name of a kind of object. */
 export type Kind = keyof Kinds
 
 /** What the provider knows of an object and never tells. */

@@ -13,6 +13,7 @@ export async function finishOnboarding(account: string): Promise<void> {
   })
 }
 
+/** Where a link leads and whether it is still good. */
 export type OnboardingLink = { account: string; returnUrl: string; refreshUrl: string; isGood: boolean }
 
 /** What a link leads to; null for one that never was. A link is good once and for minutes. */

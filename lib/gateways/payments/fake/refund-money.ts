@@ -39,6 +39,7 @@ async function numberOf(books: Books, charge: Stripe.Charge): Promise<string> {
   return (await hiddenOf(books, 'payment_method', charge.payment_method)).number
 }
 
+/** Pays back as far as balance and card allow; the caller has checked what is left of the charge. */
 export async function startRefund(
   books: Books,
   charge: Stripe.Charge,

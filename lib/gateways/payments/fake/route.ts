@@ -1,6 +1,7 @@
 import 'server-only'
 import { http, HttpResponse, type HttpHandler } from 'msw'
 import { env } from '@/lib/config/env'
+import { nextBreak } from '@/lib/gateways/payments/fake/break-calls'
 import { type Books, nextNumber, withBooks } from '@/lib/gateways/payments/fake/books'
 import { isFault } from '@/lib/gateways/payments/fake/chance'
 import { type ErrorBody, invalid, ProviderRefusal } from '@/lib/gateways/payments/fake/errors'
@@ -8,6 +9,7 @@ import { expand } from '@/lib/gateways/payments/fake/expand'
 import { fingerprint, remember, remembered } from '@/lib/gateways/payments/fake/idempotency'
 import { Params } from '@/lib/gateways/payments/fake/params'
 
+/** One request, its parameters read and its books open. */
 export type Call = {
   readonly books: Books
   readonly params: Params
@@ -18,6 +20,7 @@ export type Call = {
   readonly path: string
 }
 
+/** What goes back, as text. */
 export type Answer = { status: number; body: string; isReplay?: boolean }
 
 type Options = {
@@ -28,6 +31,7 @@ type Options = {
 }
 
 const BROKEN: ErrorBody = { type: 'api_error', message: 'An unknown error occurred' }
+const TOO_MANY: ErrorBody = { type: 'rate_limit_error', code: 'rate_limit', message: 'Too many requests' }
 const textOf = (error: ErrorBody): string => JSON.stringify({ error })
 
 /** Runs the work inside a savepoint, so that a refusal leaves behind only what it says. */
@@ -52,14 +56,14 @@ async function answerCall(
   call: Call,
   key: string | null,
   request: string,
-  mayBreak: boolean,
+  breakShare: number,
   work: (call: Call) => Promise<object>,
 ) {
   if (call.books.account !== '') await requireAccount(call.books)
   const before = key === null ? null : await remembered(call.books, key, request)
   if (before !== null) return { ...before, isReplay: true }
   const done = await carryOut(call, work)
-  const isBroken = mayBreak && isFault('broken', await nextNumber(call.books), 0.06)
+  const isBroken = breakShare === 1 || isFault('broken', await nextNumber(call.books), breakShare)
   const answer = isBroken ? { status: 500, body: textOf(BROKEN) } : done
   if (key !== null) await remember(call.books, key, request, answer)
   return answer
@@ -111,11 +115,14 @@ export function route<T extends object>(
         body: textOf({ type: 'invalid_request_error', message: 'Invalid API Key provided' }),
       })
     }
-    if (await breaks('request_lost')) return HttpResponse.error()
+    const planned = nextBreak(method, url.pathname)
+    if (planned === 'before' || (await breaks('request_lost'))) return HttpResponse.error()
+    if (planned === 'error_429') return toResponse({ status: 429, body: textOf(TOO_MANY) })
     const query = new Params(text)
     query.onlyKnown([...known, 'expand.*'])
     const account = request.headers.get('stripe-account') ?? ''
     const key = method === 'post' ? request.headers.get('idempotency-key') : null
+    const breakShare = planned === 'error_500' ? 1 : mayBreak ? 0.06 : 0
     const answer = await withBooks(account, (books) => {
       const call = {
         books,
@@ -124,12 +131,13 @@ export function route<T extends object>(
         childId: String(params['child'] ?? ''),
         path: url.pathname,
       }
-      return answerCall(call, key, fingerprint(method, url.pathname, text), mayBreak, work)
+      return answerCall(call, key, fingerprint(method, url.pathname, text), breakShare, work)
     }).catch((error: unknown) => {
       if (error instanceof ProviderRefusal) return { status: error.status, body: textOf(error.body) }
       throw error
     })
-    if (method === 'post' && (await breaks('answer_lost'))) return HttpResponse.error()
+    const isLost = planned === 'after' || (method === 'post' && (await breaks('answer_lost')))
+    if (isLost) return HttpResponse.error()
     return toResponse(answer)
   })
 }

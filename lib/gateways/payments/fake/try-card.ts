@@ -8,6 +8,7 @@ import { type ErrorBody, SandboxBug } from '@/lib/gateways/payments/fake/errors'
 import { emit } from '@/lib/gateways/payments/fake/events'
 import { newCharge } from '@/lib/gateways/payments/fake/objects/charge'
 
+/** What came of one try. */
 export type Tried =
   | { state: 'captured'; intent: Stripe.PaymentIntent }
   | { state: 'asks'; intent: Stripe.PaymentIntent; url: string }

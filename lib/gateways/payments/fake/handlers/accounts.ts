@@ -80,6 +80,7 @@ async function retrieveBalance({ books }: Call): Promise<Stripe.Balance> {
   }
 }
 
+/** Accounts, onboarding links, payout schedule and balance. */
 export const ACCOUNTS = [
   route<Stripe.Account>(
     'post',

@@ -73,6 +73,7 @@ async function expire({ books, id }: Call): Promise<Stripe.Checkout.Session> {
   throw unexpected('checkout_session_not_open', message)
 }
 
+/** Card sessions. */
 export const CHECKOUT = [
   route<Stripe.Checkout.Session>(
     'post',

@@ -27,6 +27,7 @@ async function retrieveMethod({ books, id, childId }: Call): Promise<Stripe.Paym
   return method
 }
 
+/** Customers and their saved methods. */
 export const CUSTOMERS = [
   route<Stripe.Customer>('post', '/v1/customers', { known: ['email', 'name', 'metadata.*'] }, createCustomer),
   route<Stripe.Customer>('get', '/v1/customers/:id', { known: [] }, ({ books, id }) =>

@@ -11,6 +11,7 @@ async function update({ books, params, id }: Call): Promise<Stripe.Dispute> {
   return answerDispute(books, dispute, params.map('evidence'), params.isTrue('submit'))
 }
 
+/** One dispute and its evidence; the list is in lists.ts. */
 export const DISPUTES = [
   route<Stripe.Dispute>('get', '/v1/disputes/:id', { known: [] }, ({ books, id }) =>
     load(books, 'dispute', id),

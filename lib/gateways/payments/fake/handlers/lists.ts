@@ -6,6 +6,7 @@ import type { Kind, Kinds } from '@/lib/gateways/payments/fake/kinds'
 import { listObjects } from '@/lib/gateways/payments/fake/list-objects'
 import { route } from '@/lib/gateways/payments/fake/route'
 
+/** What every list of the provider takes. */
 export const LIST_PARAMS = ['limit', 'starting_after', 'ending_before', 'created.*']
 
 function list<K extends Kind>(kind: K, path: string, filters: readonly string[]): HttpHandler {

@@ -104,6 +104,7 @@ const CREATE = [
   'confirm',
 ]
 
+/** Payments off session, and finishing or cancelling them. */
 export const PAYMENT_INTENTS = [
   route<Stripe.PaymentIntent>(
     'post',

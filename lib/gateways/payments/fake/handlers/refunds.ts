@@ -38,6 +38,7 @@ async function create(call: Call): Promise<Stripe.Refund> {
   })
 }
 
+/** Refunds. */
 export const REFUNDS = [
   route<Stripe.Refund>(
     'post',

@@ -10,6 +10,7 @@ type Given = {
   metadata: Stripe.Metadata
 }
 
+/** An account before its onboarding. */
 export function newAccount(given: Given): Stripe.Account {
   return {
     id: given.id,
@@ -42,6 +43,7 @@ export function onboarded(account: Stripe.Account): Stripe.Account {
   }
 }
 
+/** The settings as the provider tells them. */
 export function balanceSettings(
   interval: 'manual' | 'daily',
   bankMayBeDebited: boolean,

@@ -1,5 +1,6 @@
 import type Stripe from 'stripe'
 
+/** A refund before it moved money. */
 export function newRefund(given: {
   id: string
   now: number
@@ -59,6 +60,7 @@ const NO_EVIDENCE: Omit<Stripe.Dispute.Evidence, 'enhanced_evidence'> = {
   uncategorized_text: null,
 }
 
+/** A dispute as it is opened, over what is left of the charge. */
 export function newDispute(given: {
   id: string
   now: number
@@ -94,6 +96,7 @@ export function newDispute(given: {
   }
 }
 
+/** A payout on its way to the bank. */
 export function newPayout(given: {
   id: string
   now: number

@@ -7,6 +7,7 @@ const CUSTOM_TEXT = {
   terms_of_service_acceptance: null,
 }
 
+/** An open session. */
 export function newCheckoutSession(given: {
   id: string
   now: number

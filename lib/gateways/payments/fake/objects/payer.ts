@@ -1,6 +1,7 @@
 import type Stripe from 'stripe'
 import type { CardBehaviour } from '@/lib/gateways/payments/fake/cards'
 
+/** A customer without cards. */
 export function newCustomer(given: {
   id: string
   now: number
@@ -32,6 +33,7 @@ export function newCustomer(given: {
 /** All cards of the sandbox run out at the end of 2034. */
 const EXPIRES = { exp_month: 12, exp_year: 2034 } as const
 
+/** A card as a payment method. */
 export function newPaymentMethod(given: {
   id: string
   now: number

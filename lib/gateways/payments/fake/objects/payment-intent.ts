@@ -1,5 +1,6 @@
 import type Stripe from 'stripe'
 
+/** A payment before the first card. */
 export function newPaymentIntent(given: {
   id: string
   now: number

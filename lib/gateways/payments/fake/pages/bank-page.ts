@@ -15,6 +15,7 @@ function backTo(returnUrl: string, payment: string, isPaid: boolean): string {
   return url.toString()
 }
 
+/** The bank’s question; a payment nobody asks about any more leads back. */
 export async function showBankPage(intentId: string): Promise<Page> {
   const account = await accountOf(intentId)
   if (account === null) return NO_PAYMENT()
@@ -47,6 +48,7 @@ function after(answer: BankAnswer): Promise<Page> | Page {
   return page({ title: isPaid ? 'Paid' : 'Not paid', body: '<p>You can close this page.</p>' })
 }
 
+/** Takes the buyer’s answer. */
 export async function postBankAnswer(intentId: string, isConfirmed: boolean): Promise<Page> {
   const answer = await answerBank(intentId, isConfirmed)
   return answer === null ? NO_PAYMENT() : after(answer)

@@ -74,6 +74,7 @@ async function shownSession(sessionId: string): Promise<Shown | null> {
   })
 }
 
+/** The form of an open session; an ended one leads on or says so. */
 export async function showCardPage(
   sessionId: string,
   trouble: string | null = null,
@@ -84,6 +85,7 @@ export async function showCardPage(
   return shown.session.status === 'open' ? form(shown, trouble, typed) : ended(shown.session)
 }
 
+/** Takes a card number. */
 export async function postCard(sessionId: string, number: string): Promise<Page> {
   const done = await handInCard(sessionId, number)
   switch (done.state) {

@@ -27,6 +27,7 @@ td:first-child{font-family:ui-monospace,monospace;white-space:nowrap}
 
 const STYLE_HASH = createHash('sha256').update(STYLE).digest('base64')
 
+/** Text made safe inside HTML. */
 export function escape(text: string): string {
   const names: Record<string, string> = {
     '&': '&amp;',
@@ -38,6 +39,7 @@ export function escape(text: string): string {
   return text.replace(/[&<>"']/g, (sign) => names[sign] ?? sign)
 }
 
+/** One answer of the card page’s server. */
 export type Page = { status: number; html: string; headers: Record<string, string> }
 
 /**
@@ -72,6 +74,7 @@ ${given.body}</main></body></html>`,
   }
 }
 
+/** A redirect after a form. */
 export function seeOther(to: string): Page {
   return { status: 303, html: '', headers: { location: to, 'cache-control': 'no-store' } }
 }

@@ -12,6 +12,7 @@ const NO_LINK = () => page({ status: 404, title: 'No such link', body: '<p>The l
 /** In the provider's units; enough to carry the fees of a small run. */
 const FLOAT = 20_000
 
+/** The provider’s forms in three buttons; a used link leads to the refresh address. */
 export async function showOnboarding(linkId: string): Promise<Page> {
   const link = await onboardingLinkOf(linkId)
   if (link === null) return NO_LINK()
@@ -27,6 +28,7 @@ export async function showOnboarding(linkId: string): Promise<Page> {
   })
 }
 
+/** Takes the owner’s choice and leads back. */
 export async function postOnboarding(linkId: string, then: string): Promise<Page> {
   const link = await onboardingLinkOf(linkId)
   if (link === null) return NO_LINK()
