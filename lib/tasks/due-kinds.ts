@@ -1,5 +1,6 @@
 import 'server-only'
 import type { DueKind } from '@/lib/jobs/due-kinds'
+import { deleteUnconfirmedSignUp } from '@/lib/services/signups/delete-unconfirmed-signup'
 
 export type DueItem = { kind: DueKind; subjectId: string; workshopId: string | null; dueAt: Date }
 
@@ -9,4 +10,6 @@ export type DueItem = { kind: DueKind; subjectId: string; workshopId: string | n
  */
 export type DueHandler = (item: DueItem, now: Date) => Promise<void>
 
-export const DUE_HANDLERS: { readonly [K in DueKind]: DueHandler } = {}
+export const DUE_HANDLERS: { readonly [K in DueKind]: DueHandler } = {
+  signup_unconfirmed: async (item) => void (await deleteUnconfirmedSignUp({ signUpId: item.subjectId })),
+}
