@@ -16,7 +16,12 @@ export async function refreshPaymentAccount(cmd: { account: string; now: Date })
   const isManual =
     facts.value.payoutSchedule === 'manual' ||
     (facts.value.chargesEnabled &&
-      (await payments().setManualPayouts({ account: cmd.account, key: `payouts-manual:${cmd.account}` })).ok)
+      (
+        await payments().setManualPayouts({
+          account: cmd.account,
+          key: `payouts-manual:${cmd.account}:${cmd.now.getTime()}`,
+        })
+      ).ok)
   return inTransaction(async (tx) => {
     const workshop = await Workshop.findOne({
       where: { providerAccountId: cmd.account },
