@@ -28,7 +28,7 @@ export function FillGauge({ size = 'medium', daysLeft, decideBy, ...levels }: Pr
     )
   const large = size === 'large'
   return (
-    <figure className={`flex flex-wrap items-end gap-x-6 gap-y-3 ${large ? '' : 'sm:flex-nowrap'}`}>
+    <figure className="flex flex-wrap items-center gap-x-6 gap-y-3">
       <GaugeTube size={size} {...levels} />
       <figcaption className={`min-w-0 grow basis-52 pb-2 ${large ? 'text-21' : 'text-17'}`}>
         <p className="max-w-words">{sentence}</p>

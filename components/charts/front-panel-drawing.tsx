@@ -64,7 +64,7 @@ export function FrontPanelDrawing({ widthHp, controls, name, size = 'full' }: Pr
   return (
     <figure>
       {drawing}
-      <figcaption className="text-13 text-quiet pt-1">{sentence}</figcaption>
+      <figcaption className="text-13 text-quiet max-w-80 pt-1">{sentence}</figcaption>
       <Disclosure summary={charts.controlsCaption}>
         <Table
           caption={charts.controlsCaption}

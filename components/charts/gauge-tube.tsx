@@ -2,6 +2,7 @@ import { scaleLinear } from 'd3-scale'
 import { charts } from '@/lib/messages/charts'
 import { writtenNumber } from '@/lib/messages/written'
 import { hatchPath, round } from './hatch'
+import { labelWidth } from './place-labels'
 
 export type GaugeLevels = {
   /** Units of orders under deposit. */
@@ -52,14 +53,18 @@ export function GaugeTube({
   const floor = box.height - box.bottom
   const y = scaleLinear([0, top], [floor, box.top])
   const right = box.left + box.tube
+  const words = [charts.maximumAt(maximum), charts.minimumAt(minimum)]
+  const width = box.labels
+    ? Math.ceil(right + 32 + Math.max(...words.map((text) => labelWidth(text, 15))))
+    : box.width
   const fill = round(y(Math.min(deposited, top)))
   const mean = forecast ? round(y(Math.min(Math.max(forecast.mean, deposited), top))) : fill
   const inTube = floor - fill >= 26
   return (
     <svg
-      width={box.width}
+      width={width}
       height={box.height}
-      viewBox={`0 0 ${box.width} ${box.height}`}
+      viewBox={`0 0 ${width} ${box.height}`}
       aria-hidden="true"
       className="text-15 shrink-0"
     >
@@ -91,7 +96,7 @@ export function GaugeTube({
       <Level
         at={y(minimum)}
         from={box.left - (box.labels ? 10 : 6)}
-        to={box.labels ? box.width : right + 10}
+        to={box.labels ? width : right + 10}
         weight={size === 'small' ? 1.75 : 2.5}
       />
       {box.labels ? (

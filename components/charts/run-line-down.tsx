@@ -40,7 +40,7 @@ export function RunLineDown(facts: RunLineFacts) {
       height={round(height)}
       viewBox={`0 0 ${WIDTH} ${round(height)}`}
       aria-hidden="true"
-      className="text-13 max-w-full sm:hidden"
+      className="text-13 max-w-full @min-[42rem]:hidden"
     >
       {steps.map((step) => {
         const from = round(scale.at(step.from))

@@ -18,7 +18,7 @@ export function RunLine(facts: RunLineFacts) {
   if (steps.length === 0) return <p className="text-15 text-quiet">{charts.noSteps}</p>
   const now = steps.filter((step) => step.state === 'now').map((step) => step.name)
   return (
-    <figure>
+    <figure className="@container">
       <RunLineAcross {...facts} />
       <RunLineDown {...facts} />
       <figcaption className="text-15 pt-2">{charts.runLine(now, postedBy, chance)}</figcaption>

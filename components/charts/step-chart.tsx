@@ -31,7 +31,7 @@ export function StepChart(facts: StepChartFacts) {
   const now = profits[deposited - 1]
   const { firstProfit, safeFrom, lossGaps } = breakEven
   return (
-    <figure>
+    <figure className="@container">
       <figcaption className="max-w-words pb-2">
         {now === undefined ? null : (
           <p>{charts.profitAt(deposited, formatMoney(Math.abs(now), currency, locale), now < 0)}</p>
@@ -42,7 +42,8 @@ export function StepChart(facts: StepChartFacts) {
             : charts.profitFrom(firstProfit, safeFrom, lossGaps)}
         </p>
       </figcaption>
-      <StepPlot {...facts} />
+      <StepPlot {...facts} across="wide" />
+      <StepPlot {...facts} across="narrow" />
       <Disclosure summary={ui.inTable}>
         <Table
           caption={charts.stepChartCaption}

@@ -1,5 +1,5 @@
 import { scaleLinear } from 'd3-scale'
-import { curveStepAfter, line as lineOf } from 'd3-shape'
+import { curveStep, line as lineOf } from 'd3-shape'
 import { charts } from '@/lib/messages/charts'
 import { LOCALE } from '@/lib/messages/ui'
 import { writtenNumber, writtenRoundMoney } from '@/lib/messages/written'
@@ -7,28 +7,25 @@ import { round } from './hatch'
 import { labelWidth, placeLabels } from './place-labels'
 import type { StepChartFacts } from './step-chart'
 
-const WIDTH = 640
-const PLOT = { left: 78, right: 628, height: 232 }
+const WIDTHS = { wide: 720, narrow: 340 }
+const PLOT = { left: 68, aside: 12, height: 232 }
 const ROW = 17
 
 /** The drawing of the step chart alone. */
-export function StepPlot({
-  profits,
-  currency,
-  locale = LOCALE,
-  deposited,
-  minimum,
-  forecast,
-  breakEven,
-}: StepChartFacts) {
+export function StepPlot({ across, ...facts }: StepChartFacts & { across: 'wide' | 'narrow' }) {
+  const { profits, currency, locale = LOCALE, forecast } = facts
   const last = profits.length
-  const x = scaleLinear([0, last], [PLOT.left, PLOT.right])
-  const marks = marksOf({ deposited, minimum, forecast, breakEven, last }).map((mark) => ({
+  const width = WIDTHS[across]
+  const right = width - PLOT.aside
+  const ticks = across === 'wide' ? 8 : 4
+  // Half a unit of room at both ends: each step stands centred on its quantity.
+  const x = scaleLinear([0.5, last + 0.5], [PLOT.left, right])
+  const marks = marksOf(facts).map((mark) => ({
     ...mark,
     centre: x(mark.units),
     width: labelWidth(mark.text),
   }))
-  const rows = placeLabels(marks, { from: PLOT.left, to: WIDTH, gap: 10 })
+  const rows = placeLabels(marks, { from: PLOT.left, to: width, gap: 10 })
   const top = 10 + ROW * (1 + Math.max(0, ...rows.map((label) => label.row)))
   const bottom = top + PLOT.height
   const y = scaleLinear([Math.min(0, ...profits), Math.max(0, ...profits)], [bottom, top + 8]).nice(5)
@@ -36,43 +33,47 @@ export function StepPlot({
   const path = lineOf<number>(
     (_, index) => round(x(index + 1)),
     (profit) => round(y(profit)),
-  ).curve(curveStepAfter)(profits)
+  ).curve(curveStep)(profits)
   const profitAt = (units: number) => profits[Math.min(Math.max(Math.round(units), 1), last) - 1] ?? 0
   return (
     <svg
-      viewBox={`0 0 ${WIDTH} ${bottom + 40}`}
+      viewBox={`0 0 ${width} ${bottom + 40}`}
       aria-hidden="true"
-      className="text-13 h-auto w-full max-w-[52rem] min-w-[30rem]"
+      className={`text-13 h-auto w-full ${across === 'wide' ? 'hidden max-w-[52rem] @min-[42rem]:block' : 'max-w-[30rem] @min-[42rem]:hidden'}`}
     >
       {y.ticks(5).map((tick) => (
         <g key={tick}>
-          <path d={`M${PLOT.left} ${round(y(tick))}H${PLOT.right}`} className="stroke-rule" />
+          <path d={`M${PLOT.left} ${round(y(tick))}H${right}`} className="stroke-rule" />
           <text x={PLOT.left - 8} y={round(y(tick)) + 4} textAnchor="end" className="figures fill-quiet">
             {writtenRoundMoney(tick, currency, { locale })}
           </text>
         </g>
       ))}
       <path d={lossLines(x, y, profits)} className="stroke-rust" strokeWidth="1" />
-      <path d={`M${PLOT.left} ${zero}H${PLOT.right}`} className="stroke-ink" strokeWidth="1" />
+      <path d={`M${PLOT.left} ${zero}H${right}`} className="stroke-ink" strokeWidth="1" />
       <path
-        d={`M${PLOT.left} ${bottom}H${PLOT.right}${x
-          .ticks(8)
+        d={`M${PLOT.left} ${bottom}H${right}${x
+          .ticks(ticks)
+          .filter(Number.isInteger)
           .map((tick) => `M${round(x(tick))} ${bottom}v5`)
           .join('')}`}
         className="stroke-quiet"
       />
-      {x.ticks(8).map((tick) => (
-        <text
-          key={tick}
-          x={round(x(tick))}
-          y={bottom + 18}
-          textAnchor="middle"
-          className="figures fill-quiet"
-        >
-          {writtenNumber(tick, { locale })}
-        </text>
-      ))}
-      <text x={PLOT.right} y={bottom + 34} textAnchor="end" className="figures fill-quiet">
+      {x
+        .ticks(ticks)
+        .filter(Number.isInteger)
+        .map((tick) => (
+          <text
+            key={tick}
+            x={round(x(tick))}
+            y={bottom + 18}
+            textAnchor="middle"
+            className="figures fill-quiet"
+          >
+            {writtenNumber(tick, { locale })}
+          </text>
+        ))}
+      <text x={right} y={bottom + 34} textAnchor="end" className="figures fill-quiet">
         {charts.axisUnits}
       </text>
       {path ? <path d={path} fill="none" className="stroke-ink" strokeWidth="2" /> : null}
@@ -84,6 +85,14 @@ export function StepPlot({
           y={bottom - 7}
         />
       ) : null}
+      {marks.map((mark, index) => (
+        <path
+          key={mark.text}
+          d={`M${round(mark.centre)} ${16 + rows[index]!.row * ROW}V${round(y(profitAt(mark.units)))}`}
+          className="stroke-quiet"
+          strokeDasharray="2 3"
+        />
+      ))}
       {marks.map((mark, index) => {
         const label = rows[index]!
         const at = round(mark.centre)
@@ -91,8 +100,11 @@ export function StepPlot({
         const end = round(y(profitAt(mark.units)))
         return (
           <g key={mark.text}>
-            <path d={`M${at} ${labelY + 4}V${end}`} className="stroke-quiet" strokeDasharray="2 3" />
-            <text x={round(label.left)} y={labelY} className="figures fill-ink font-semibold">
+            <text
+              x={round(label.left)}
+              y={labelY}
+              className="figures fill-ink stroke-sheet stroke-4 font-semibold [paint-order:stroke]"
+            >
               {mark.text}
             </text>
             <MarkShape kind={mark.kind} x={at} y={end} />
@@ -105,13 +117,8 @@ export function StepPlot({
 
 type MarkKind = 'filled' | 'open' | 'tick'
 
-function marksOf({
-  deposited,
-  minimum,
-  forecast,
-  breakEven,
-  last,
-}: Pick<StepChartFacts, 'deposited' | 'minimum' | 'forecast' | 'breakEven'> & { last: number }) {
+function marksOf({ profits, deposited, minimum, forecast, breakEven }: StepChartFacts) {
+  const last = profits.length
   const marks: { text: string; units: number; kind: MarkKind }[] = []
   const add = (words: string, units: number | null | undefined, kind: MarkKind) => {
     if (units && units >= 1 && units <= last)
@@ -149,16 +156,15 @@ function ForecastBracket({ low, high, mean, y }: { low: number; high: number; me
   )
 }
 
-/** Upright hatching between the zero line and the curve wherever there is a loss; at most one line every 4 px. */
+/** Upright hatching between the zero line and the curve wherever there is a loss, a line every 4 px. */
 function lossLines(
-  x: (units: number) => number,
+  x: { (units: number): number; invert: (at: number) => number },
   y: (profit: number) => number,
   profits: readonly number[],
 ): string {
   const lines: string[] = []
   for (let at = x(1); at <= x(profits.length); at += 4) {
-    const units = Math.floor(profits.length * ((at - x(0)) / (x(profits.length) - x(0))))
-    const profit = profits[Math.max(units, 1) - 1] ?? 0
+    const profit = profits[Math.min(Math.max(Math.round(x.invert(at)), 1), profits.length) - 1] ?? 0
     if (profit < 0) lines.push(`M${round(at)} ${round(y(0))}V${round(y(profit))}`)
   }
   return lines.join('')

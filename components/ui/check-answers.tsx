@@ -16,8 +16,7 @@ export function CheckAnswers({ answers }: { answers: readonly Answer[] }) {
           {changeHref ? (
             <dd>
               <a href={changeHref} className="text-15 inline-flex min-h-6">
-                {ui.change}
-                <span className="sr-only"> {question}</span>
+                {ui.change} <span className="sr-only">{question}</span>
               </a>
             </dd>
           ) : null}

@@ -41,7 +41,12 @@ export function ChoiceField(props: Props) {
     >
       <legend className="text-13 -ml-0.5 px-1.5 font-semibold">
         {label}
-        {optional ? <span className="text-quiet font-normal"> ({ui.optional})</span> : null}
+        {optional ? (
+          <>
+            {' '}
+            <span className="text-quiet font-normal">({ui.optional})</span>
+          </>
+        ) : null}
       </legend>
       <FieldNotes id={id} hint={hint} sentence={sentence} className="pb-1" />
       {choices.map((choice, index) => (

@@ -20,8 +20,7 @@ export function CopyText({ text, label }: { text: string; label: string }) {
         onClick={copy}
         className="text-15 text-tide bench:min-h-14 min-h-6 underline underline-offset-4 print:hidden"
       >
-        {copied ? ui.copied : ui.copy}
-        <span className="sr-only"> {label}</span>
+        {copied ? ui.copied : ui.copy} <span className="sr-only">{label}</span>
       </button>
       <span role="status" className="sr-only">
         {copied ? ui.copied : ''}

@@ -7,18 +7,10 @@ export function Facts({ facts }: { facts: readonly Fact[] }) {
       {facts.map((fact, index) => (
         <div
           key={fact.key ?? index}
-          className="border-rule flex flex-wrap items-baseline justify-between gap-x-6 border-b py-2"
+          className={`border-rule border-b py-2 ${fact.kind === 'figures' ? 'flex flex-wrap items-baseline justify-between gap-x-6' : 'grid grid-cols-[7.5rem_minmax(0,1fr)] gap-x-4'}`}
         >
           <dt className="text-quiet">{fact.name}</dt>
-          <dd
-            className={
-              fact.kind === 'figures'
-                ? 'figures grow text-right'
-                : 'min-w-0 grow-[2] basis-1/2 sm:max-w-[65%]'
-            }
-          >
-            {fact.value}
-          </dd>
+          <dd className={fact.kind === 'figures' ? 'grow text-right' : 'min-w-0'}>{fact.value}</dd>
         </div>
       ))}
     </dl>

@@ -21,7 +21,12 @@ export function FieldFrame({ id, label, hint, sentence, optional, width = 'mediu
       <div className="on-line">
         <label htmlFor={id} className="text-13 font-semibold">
           {label}
-          {optional ? <span className="text-quiet font-normal"> ({ui.optional})</span> : null}
+          {optional ? (
+            <>
+              {' '}
+              <span className="text-quiet font-normal">({ui.optional})</span>
+            </>
+          ) : null}
         </label>
       </div>
       <FieldNotes id={id} hint={hint} sentence={sentence} className="px-3 pt-1" />
@@ -49,8 +54,7 @@ export function FieldNotes({
         <p id={`${id}-error`} className="text-15 text-rust flex items-baseline gap-1.5 font-semibold">
           <Mark kind="attention" />
           <span>
-            <span className="sr-only">{ui.errorPrefix} </span>
-            {sentence}
+            <span className="sr-only">{ui.errorPrefix}</span> {sentence}
           </span>
         </p>
       ) : null}

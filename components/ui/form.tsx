@@ -38,7 +38,9 @@ export function Form({ action, form, contract, hidden = {}, foot, children, clas
         <input key={name} type="hidden" name={name} value={value} />
       ))}
       {children}
-      <ButtonRow>{foot}</ButtonRow>
+      <div className="pt-1">
+        <ButtonRow>{foot}</ButtonRow>
+      </div>
     </form>
   )
 }
@@ -48,7 +50,7 @@ type DeedFormProps = { action: string; hidden?: Readonly<Record<string, string>>
 /** One button that changes something, with nothing to fill in. */
 export function DeedForm({ action, hidden = {}, children }: DeedFormProps) {
   return (
-    <form action={action} method="post" className="inline-block print:hidden">
+    <form action={action} method="post" className="flex flex-col sm:inline-flex print:hidden">
       {Object.entries(hidden).map(([name, value]) => (
         <input key={name} type="hidden" name={name} value={value} />
       ))}

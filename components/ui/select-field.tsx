@@ -26,27 +26,29 @@ export function SelectField(props: Props) {
   const { id, sentence, aria } = describeField(props)
   return (
     <FieldFrame {...{ id, label, hint, sentence, optional, width }}>
-      <select
-        id={id}
-        name={name}
-        required={!optional}
-        defaultValue={select.value === undefined ? (typedText(form, name) ?? '') : undefined}
-        className={classNames(controlClass, className)}
-        {...aria}
-        {...select}
-      >
-        {empty === false ? null : <option value="">{empty ?? ui.chooseOne}</option>}
-        {options.map((option) => (
-          <option
-            key={option.value}
-            value={option.value}
-            disabled={option.disabled}
-            className="bg-sheet text-ink"
-          >
-            {option.label}
-          </option>
-        ))}
-      </select>
+      <span className="block pr-2">
+        <select
+          id={id}
+          name={name}
+          required={!optional}
+          defaultValue={select.value === undefined ? (typedText(form, name) ?? '') : undefined}
+          className={classNames(controlClass, className)}
+          {...aria}
+          {...select}
+        >
+          {empty === false ? null : <option value="">{empty ?? ui.chooseOne}</option>}
+          {options.map((option) => (
+            <option
+              key={option.value}
+              value={option.value}
+              disabled={option.disabled}
+              className="bg-sheet text-ink"
+            >
+              {option.label}
+            </option>
+          ))}
+        </select>
+      </span>
     </FieldFrame>
   )
 }

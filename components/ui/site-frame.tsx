@@ -45,9 +45,9 @@ export function SiteFrame({
       >
         {ui.skipToContent}
       </a>
-      {banner ? <div className="border-rule text-13 border-b py-1.5 print:hidden">{banner}</div> : null}
-      <header className="pt-4 pb-6 print:hidden">
-        <div className="flex items-baseline gap-1">
+      <header className="pb-6 print:hidden">
+        {banner ? <div className="border-rule text-13 border-b py-1.5 print:hidden">{banner}</div> : null}
+        <div className="flex items-baseline gap-1 pt-4">
           <WordMark />
           <span className="brim font-heading text-28" aria-hidden="true" />
           {account ? <div className="text-15 pl-3">{account}</div> : null}

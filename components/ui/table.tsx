@@ -54,10 +54,13 @@ export function Table<Row>(props: Props<Row>) {
     <div className={classNames('group/table', stack && 'stacks')}>
       {filter ? <div className="pb-3 print:hidden">{filter}</div> : null}
       {rows.length === 0 ? (
-        <Empty>{empty}</Empty>
+        <>
+          {captionHidden ? null : <p className="text-13 text-quiet pb-2">{caption}</p>}
+          <Empty>{empty}</Empty>
+        </>
       ) : (
         <div
-          className={stack ? undefined : 'overflow-x-auto'}
+          className={stack ? undefined : 'relative overflow-x-auto'}
           {...(stack
             ? {}
             : {
@@ -118,9 +121,8 @@ function Heading<Row>({ column }: { column: Column<Row> }) {
       className={`border-ink text-13 border-b py-1.5 pr-4 align-bottom font-semibold last:pr-0 ${edge(kind)}`}
     >
       {sort ? (
-        <a href={sort.href} className="text-ink inline-flex min-h-6 items-baseline gap-1">
-          <span className="sr-only">{ui.sortBy(heading)} </span>
-          <span aria-hidden="true">{heading}</span>
+        <a href={sort.href} className="text-ink inline-flex min-h-6 items-end gap-1 leading-5">
+          <span className="sr-only">{ui.sortBy(heading)}</span> <span aria-hidden="true">{heading}</span>
           {sort.direction ? (
             <>
               <SortMark up={sort.direction === 'ascending'} />
@@ -139,7 +141,7 @@ function Heading<Row>({ column }: { column: Column<Row> }) {
 
 function SortMark({ up }: { up: boolean }) {
   return (
-    <svg viewBox="0 0 8 8" aria-hidden="true" className="size-2">
+    <svg viewBox="0 0 8 8" aria-hidden="true" className="mb-1.5 size-2">
       <path d={up ? 'M4 1 7 7H1Z' : 'M4 7 1 1H7Z'} fill="currentColor" />
     </svg>
   )

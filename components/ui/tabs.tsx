@@ -13,8 +13,8 @@ export function Tabs({ label, tabs }: { label: string; tabs: readonly Tab[] }) {
               href={tab.href}
               aria-current={tab.current ? 'page' : undefined}
               className={classNames(
-                'text-15 bench:min-h-14 -mb-px inline-flex min-h-11 items-center gap-1.5 border border-transparent px-3 no-underline',
-                tab.current ? 'border-ink border-b-paper text-ink font-semibold' : 'hover:underline',
+                'text-15 bench:min-h-14 -mb-px inline-flex min-h-11 items-center gap-1.5 border-b-3 px-3 no-underline',
+                tab.current ? 'border-tide text-ink font-semibold' : 'border-transparent hover:underline',
               )}
             >
               {tab.label}
