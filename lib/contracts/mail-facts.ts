@@ -21,6 +21,11 @@ export const link = z.url({ protocol: /^https?$/ }).max(2000)
 export const day = z.iso.date()
 export const instant = z.iso.datetime()
 export const currency = z.string().regex(/^[A-Z]{3}$/)
+/** Spread beside every amount. */
+export const money = { currency }
+
+export const balanceWhen = z.enum(['at_lock', 'units_passed', 'before_packing'])
+
 /** Whole minor units of the `currency` beside it. */
 export const amountMinor = z.int().nonnegative()
 export const count = z.int().nonnegative()

@@ -95,6 +95,12 @@ export const ARROWS: Readonly<Record<string, Part>> = {
     types: ['lib/contracts'],
     packages: [/^react/, /^@react-email\//],
   },
+  // Printed papers: numbers and words in, a PDF out.
+  'lib/papers': {
+    may: ['lib/core', 'lib/messages'],
+    types: ['lib/contracts'],
+    packages: [/^pdfkit$/, /^bwip-js/, /^node:path$/],
+  },
   components: {
     may: ['lib/core', 'lib/contracts', 'lib/messages', 'lib/paths'],
     packages: NO_SERVER_PACKAGE,
@@ -113,6 +119,7 @@ export const ARROWS: Readonly<Record<string, Part>> = {
       'lib/auth',
       'lib/http',
       'emails',
+      'lib/papers',
       'components',
       'fonts',
     ],
