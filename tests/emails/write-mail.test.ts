@@ -115,6 +115,20 @@ test('tax that is added stands before the total, tax that is included after it',
   expect(order((await write('deposit_received', { taxMinor: 0 })).text)).toEqual(['Total'])
 })
 
+test('a mail of no workshop is signed by Brimline alone and takes no answers', async () => {
+  const platform = {
+    workshop: 'Brimline',
+    maker: 'Brimline',
+    replyTo: null,
+    postalAddress: [],
+    timeZone: 'UTC',
+  }
+  const { text } = await writeMail('sign_in_link', sampleFacts.sign_in_link, platform, null)
+  expect(text.slice(text.indexOf('\n\nBrimline'))).toBe(
+    '\n\nBrimline\n\n-- \nNobody reads answers to this address.\nSent by Brimline.\n',
+  )
+})
+
 test('money follows the currency, instants the zone of the workshop', async () => {
   const yen = await write('refund_sent', { currency: 'JPY', amountMinor: 32000 })
   expect(yen.text).toContain('JP¥32,000')

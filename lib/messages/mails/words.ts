@@ -35,6 +35,7 @@ export const foot = {
   signedBy: (maker: string, workshop: string) => (maker === workshop ? maker : `${maker}, ${workshop}`),
   replies: (maker: string) => `Answer this mail to reach ${maker}.`,
   noReplies: 'Nobody reads answers to this address.',
-  sentThrough: (workshop: string) => `Sent for ${workshop} by Brimline.`,
+  sentThrough: (workshop: string) =>
+    workshop === 'Brimline' ? 'Sent by Brimline.' : `Sent for ${workshop} by Brimline.`,
   unsubscribe: 'Stop news and invitations of this workshop',
 }
