@@ -85,6 +85,8 @@ export function env(): Env {
   const problems = checkEnv()
   if (problems.length > 0) throw new Error(problems.join('\n'))
   known = Settings.parse(given())
+  // next-auth reads its own address from here and from nowhere else.
+  process.env.NEXTAUTH_URL ??= known.BASE_URL
   return known
 }
 
