@@ -28,7 +28,7 @@ export default defineConfig({
         ...shared,
         test: {
           name: 'db',
-          include: ['tests/{services,queries,http,gateways,jobs,auth,db,sandbox,seeders}/**/*.test.{ts,tsx}'],
+          include: ['tests/{services,queries,http,gateways,jobs,auth,db,sandbox,seeders,machine}/**/*.test.{ts,tsx}'],
           environment: 'node',
           setupFiles: ['tests/support/db-setup.ts'],
           globalSetup: ['tests/support/db-global.ts'],

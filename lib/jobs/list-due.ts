@@ -31,3 +31,13 @@ export async function markDone(item: DueRow, now: Date): Promise<void> {
     },
   )
 }
+
+/** Writes down that its handler failed, for whoever looks why it is still open. */
+export async function markFailed(item: DueRow, error: unknown): Promise<void> {
+  const lastError = (error instanceof Error ? error.message : String(error)).slice(0, 500)
+  await sequelize.query(
+    `update due_items set attempts = attempts + 1, last_error = :lastError
+     where kind = :kind and subject_id = :subjectId and done_at is null`,
+    { replacements: { kind: item.kind, subjectId: item.subjectId, lastError } },
+  )
+}

@@ -13,7 +13,7 @@ export async function setDue(
 ): Promise<void> {
   await sequelize.query(
     `insert into due_items (kind, subject_id, workshop_id, due_at) values (:kind, :subjectId, :workshopId, :at)
-     on conflict (kind, subject_id) do update set due_at = excluded.due_at, done_at = null`,
+     on conflict (kind, subject_id) do update set due_at = excluded.due_at, done_at = null, attempts = 0, last_error = null`,
     { replacements: { ...due, at: due.at.toISOString() }, transaction: tx },
   )
 }

@@ -1,7 +1,7 @@
 import 'server-only'
 import { log } from '@/lib/config/log'
 import { clock } from '@/lib/gateways/clock'
-import { listDue, markDone } from '@/lib/jobs/list-due'
+import { listDue, markDone, markFailed } from '@/lib/jobs/list-due'
 import type { Task } from '@/lib/jobs/task'
 import { DUE_HANDLERS } from './due-kinds'
 
@@ -24,6 +24,7 @@ export const due: Task<'due'> = async () => {
         await markDone(item, now)
       } catch (error) {
         failed.add(`${item.kind} ${item.subjectId}`)
+        await markFailed(item, error)
         log().error({ kind: item.kind, subject: item.subjectId, error }, 'due item failed')
       }
     }

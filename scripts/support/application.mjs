@@ -23,10 +23,7 @@ export function runScript(script, env, options = {}) {
   return run(process.execPath, ['scripts/run.mjs', script, ...(options.args ?? [])], { env, ...options })
 }
 
-/**
- * Starts web, worker and, in the sandbox, the fakes; gives back how to stop them. The web server comes last,
- * so that a served page means a working application.
- */
+/** Starts web, worker and, in the sandbox, the fakes, side by side; gives back how to stop them. */
 export async function startParts(env, { isDev = false } = {}) {
   const logFolder = join(env.BRIMLINE_DATA, 'log')
   const sandbox = env.SANDBOX === '1' ? SANDBOX_PARTS.filter(({ script }) => existsSync(script)) : []
@@ -43,11 +40,11 @@ export async function startParts(env, { isDev = false } = {}) {
     // Web first: nothing new comes in while the others finish.
     for (const part of [...parts].reverse()) await part.stop()
   }
-  try {
-    for (const part of parts) await part.start()
-  } catch (error) {
+  const begun = await Promise.allSettled(parts.map((part) => part.start()))
+  const failure = begun.find(({ status }) => status === 'rejected')
+  if (failure) {
     await stop()
-    throw error
+    throw failure.reason
   }
   return { parts, stop, kill: () => parts.forEach((part) => part.kill()) }
 }

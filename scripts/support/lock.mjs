@@ -20,12 +20,13 @@ export function takeLock(file, { wait = true } = {}) {
   mkdirSync(dirname(file), { recursive: true })
   const args = [...(wait ? [] : ['--nonblock']), file, 'sh', '-c', 'echo held; exec cat >/dev/null']
   const holder = spawn('flock', args, { stdio: ['pipe', 'pipe', 'ignore'], detached: true })
-  holder.unref()
-  holder.stdin.unref?.()
   return new Promise((resolve, reject) => {
     holder.on('error', (error) => (error.code === 'ENOENT' ? resolve(() => {}) : reject(error)))
     holder.on('close', () => resolve(null))
     holder.stdout.once('data', () => {
+      // Held, it must not keep us alive; waited for, it must.
+      holder.unref()
+      holder.stdin.unref?.()
       holder.stdout.unref?.()
       resolve(() => holder.stdin.end())
     })
