@@ -3,7 +3,7 @@ import { type Circle, fourier, unitCircle } from '../stats/fourier'
 import { gaussBeta, type Rule } from '../stats/gauss-beta'
 import { type Group, MOST_UNITS, quantityCounts, unitsAsked } from './group'
 import { shockedRules, shocksAt } from './shared-shock'
-import { multiplySpectrum, type Spectrum } from './spectrum'
+import { type ClassSpectrum, classSpectrum, productOf, type Spectrum } from './spectrum'
 import { forecastOf, type UnitsForecast } from './units-forecast'
 
 export type { Group } from './group'
@@ -19,7 +19,7 @@ export type ForecastOptions = {
 
 /** How many values of p integrate a polynomial of degree `members` over any Beta to rounding. */
 function sizeFor(members: number): number {
-  return Math.min(Math.ceil((members + 1) / 2), Math.ceil(4.5 * Math.sqrt(members)) + 16)
+  return Math.min(Math.ceil((members + 1) / 2), Math.ceil(4 * Math.sqrt(members)) + 12)
 }
 
 /** Mean and variance of one class without shocks, in closed form. */
@@ -33,8 +33,8 @@ function momentsOf({ alpha, beta, quantities }: Group): { mean: number; variance
   return { mean: mean * units, variance, sway: units * single * (1 - shared) }
 }
 
-function flat(size: number): Spectrum {
-  return { re: new Float64Array(size).fill(1), im: new Float64Array(size) }
+function classOf({ quantities }: Group, rule: Rule, circle: Circle): ClassSpectrum {
+  return classSpectrum(quantityCounts(quantities), rule, circle)
 }
 
 /** The mean over the shared shock of the product of the classes' characteristic functions. */
@@ -53,24 +53,14 @@ function shockedSpectrum(
   const half = circle.size / 2 + 1
   const sum = { re: new Float64Array(half), im: new Float64Array(half) }
   shocks.forEach(({ weight }, at) => {
-    const one = { re: new Float64Array(half).fill(weight), im: new Float64Array(half) }
-    groups.forEach((group, g) => {
-      multiplySpectrum(one, quantityCounts(group.quantities), moved[g]?.[at] as Rule, circle)
-    })
+    const given = groups.map((group, g) => classOf(group, moved[g]?.[at] as Rule, circle))
+    const one = productOf(given, weight, circle)
     for (let j = 0; j < half; j += 1) {
       sum.re[j] = (sum.re[j] as number) + (one.re[j] as number)
       sum.im[j] = (sum.im[j] as number) + (one.im[j] as number)
     }
   })
   return sum
-}
-
-function plainSpectrum(groups: readonly Group[], rules: readonly Rule[], circle: Circle): Spectrum {
-  const product = flat(circle.size / 2 + 1)
-  groups.forEach((group, g) =>
-    multiplySpectrum(product, quantityCounts(group.quantities), rules[g] as Rule, circle),
-  )
-  return product
 }
 
 /** The chances behind a characteristic function; what lies below the rounding of the transform becomes 0. */
@@ -128,10 +118,7 @@ export function forecastUnits(groups: readonly Group[], options: ForecastOptions
   if (units + committed > MOST_UNITS) {
     throw new RangeError(`groups must ask for at most ${MOST_UNITS} units, got ${units + committed}`)
   }
-  // Firm classes first: where their product is already nothing, the wider ones need no work.
-  const asking = groups
-    .filter((group) => group.quantities.length > 0)
-    .sort((a, b) => Math.min(b.alpha, b.beta) - Math.min(a.alpha, a.beta))
+  const asking = groups.filter((group) => group.quantities.length > 0)
   if (asking.length === 0) {
     const certain = new Float64Array(committed + 1)
     certain[committed] = 1
@@ -143,7 +130,13 @@ export function forecastUnits(groups: readonly Group[], options: ForecastOptions
     gaussBeta(alpha, beta, stretch(quantities.length)),
   )
   const spectrum =
-    spread > 0 ? shockedSpectrum(asking, rules, spread, circle) : plainSpectrum(asking, rules, circle)
+    spread > 0
+      ? shockedSpectrum(asking, rules, spread, circle)
+      : productOf(
+          asking.map((group, g) => classOf(group, rules[g] as Rule, circle)),
+          1,
+          circle,
+        )
   const pmf = chancesOf(spectrum, circle, units, committed)
   const moments = asking.map(momentsOf)
   const mean = committed + moments.reduce((sum, each) => sum + each.mean, 0)

@@ -63,7 +63,8 @@ export function regularizedBeta(x: number, a: number, b: number): number {
 /**
  * The value a Beta(a, b) variable stays below with the given chance: the inverse of `regularizedBeta`.
  * Domain: 0 < chance < 1, a > 0, b > 0 → otherwise RangeError.
- * Accuracy: the returned x has a chance within 1e-12 of the asked one, or is the nearest double to it.
+ * Accuracy: the returned x has a chance within 1e-12 of the asked one, or is the nearest double to it; quantiles below 1e-300
+ * are not told apart.
  * Source: Newton's step inside a shrinking bracket.
  * Cost: some ten evaluations of `regularizedBeta`.
  * @example betaQuantile(0.6875, 2, 3)  // → ≈ 0.5
