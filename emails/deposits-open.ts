@@ -4,7 +4,10 @@ import { mailWords } from '@/lib/messages/mails'
 const words = mailWords.depositsOpen
 
 export const depositsOpen: Write<'deposits_open'> = (facts, say) => {
-  const lead = words.lead(facts.module, say.instant(facts.opensToAllAt))
+  const lead =
+    facts.opensToAllAt === null
+      ? words.leadOpen(facts.module)
+      : words.lead(facts.module, say.instant(facts.opensToAllAt))
   return {
     subject: words.subject(facts.module),
     preview: lead,

@@ -136,6 +136,13 @@ test('money follows the currency, instants the zone of the workshop', async () =
   expect((await write('place_free')).text).toMatch(/2 April 2027, 18:30 (CEST|GMT\+2)/)
 })
 
+test('an invitation names the head start while there is one', async () => {
+  expect((await write('deposits_open')).text).toContain('everybody else can from 3 March 2027, 10:00 CET')
+  const late = await write('deposits_open', { opensToAllAt: null })
+  expect(late.text).toContain('The run is open, and you can order now.')
+  expect(late.text).not.toContain('everybody else')
+})
+
 test('what silence means is said with its day', async () => {
   const cancels = await write('delay_notice')
   expect(cancels.text).toContain('If you do not answer by 28 September 2027, the order is cancelled')

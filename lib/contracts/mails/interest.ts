@@ -30,7 +30,7 @@ export const interestMails = {
     updates: z.boolean(),
     takeBackUrl: link,
   }),
-  /** Subject: the invitation. `opensToAllAt`: end of the head start. */
+  /** Subject: the invitation. `opensToAllAt`: end of the head start; null when it is over already. */
   deposits_open: z.strictObject({
     ...money,
     module: oneLine(),
@@ -42,7 +42,7 @@ export const interestMails = {
     minimum: count,
     maximum: count,
     decideBy: day,
-    opensToAllAt: instant,
+    opensToAllAt: instant.nullable(),
     takeBackUrl: link,
   }),
   /** Subject: `{update}.{person}`, so that each receiver gets it once whatever they are. */

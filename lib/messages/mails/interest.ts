@@ -22,6 +22,7 @@ export const depositsOpen = {
   subject: (module: string) => `${module}: deposits are open`,
   lead: (module: string, opensToAllAt: string) =>
     `You said you would like ${module}. The run is open, and those who signed up order first: everybody else can from ${opensToAllAt}.`,
+  leadOpen: (module: string) => `You said you would like ${module}. The run is open, and you can order now.`,
   offerNote: (deposit: string, postedBy: string) =>
     `Deposit ${deposit} now, the rest when your modules are ready. Posted by ${postedBy}.`,
   withTax: 'Prices include tax. Postage to your country is shown before you order.',
