@@ -93,7 +93,7 @@ export function Table<Row>(props: Props<Row>) {
                   ))}
                   {actions ? (
                     <td role="cell" className="py-2 pl-3 text-right print:hidden">
-                      <span className="inline-flex flex-wrap justify-end gap-x-4 gap-y-2">
+                      <span className="bench:[&_a]:inline-flex bench:[&_a]:min-h-14 bench:[&_a]:items-center bench:[&_a]:px-3 inline-flex flex-wrap justify-end gap-x-4 gap-y-2">
                         {actions(row)}
                       </span>
                     </td>
