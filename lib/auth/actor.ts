@@ -5,7 +5,7 @@ import { env } from '@/lib/config/env'
 import type { Actor } from '@/lib/core/policy/can'
 import { Membership, Person, Session, User } from '@/models'
 import { cookieOf, SESSION_COOKIE } from './cookies'
-import { hashToken } from './secrets'
+import { hashToken } from '@/lib/config/secrets'
 
 /** How a session made by the sandbox's sign-in is known. */
 export const SANDBOX_DEVICE = 'sandbox'

@@ -4,7 +4,7 @@ import { QueryTypes } from 'sequelize'
 import { sequelize } from '@/lib/db/sequelize'
 import { clock } from '@/lib/gateways/clock'
 import { Person, Session, User } from '@/models'
-import { hashToken } from './secrets'
+import { hashToken } from '@/lib/config/secrets'
 
 /**
  * next-auth on our own tables. Ours because a mailed link must work once even when two requests use it at the same

@@ -1,6 +1,6 @@
 import { ASKED_COOKIE, cookieOf, setCookie } from '@/lib/auth/cookies'
 import { LINK_SECONDS } from '@/lib/auth/options'
-import { makeToken } from '@/lib/auth/secrets'
+import { makeToken } from '@/lib/config/secrets'
 import { SignInInput } from '@/lib/contracts/sign-in'
 import { route } from '@/lib/http/route'
 import { paths } from '@/lib/paths'

@@ -1,5 +1,5 @@
 import 'server-only'
-import { hashToken } from '@/lib/auth/secrets'
+import { hashToken } from '@/lib/config/secrets'
 import { SignInToken } from '@/models'
 
 /** The address and the path to go on at of a mailed link; null when it is unknown or was used. */

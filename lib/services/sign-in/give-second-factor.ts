@@ -1,7 +1,7 @@
 import 'server-only'
 import { verifySync } from 'otplib'
 import type { Transaction } from 'sequelize'
-import { hashToken, recoveryCodesOf, unseal } from '@/lib/auth/secrets'
+import { hashToken, recoveryCodesOf, unseal } from '@/lib/config/secrets'
 import { refuseFields } from '@/lib/contracts/problem'
 import type { Actor } from '@/lib/core/policy/can'
 import { ok, refuse } from '@/lib/core/result'

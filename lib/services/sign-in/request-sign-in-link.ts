@@ -1,7 +1,7 @@
 import 'server-only'
 import { Op } from 'sequelize'
 import { LINK_SECONDS } from '@/lib/auth/options'
-import { hashToken, makeToken } from '@/lib/auth/secrets'
+import { hashToken, makeToken } from '@/lib/config/secrets'
 import { env } from '@/lib/config/env'
 import { ok, refuse } from '@/lib/core/result'
 import { inTransaction } from '@/lib/db/in-transaction'

@@ -1,6 +1,6 @@
 import 'server-only'
 import { generateSecret, generateURI } from 'otplib'
-import { recoveryCodesOf, seal, unseal } from '@/lib/auth/secrets'
+import { recoveryCodesOf, seal, unseal } from '@/lib/config/secrets'
 import type { Actor } from '@/lib/core/policy/can'
 import { ok, refuse } from '@/lib/core/result'
 import { inTransaction } from '@/lib/db/in-transaction'

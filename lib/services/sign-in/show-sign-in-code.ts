@@ -1,6 +1,6 @@
 import 'server-only'
 import { Op } from 'sequelize'
-import { codeFor, hashToken } from '@/lib/auth/secrets'
+import { codeFor, hashToken } from '@/lib/config/secrets'
 import { ok, refuse } from '@/lib/core/result'
 import { inTransaction } from '@/lib/db/in-transaction'
 import { SignInToken } from '@/models'

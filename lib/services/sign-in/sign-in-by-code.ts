@@ -2,7 +2,7 @@ import 'server-only'
 import { Op } from 'sequelize'
 import { adapter } from '@/lib/auth/adapter'
 import { SESSION_SECONDS } from '@/lib/auth/options'
-import { hashToken, makeToken } from '@/lib/auth/secrets'
+import { hashToken, makeToken } from '@/lib/config/secrets'
 import { ok, refuse } from '@/lib/core/result'
 import { SignInToken } from '@/models'
 

@@ -1,6 +1,6 @@
 import 'server-only'
 import { Op, type Transaction } from 'sequelize'
-import { hashToken } from '@/lib/auth/secrets'
+import { hashToken } from '@/lib/config/secrets'
 import { env } from '@/lib/config/env'
 import { ok, refuse } from '@/lib/core/result'
 import { next, SIGNUP_MOVES } from '@/lib/core/states/signup'

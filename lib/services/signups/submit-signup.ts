@@ -1,6 +1,6 @@
 import 'server-only'
 import { Op, type Transaction } from 'sequelize'
-import { hashToken, makeToken } from '@/lib/auth/secrets'
+import { hashToken, makeToken } from '@/lib/config/secrets'
 import { env } from '@/lib/config/env'
 import { refuseFields } from '@/lib/contracts/problem'
 import type { SignUpInput } from '@/lib/contracts/signups'

@@ -1,6 +1,6 @@
 import 'server-only'
 import { Op } from 'sequelize'
-import { hashToken } from '@/lib/auth/secrets'
+import { hashToken } from '@/lib/config/secrets'
 import { ok, refuse } from '@/lib/core/result'
 import { next, SIGNUP_MOVES } from '@/lib/core/states/signup'
 import { inTransaction } from '@/lib/db/in-transaction'
