@@ -56,6 +56,8 @@ export function cheapestPurchase({
 /** One quote prepared for many needs: how many to buy, and what a quantity costs (set-up included). */
 export type PriceSteps = {
   readonly quantityFor: (needed: number) => number
+  /** The cost of that quantity. */
+  readonly costFor: (needed: number) => number
   readonly costOf: (quantity: number) => number
   readonly unitPriceOf: (quantity: number) => string
 }
@@ -85,6 +87,14 @@ export function priceSteps({ breaks, moq, multiple, setup }: Buy): PriceSteps | 
   const least = Math.max(moq, first.from)
   return {
     costOf,
+    costFor: (needed) => {
+      if (needed === 0) return 0
+      const plain = upTo(needed > least ? needed : least, multiple)
+      const at = stepAt(plain)
+      const cost = steps[at]!.costOf(plain) + setup
+      const better = later[at + 1]
+      return better !== undefined && better.cost <= cost ? better.cost : cost
+    },
     unitPriceOf: (quantity) => (quantity === 0 ? '0' : steps[stepAt(quantity)]!.unitPrice),
     quantityFor: (needed) => {
       if (needed === 0) return 0

@@ -38,21 +38,19 @@ export function quoteChooser(
     // What is cheapest for a smaller need stays so for every need it still covers.
     if (last !== null && needed >= lastNeed && needed <= last.quantity) return last
     let chosen = 0
-    let quantity = 0
     let amount = 0
     let least = Infinity
     for (let i = 0; i < usable.length; i++) {
       const { prices, convert } = usable[i]!
-      const pieces = prices.quantityFor(needed)
-      const cost = convert(prices.costOf(pieces))
+      const cost = convert(prices.costFor(needed))
       if (cost * landed[i]! >= least) continue
       chosen = i
-      quantity = pieces
       amount = cost
       least = cost * landed[i]!
     }
+    const from = usable[chosen]!
     lastNeed = needed
-    last = { from: usable[chosen]!, quantity, amount }
+    last = { from, quantity: from.prices.quantityFor(needed), amount }
     return last
   }
 }

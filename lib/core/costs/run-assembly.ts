@@ -42,10 +42,11 @@ export function assemblyBills(
 function placedByAssembler(plan: CostPlan, offers: readonly OfferColumns[], runs: number) {
   const column = () => new Float64Array(runs)
   const [distinct, byMachine, byHand, starts] = [column(), column(), column(), column()]
+  const used = column()
   const touched = new Set<number>()
   for (const part of plan.parts) {
     const joints = wholeFrom(0, `costRun: ${part.id}.joints`, part.joints) * part.perUnit
-    const used = column()
+    used.fill(0)
     plan.offers.forEach(({ offer, isAssembled }, i) => {
       if (!isAssembled || part.placedBy[offer] !== 'assembler' || !part.neededFor.includes(offer)) return
       touched.add(i)

@@ -15,8 +15,8 @@ export type Buying = {
   readonly stencil: number
   /** Why nothing of it can be priced, if so. */
   readonly unpriced: Unpriced['reason'] | null
-  /** Pieces each run needs, losses not counted. */
-  readonly needs: (offers: readonly OfferColumns[], runs: number) => Column
+  /** Writes into `needs` the pieces each run needs, losses not counted. */
+  readonly fillNeeds: (offers: readonly OfferColumns[], needs: Column) => void
   /** The need with attrition; stock not yet taken off. */
   readonly wanted: (needed: number) => number
   /** How many pieces, or arrays, must be bought once stock is used. */
@@ -76,13 +76,12 @@ function prepare(plan: CostPlan, item: Item, uses: readonly Use[]): Buying {
   return {
     ...{ id, name, kind, stencil, choose },
     unpriced: choose !== null ? null : isQuoted ? 'no_rate' : 'no_quote',
-    needs: (offers, runs) => {
-      const needs = new Float64Array(runs)
+    fillNeeds: (offers, needs) => {
+      needs.fill(0)
       uses.forEach((use, i) => {
         const column = use === null ? undefined : columnOf(offers[i]!, use, choice)
-        if (column !== undefined) for (let k = 0; k < runs; k++) needs[k]! += column[k]! * perUnit
+        if (column !== undefined) for (let k = 0; k < needs.length; k++) needs[k]! += column[k]! * perUnit
       })
-      return needs
     },
     wanted: (needed) => (needed === 0 ? 0 : withAttrition(needed, attrition)),
     missing: (wanted) => (wanted <= onHand ? 0 : Math.ceil((wanted - onHand) / perArray)),

@@ -18,6 +18,7 @@ export type SeriesDetails = {
   readonly unpriced: (found: Unpriced) => void
 }
 
+/** How many pieces a run needs, with attrition, and what a purchase leaves over. */
 export type BoughtCounts = { readonly needed: number; readonly wanted: number; readonly leftover: number }
 
 /** The money of one run, in minor units of the selling currency, and its assembled units put into work. */
@@ -51,8 +52,9 @@ export function runSeries(
   const addGoods = (run: number, supplierAt: number, amount: number) => {
     if (supplierAt >= 0) goods[run]![supplierAt] = Math.max(0, goods[run]![supplierAt]!) + amount
   }
+  const needs = new Float64Array(runs.length)
   for (const buying of buyingsOf(plan)) {
-    const needs = buying.needs(offers, runs.length)
+    buying.fillNeeds(offers, needs)
     for (let k = 0; k < runs.length; k++) {
       const wanted = buying.wanted(needs[k]!)
       const missing = buying.missing(wanted)
@@ -63,10 +65,12 @@ export function runSeries(
       }
       const chosen = buying.choose(missing)
       const stencil = buying.stencil === 0 ? 0 : chosen.from.convert(buying.stencil)
-      ledger(k, buying.kind, buying.name, chosen.amount)
-      if (stencil > 0) ledger(k, 'stencil', buying.name, stencil)
+      costs[k]! += chosen.amount + stencil
       addGoods(k, chosen.from.supplierAt, chosen.amount + stencil)
-      details?.bought(buying, chosen, { needed: needs[k]!, wanted, leftover: chosen.quantity - missing })
+      if (details === undefined) continue
+      if (chosen.amount > 0) details.line(buying.kind, buying.name, chosen.amount)
+      if (stencil > 0) details.line('stencil', buying.name, stencil)
+      details.bought(buying, chosen, { needed: needs[k]!, wanted, leftover: chosen.quantity - missing })
     }
   }
   const assembler = plan.assembly?.supplier ?? ''
