@@ -40,7 +40,7 @@ export const ARROWS: Readonly<Record<string, Part>> = {
   'lib/queries': { may: QUERIES_MAY, packages: ANY },
   'lib/services': { may: SERVICES_MAY, packages: ANY },
   // Signing in is the sign-in library's own tokens and sessions: the one domain that needs lib/auth beneath it.
-  'lib/queries/sign-in': { may: [...QUERIES_MAY, 'lib/queries', 'lib/auth'], packages: ANY },
+  'lib/queries/sign-in': { may: [...QUERIES_MAY, 'lib/queries', 'lib/auth', 'lib/config'], packages: ANY },
   'lib/services/sign-in': { may: [...SERVICES_MAY, 'lib/services', 'lib/auth'], packages: ANY },
   'lib/gateways': { may: ['lib/core', 'lib/config', 'lib/db'], types: ['lib/contracts'], packages: ANY },
   'lib/jobs': { may: ['lib/contracts', 'lib/db'], packages: ANY },

@@ -65,7 +65,7 @@ export async function inviteSignUp(
       minimum: run.minimum,
       maximum: run.maximum,
       decideBy: run.decideByOn,
-      opensToAllAt: (run.opensToAllAt ?? now).toISOString(),
+      opensToAllAt: run.opensToAllAt && run.opensToAllAt > now ? run.opensToAllAt.toISOString() : null,
       takeBackUrl: `${base}${paths.takeBack(takeBackToken(signUp.id))}`,
     },
     now,
