@@ -1,5 +1,6 @@
 import { minor, type Day, type Minor } from '@/lib/core/brand'
 import { wholeFrom } from '@/lib/core/stats/argument'
+import { isDay } from '@/lib/core/time/day'
 
 /** Money in the bank on one day, after everything of that day. */
 export type CashDay = { readonly day: Day; readonly balance: Minor }
@@ -19,7 +20,7 @@ export function cashLow(events: readonly { readonly day: Day; readonly amount: n
 } {
   const changes = new Map<Day, number>()
   for (const { day, amount } of events) {
-    assertDay(day)
+    if (!isDay(day)) throw new RangeError(`cashLow: day must be a calendar day 'YYYY-MM-DD', got ${day}`)
     changes.set(day, (changes.get(day) ?? 0) + minor(amount))
   }
   let balance = 0
@@ -30,13 +31,6 @@ export function cashLow(events: readonly { readonly day: Day; readonly amount: n
   const [first, ...others] = series
   const lowest = others.reduce((low, at) => (at.balance < low!.balance ? at : low), first)
   return { low: minor(lowest?.balance ?? 0), day: lowest?.day ?? null, series }
-}
-
-function assertDay(day: string): void {
-  const time = /^\d{4}-\d{2}-\d{2}$/.test(day) ? Date.parse(`${day}T00:00:00Z`) : NaN
-  if (Number.isNaN(time) || new Date(time).toISOString().slice(0, 10) !== day) {
-    throw new RangeError(`cashLow: day must be a calendar day 'YYYY-MM-DD', got ${day}`)
-  }
 }
 
 /**

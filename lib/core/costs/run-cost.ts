@@ -9,7 +9,11 @@ export type RunCost = {
   readonly lines: readonly { readonly kind: LineKind; readonly name: string; readonly amount: Minor }[]
   /** Assembled units to put into work, of all offers. */
   readonly starts: number
-  /** What buyers pay, postage included, less sales tax. */
+  /** Orders, everything buyers pay for them (postage and tax included), and the part of it that comes as deposits. */
+  readonly orders: number
+  readonly paid: Minor
+  readonly deposits: Minor
+  /** `paid` less the sales tax in it. */
   readonly revenue: Minor
   readonly cost: Minor
   readonly profit: Minor
@@ -37,13 +41,13 @@ export function costRun(plan: CostPlan, quantities: Readonly<Record<string, numb
     bought: () => {},
     unpriced: (found) => unpriced.push(found),
   })
-  const { starts, revenue, cost } = sums!
+  const { starts, orders, paid, deposits, revenue, cost } = sums!
   return {
-    lines,
-    starts,
+    ...{ lines, unpriced, starts, orders },
+    paid: minor(paid),
+    deposits: minor(deposits),
     revenue: minor(revenue),
     cost: minor(cost),
     profit: minor(revenue - cost),
-    unpriced,
   }
 }

@@ -5,7 +5,7 @@ import { assemblyBills } from '@/lib/core/costs/run-assembly'
 import { buyingsOf, type Buying } from '@/lib/core/costs/run-buying'
 import { paymentFees } from '@/lib/core/costs/run-fees'
 import type { CostLedger, LineKind, Unpriced } from '@/lib/core/costs/run-line'
-import { takings } from '@/lib/core/costs/run-revenue'
+import { takings, type Takings } from '@/lib/core/costs/run-revenue'
 import { offerColumns } from '@/lib/core/costs/run-split'
 import { supplierCosts, type Goods } from '@/lib/core/costs/run-suppliers'
 import { workAndPacking } from '@/lib/core/costs/run-work'
@@ -22,7 +22,7 @@ export type SeriesDetails = {
 export type BoughtCounts = { readonly needed: number; readonly wanted: number; readonly leftover: number }
 
 /** The money of one run, in minor units of the selling currency, and its assembled units put into work. */
-export type RunSums = { readonly starts: number; readonly revenue: number; readonly cost: number }
+export type RunSums = Takings & { readonly starts: number; readonly cost: number }
 
 /**
  * Costs a series of runs of one plan: one thing to buy after the other through all runs, which is what makes a curve
@@ -91,11 +91,7 @@ export function runSeries(
     const taken = takingsOf(offers, k)
     work(k, offers, taken.orders)
     fees(k, taken)
-    return {
-      starts: offers.reduce((sum, { starts }) => sum + starts[k]!, 0),
-      revenue: taken.revenue,
-      cost: costs[k]!,
-    }
+    return { ...taken, starts: offers.reduce((sum, { starts }) => sum + starts[k]!, 0), cost: costs[k]! }
   })
 }
 

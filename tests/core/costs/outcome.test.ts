@@ -3,6 +3,7 @@ import fc from 'fast-check'
 import { describe, expect, test } from 'vitest'
 import { runOutcome } from '@/lib/core/costs/outcome'
 import { forecastUnits } from '@/lib/core/demand/forecast'
+import { bestPrice } from '@/lib/core/demand/price'
 import type { Curve } from '@/lib/core/costs/curve'
 
 const curveOf = (profits: readonly number[]): Curve =>
@@ -108,6 +109,20 @@ describe('runOutcome', () => {
       expect(outcome.chanceOfLoss).toBeCloseTo(other.loss, 10)
       expect(outcome.chanceToGo).toBe(forecast.atLeast(minimum))
     }
+  })
+
+  test('is what bestPrice expects at that price once everyone pays', () => {
+    const curve = curveOf(Array.from({ length: 30 }, (_, i) => 70 * (i + 1) - 900))
+    const members = Array.from({ length: 20 }, (_, i) => ({ quantity: 1 + (i % 3), topPrice: 200 }))
+    const rest = { minimum: 12, maximum: 26, callOffCost: (units: number) => 40 + units }
+    const groups = [{ alpha: 5, beta: 4, members }]
+    const { frontier } = bestPrice({ ladder: [200], groups, curveAt: () => curve, ...rest })
+    const forecast = forecastUnits([
+      { alpha: 5, beta: 4, quantities: members.map(({ quantity }) => quantity) },
+    ])
+    const outcome = runOutcome({ forecast, curve, paying: { alpha: 1e6, beta: 1e-6 }, ...rest })
+    expect(outcome.expectedProfit).toBeCloseTo(frontier[0]!.expectedProfit, 4)
+    expect(outcome.chanceToGo).toBeCloseTo(frontier[0]!.chanceToGo, 12)
   })
 
   test('quantiles rise with the chance and cross 0 at the chance of a loss', () => {

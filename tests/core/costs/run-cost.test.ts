@@ -156,6 +156,7 @@ describe('costRun', () => {
     // 2,000.00 holds 319.33 at 19 %, postage of 14 × 6.00 = 84.00 holds 13.41.
     expect(run.revenue).toBe(200_000 - 31_933 + 8400 - 1341)
     expect(run.profit).toBe(run.revenue - run.cost)
+    expect(run).toMatchObject({ orders: 14, paid: 208_400, deposits: 40_000 })
   })
 
   test('no registration, no tax; prices without tax leave the maker the whole price but cost fees on it', () => {
@@ -363,12 +364,8 @@ describe('callOffCost', () => {
 
 test('emptyPlan costs nothing, brings nothing and wants a currency', () => {
   expect(costRun(emptyPlan('JPY'), {})).toEqual({
-    lines: [],
-    starts: 0,
-    revenue: 0,
-    cost: 0,
-    profit: 0,
-    unpriced: [],
+    ...{ lines: [], unpriced: [], starts: 0, orders: 0 },
+    ...{ paid: 0, deposits: 0, revenue: 0, cost: 0, profit: 0 },
   })
   expect(() => emptyPlan('XXX')).toThrow(RangeError)
 })
