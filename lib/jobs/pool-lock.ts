@@ -14,7 +14,7 @@ const EVERY_MS = 1000
 export class PoolLock {
   private suspects = new Set<string>()
   private timer: NodeJS.Timeout | undefined
-  private looking: Promise<void> = Promise.resolve()
+  private looking: Promise<unknown> = Promise.resolve()
 
   private constructor(
     private readonly client: Client,

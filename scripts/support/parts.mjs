@@ -84,7 +84,7 @@ function freshReport(name) {
 }
 
 function tail(output) {
-  const lines = output.trim().split('\n')
+  const lines = output.trim().split('\n').filter((line) => !/^\s*✓/.test(line))
   return lines.length > 150
     ? `… ${lines.length - 150} lines before\n${lines.slice(-150).join('\n')}`
     : lines.join('\n')

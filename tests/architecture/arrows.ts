@@ -7,6 +7,7 @@ const SERVER_PACKAGES =
 const NO_SERVER_PACKAGE = [new RegExp(`^(?!${SERVER_PACKAGES.source.slice(1)})`)]
 const ANY = [/./]
 const QUERIES_MAY = ['lib/core', 'lib/contracts', 'models', 'lib/db']
+/** `lib/auth/secrets` makes and hashes the secrets of mailed links, whoever sends them. */
 const SERVICES_MAY = [
   ...QUERIES_MAY,
   'lib/queries',
@@ -15,6 +16,7 @@ const SERVICES_MAY = [
   'lib/config',
   'lib/paths',
   'lib/messages',
+  'lib/auth/secrets',
 ]
 
 /**

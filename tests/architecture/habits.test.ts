@@ -44,7 +44,7 @@ test('no test mocks a file of ours or can be skipped', () => {
 
 test('files are named in kebab-case after what they do, and there is one barrel', () => {
   const names = sources.filter(({ file }) => !file.startsWith('app/') && !file.startsWith('migrations/'))
-  const odd = names.filter(({ file }) => !/^[a-z0-9-]+(\.(test|config|d))?\.tsx?$/.test(basename(file)))
+  const odd = names.filter(({ file }) => !/^[a-z0-9-]+(\.(test|spec|config|d))?\.tsx?$/.test(basename(file)))
   expect(filesOf(odd).filter((file) => !basename(file).startsWith('_'))).toEqual([])
   const drawers = names.filter(({ file }) =>
     /\/((utils|helpers|common|misc)(\.tsx?|\/)|(process|handle|manage)-)/.test(file),
