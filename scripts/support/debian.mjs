@@ -20,7 +20,7 @@ export async function installPackages(packages, reason) {
   }
   say(`${reason} Installing ${packages.join(', ')} from Debian's packages …`)
   if (sparesCluster) refuseSystemCluster()
-  const env = { ...process.env, DEBIAN_FRONTEND: 'noninteractive' }
+  const env = { ...process.env, DEBIAN_FRONTEND: 'noninteractive', UCF_FORCE_CONFFOLD: '1' }
   const wait = ['-o', 'DPkg::Lock::Timeout=300', '-o', 'Dpkg::Options::=--force-confold']
   await run('apt-get', [...wait, 'update'], { env, allowFailure: true })
   await run('apt-get', [...wait, ...command.split(' ').slice(1)], { env })

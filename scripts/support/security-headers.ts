@@ -1,6 +1,6 @@
 import type { IncomingMessage, ServerResponse } from 'node:http'
 import { env } from '@/lib/config/env'
-import { BARE_POLICY } from '@/lib/http/content-policy.mjs'
+import { BARE_POLICY, contentPolicy } from '@/lib/http/content-policy.mjs'
 
 const ALWAYS = {
   'X-Content-Type-Options': 'nosniff',
@@ -31,9 +31,16 @@ export function setSecurityHeaders(request: IncomingMessage, response: ServerRes
 
 /** A page that is kept brings its own policy after the proxy's; the last one is made from the page itself. */
 function settle(response: ServerResponse): void {
-  const policies = [response.getHeader('content-security-policy') ?? BARE_POLICY].flat()
+  const policies = [response.getHeader('content-security-policy') ?? policyWithoutPage(response)].flat()
   response.setHeader('Content-Security-Policy', String(policies.at(-1)))
   if (KEPT_ELSEWHERE.test(String(response.getHeader('cache-control') ?? ''))) {
     response.setHeader('Cache-Control', 'public, max-age=0, must-revalidate')
   }
+}
+
+/** While developing no page is kept, so those the proxy leaves alone have no policy of their own. */
+function policyWithoutPage(response: ServerResponse): string {
+  const isPage = String(response.getHeader('content-type') ?? '').startsWith('text/html')
+  if (env().NODE_ENV !== 'development' || !isPage) return BARE_POLICY
+  return contentPolicy({ scripts: ["'unsafe-inline'"], cardPageUrl: env().CARD_PAGE_URL, isDev: true })
 }
