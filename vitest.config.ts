@@ -22,6 +22,7 @@ export default defineConfig({
           name: 'unit',
           // Pure code: files share their modules, which saves loading them seventy times.
           isolate: false,
+          pool: 'threads',
           include: ['tests/{core,architecture,contracts,messages,emails,scripts}/**/*.test.{ts,tsx}'],
           environment: 'node',
         },
