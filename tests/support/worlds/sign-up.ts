@@ -1,7 +1,9 @@
-import { createHash } from 'node:crypto'
+import { createHash, randomUUID } from 'node:crypto'
 import type { CreationAttributes } from 'sequelize'
+import { hashToken, makeToken } from '@/lib/config/secrets'
+import { takeBackToken } from '@/lib/services/_steps/take-back-token'
 import { type Offer, type Person, SignUp } from '@/models'
-import { hoursAfter, NOW, serial } from './base'
+import { hoursAfter, NOW } from './base'
 import { makePerson } from './person'
 
 export const hashOf = (token: string) => createHash('sha256').update(token).digest('hex')
@@ -12,9 +14,11 @@ export async function makeSignUp(
   over: Partial<CreationAttributes<SignUp>> & { person?: Person } = {},
 ) {
   const { person = await makePerson(), ...columns } = over
-  const tokens = { confirm: `confirm-${serial()}`, takeBack: `take-back-${serial()}` }
+  const id = columns.id ?? randomUUID()
+  const tokens = { confirm: makeToken(), takeBack: takeBackToken(id) }
   const isConfirmed = (columns.state ?? 'confirmed') !== 'unconfirmed'
   const signup = await SignUp.create({
+    id,
     workshopId: offer.workshopId,
     moduleId: offer.moduleId,
     offerId: offer.id,
@@ -25,8 +29,8 @@ export async function makeSignUp(
     shownPriceMinor: offer.priceMinor,
     currency: 'EUR',
     state: 'confirmed',
-    confirmTokenHash: isConfirmed ? null : hashOf(tokens.confirm),
-    takeBackTokenHash: isConfirmed ? hashOf(tokens.takeBack) : null,
+    confirmTokenHash: isConfirmed ? null : hashToken(tokens.confirm),
+    takeBackTokenHash: isConfirmed ? hashToken(tokens.takeBack) : null,
     submittedAt: hoursAfter(NOW, -72),
     confirmExpiresAt: hoursAfter(NOW, -72 + 14 * 24),
     confirmedAt: isConfirmed ? hoursAfter(NOW, -71) : null,
