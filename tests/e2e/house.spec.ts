@@ -29,7 +29,8 @@ test('a request id from in front is kept when it is one, else replaced', async (
   expect(replaced.headers()['x-request-id']).toMatch(/^[0-9a-f-]{36}$/)
 })
 
-test('a page made per request and a page kept both come to life', async ({ page }) => {
+test('a page made per request and a page kept both come to life', async ({ page, watch }) => {
+  watch.expect(404, '/nowhere')
   for (const path of ['/signin', '/nowhere']) {
     await page.goto(path)
     await expect(page.locator('main, h1').first()).toBeVisible()

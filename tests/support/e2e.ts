@@ -1,21 +1,35 @@
-import { expect, test as base } from '@playwright/test'
+import { expect, test as base, type BrowserContext } from '@playwright/test'
 import { startTestApplication, type TestApplication } from '../../scripts/support/test-application.mjs'
+import { Sandbox } from './browser/sandbox'
+import { Watch } from './browser/watch'
 
 export { expect }
 
-/** The browser's line for an answer the journey itself looks at: a refusal is no defect of the page. */
-const REFUSAL = /Failed to load resource: the server responded with a status of (400|401|403|404|409|422|429)/
+type PerTest = {
+  /** Fails the test for what its pages must never do; `watch.expect` names a refusal the journey wants. */
+  watch: Watch
+  sandbox: Sandbox
+  /** A browser of its own for each person of a journey, watched as the first. */
+  browserOf: (email?: string, options?: { javaScriptEnabled?: boolean }) => Promise<BrowserContext>
+}
+type PerWorker = {
+  /** What the application begins with: nothing at all, or the demo. */
+  world: 'empty' | 'demo'
+  application: TestApplication
+}
 
 /**
- * The tests of the screens. Each worker has an application of its own (the sandbox's clock moves for everybody in
- * it); every page of the context fails its test on a console error, an uncaught error or a policy violation.
+ * The tests of the screens. Each worker has an application of its own (the sandbox's clock moves for everybody in it),
+ * the fake provider doubling, losing and delaying what it sends.
  */
-export const test = base.extend<{ watched: undefined }, { application: TestApplication }>({
+export const test = base.extend<PerTest, PerWorker>({
+  world: ['empty', { scope: 'worker', option: true }],
   application: [
-    async ({}, use, { workerIndex }) => {
+    async ({ world }, use, { workerIndex }) => {
+      const template = world === 'demo' ? process.env.E2E_DEMO_TEMPLATE : process.env.E2E_TEMPLATE
       const application = await startTestApplication({
         serverUrl: process.env.E2E_SERVER_URL ?? '',
-        template: process.env.E2E_TEMPLATE ?? '',
+        template: template ?? '',
         folder: process.env.E2E_FOLDER ?? '.data/test',
         name: `e2e_${process.pid}_${workerIndex}`,
       })
@@ -25,16 +39,28 @@ export const test = base.extend<{ watched: undefined }, { application: TestAppli
     { scope: 'worker', timeout: 120_000 },
   ],
   baseURL: async ({ application }, use) => use(application.baseUrl),
-  watched: [
-    async ({ context }, use) => {
-      const complaints: string[] = []
-      context.on('console', (message) => {
-        if (message.type() === 'error' && !REFUSAL.test(message.text())) complaints.push(message.text())
-      })
-      context.on('weberror', (error) => complaints.push(String(error.error())))
-      await use(undefined)
-      expect(complaints, 'the console of the pages').toEqual([])
+  watch: [
+    async ({ context, application }, use) => {
+      const watch = new Watch(originsOf(application))
+      watch.follow(context)
+      await use(watch)
+      expect(watch.complaints, 'what the pages complained of').toEqual([])
     },
     { auto: true },
   ],
+  sandbox: async ({ request, application }, use) => use(new Sandbox(request, application.baseUrl)),
+  browserOf: async ({ browser, application, sandbox, watch }, use) => {
+    const opened: BrowserContext[] = []
+    await use(async (email, options = {}) => {
+      const context = await browser.newContext({ baseURL: application.baseUrl, ...options })
+      watch.follow(context)
+      opened.push(context)
+      if (email) await sandbox.signIn(context, email)
+      return context
+    })
+    for (const context of opened) await context.close()
+  },
 })
+
+const originsOf = ({ baseUrl, env }: TestApplication) =>
+  [baseUrl, env.CARD_PAGE_URL].filter((url) => url !== undefined).map((url) => new URL(url).origin)

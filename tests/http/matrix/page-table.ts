@@ -1,0 +1,16 @@
+import type { Row } from './roles'
+
+/**
+ * The pages and the sandbox's calls, asked of the running application: visitor, customer, owner, bench, packer, host,
+ * owner of another workshop. 307 leads to the sign-in page; what somebody may not see does not exist (404).
+ */
+export const PAGE_TABLE: Readonly<Record<string, Row>> = {
+  'PAGE /account/code': '307 200 200 200 200 200 200',
+  'PAGE /admin/[workshop]/payment-account': '307 404 200 404 404 404 404',
+  'PAGE /host': '307 404 404 404 404 200 404',
+  'PAGE /sandbox/pieces': '200 200 200 200 200 200 200',
+  'PAGE /signin': '200 200 200 200 200 200 200',
+  'PAGE /signin/link/[token]': '200 200 200 200 200 200 200',
+  'PAGE /signin/sent': '200 200 200 200 200 200 200',
+  'PAGE /start': '307 200 200 200 200 200 200',
+}
