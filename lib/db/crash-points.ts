@@ -3,6 +3,7 @@
  * reaches makes the fault tests fail.
  */
 export const CRASH_POINTS = [
+  'order_placed',
   'attempt_requested',
   'provider_answered',
   'attempt_sent',
@@ -10,8 +11,10 @@ export const CRASH_POINTS = [
   'event_before_apply',
   'event_before_commit',
   'event_applied',
+  'hold_session_ended',
   'refund_requested',
   'refund_provider_answered',
+  'refund_before_commit',
   'refund_sent',
   'mail_claimed',
   'mail_accepted',

@@ -1,5 +1,6 @@
 import 'server-only'
 import type { DueKind } from '@/lib/jobs/due-kinds'
+import { attemptLookUp, holdEnded, refundLookUp, refundRetry } from './due-money'
 import { deleteUnconfirmedSignUp } from '@/lib/services/signups/delete-unconfirmed-signup'
 
 export type DueItem = { kind: DueKind; subjectId: string; workshopId: string | null; dueAt: Date }
@@ -12,4 +13,8 @@ export type DueHandler = (item: DueItem, now: Date) => Promise<void>
 
 export const DUE_HANDLERS: { readonly [K in DueKind]: DueHandler } = {
   signup_unconfirmed: async (item) => void (await deleteUnconfirmedSignUp({ signUpId: item.subjectId })),
+  hold_ended: holdEnded,
+  attempt_look_up: attemptLookUp,
+  refund_look_up: refundLookUp,
+  refund_retry: refundRetry,
 }

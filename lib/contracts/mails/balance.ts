@@ -22,7 +22,7 @@ export const balanceMails = {
     invoiceUrl: link.nullable(),
     promises: z.array(offerPromise).min(1),
   }),
-  /** Subject: the payment attempt. */
+  /** Subject: the payment attempt, or the order where no card was saved to be tried. */
   card_needs_you: z.strictObject({
     ...balance,
     cardEnding,

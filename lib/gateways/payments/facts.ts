@@ -151,6 +151,11 @@ export function disputeFacts(dispute: Stripe.Dispute): DisputeFacts {
     currency,
     payment: idOf(dispute.payment_intent),
     charge: idOf(dispute.charge) ?? '',
+    isWithheld: dispute.balance_transactions.length > 0,
+    fee: fromProvider(
+      dispute.balance_transactions.reduce((sum, booked) => sum + booked.fee, 0),
+      currency,
+    ),
     answerBy: dueBy === null ? null : fromSeconds(dueBy),
     createdAt: fromSeconds(dispute.created),
   }

@@ -153,6 +153,10 @@ export type DisputeFacts = {
   readonly currency: string
   readonly payment: string | null
   readonly charge: string
+  /** True once the provider has withheld the amount; an inquiry alone withholds nothing. */
+  readonly isWithheld: boolean
+  /** What the provider charges for it, so far. */
+  readonly fee: Minor
   readonly answerBy: Date | null
   readonly createdAt: Date
 }

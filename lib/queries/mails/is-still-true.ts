@@ -53,10 +53,8 @@ const QUESTIONS: { readonly [K in MailKind]?: Question } = {
   balance_reminder: orderIs('balance_due'),
   card_needs_you: async ({ subjectId }, transaction) => {
     const attempt = await PaymentAttempt.findByPk(subjectId, { attributes: ['orderId'], transaction })
-    return (
-      attempt !== null &&
-      orderIs('balance_due')({ subjectId: attempt.orderId, now: new Date(0) }, transaction)
-    )
+    const orderId = attempt?.orderId ?? subjectId
+    return orderIs('balance_due')({ subjectId: orderId, now: new Date(0) }, transaction)
   },
   delay_notice: noticeIsOpen,
   change_notice: noticeIsOpen,
