@@ -26,6 +26,18 @@ async function advance(hours: number): Promise<Date> {
   return now()
 }
 
+/**
+ * Begins business time at an instant of the past, so that a demo can act through its own history; sandbox only, and
+ * only while nobody is known yet: the database refuses it later.
+ */
+async function beginAt(instant: Date): Promise<void> {
+  if (!env().SANDBOX) throw new Error('The clock moves by hand in the sandbox only.')
+  await sequelize.query('update clock_offset set offset_ms = :ms', {
+    replacements: { ms: Math.round(instant.getTime() - Date.now()) },
+  })
+  seen = undefined
+}
+
 async function offsetMs(): Promise<number> {
   // A test moves the clock and asks at once; a second's delay would make it flaky.
   if (env().NODE_ENV !== 'test' && seen && Date.now() - seen.at < FRESH_FOR_MS) return seen.offsetMs
@@ -36,4 +48,4 @@ async function offsetMs(): Promise<number> {
   return seen.offsetMs
 }
 
-export const clock = { now, advance }
+export const clock = { now, advance, beginAt }
