@@ -33,7 +33,7 @@ export async function runTool(tool, args, env = {}) {
   const [command, script] = TOOLS[tool]
   const { code, output } = await run(command, [script, ...args], {
     allowFailure: true,
-    env: { ...process.env, ...env },
+    env: { ...process.env, NO_COLOR: '1', FORCE_COLOR: '0', ...env },
   })
   return { passed: code === 0 ? 1 : 0, failed: code === 0 ? 0 : 1, output }
 }
@@ -49,7 +49,7 @@ export async function runVitest(projects, env = {}) {
   const args = [
     'run',
     ...projects.flatMap((name) => ['--project', name]),
-    '--reporter=dot',
+    '--reporter=default',
     '--reporter=json',
   ]
   const { failed, output } = await runTool('vitest', [...args, `--outputFile.json=${file}`], env)
