@@ -1,3 +1,4 @@
+import 'server-only'
 import { createHash } from 'node:crypto'
 import type { AddressInput } from '@/lib/contracts/address'
 
