@@ -26,6 +26,8 @@ export const RunInput = z
     decideBy: day(),
     headStartHours: wholeNumber(0, 336).optional(),
     balanceWhen,
+    /** How deposits are kept should decide-by lie beyond the provider's limit; shown to buyers. */
+    holdingPlan: z.preprocess((typed) => (typed === '' ? undefined : typed), paragraphs(2000).optional()),
     offers: z
       .array(RunOfferInput, { error: 'Enter at least one offer.' })
       .min(1, 'Enter at least one offer.')
@@ -71,7 +73,14 @@ export type LockInput = z.infer<typeof LockInput>
 export const CallOffInput = z.object({ reason: paragraphs(1000, 3, 'Say why; buyers will read it.') })
 export type CallOffInput = z.infer<typeof CallOffInput>
 
+export const LowerMinimumInput = z.object({ minimum: wholeNumber(1, 10_000) })
+export type LowerMinimumInput = z.infer<typeof LowerMinimumInput>
+
+/** The words typed on a check-answers page; a program that calls the API sends none. */
+export const Confirmed = z.object({ typed: z.string().max(200).optional() })
+
 export type BulkAnswer = { bulk: string }
+/** `done` and `failed` are apart; what is in neither still waits. */
 export type BulkProgress = { total: number; done: number; failed: number }
 
 /** `low` and `high` bound the 80 % range of units. */

@@ -11,6 +11,8 @@ export const DUE_KINDS = [
   'balance_charge',
   'balance_reminder',
   'order_lapse',
+  'decide_by_passed',
+  'run_page',
 ] as const
 
 export type DueKind = (typeof DUE_KINDS)[number]

@@ -9,6 +9,7 @@ export const JOBS = {
   due: z.object({}),
   evict_pages: z.object({ paths: z.array(z.string()) }),
   offer_freed_place: z.object({ runId: z.uuid() }),
+  run_bulk: z.object({ bulkId: z.uuid() }),
   send_mail: z.object({ mailId: z.uuid() }),
   send_refund: z.object({ refundId: z.uuid() }),
   settle_attempt: z.object({ attemptId: z.uuid() }),

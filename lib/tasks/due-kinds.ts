@@ -1,6 +1,7 @@
 import 'server-only'
 import type { DueKind } from '@/lib/jobs/due-kinds'
 import { attemptLookUp, holdEnded, refundLookUp, refundRetry } from './due-money'
+import { balanceCharge, balanceReminder, decideByPassed, orderLapse, runPage } from './due-runs'
 import { deleteUnconfirmedSignUp } from '@/lib/services/signups/delete-unconfirmed-signup'
 
 export type DueItem = { kind: DueKind; subjectId: string; workshopId: string | null; dueAt: Date }
@@ -17,4 +18,9 @@ export const DUE_HANDLERS: { readonly [K in DueKind]: DueHandler } = {
   attempt_look_up: attemptLookUp,
   refund_look_up: refundLookUp,
   refund_retry: refundRetry,
+  balance_charge: balanceCharge,
+  balance_reminder: balanceReminder,
+  order_lapse: orderLapse,
+  decide_by_passed: decideByPassed,
+  run_page: runPage,
 }

@@ -4,6 +4,7 @@ import { applyProviderEventJob } from './apply-provider-event'
 import { due } from './due'
 import { evictPages } from './evict-pages'
 import { offerFreedPlaceJob } from './offer-freed-place'
+import { runBulk } from './run-bulk'
 import { sendMail } from './send-mail'
 import { sendRefundJob } from './send-refund'
 import { settleAttemptJob } from './settle-attempt'
@@ -14,6 +15,7 @@ export const TASKS: Tasks = {
   due,
   evict_pages: evictPages,
   offer_freed_place: offerFreedPlaceJob,
+  run_bulk: runBulk,
   send_mail: sendMail,
   send_refund: sendRefundJob,
   settle_attempt: settleAttemptJob,

@@ -1,0 +1,94 @@
+import 'server-only'
+import type { Transaction } from 'sequelize'
+import { ok, refuse, type Result } from '@/lib/core/result'
+import type { OrderState } from '@/lib/core/states/order'
+import { dropDue } from '@/lib/jobs/set-due'
+import { dropBalanceDues } from '@/lib/services/_steps/balance-dues'
+import { discardParcels } from '@/lib/services/_steps/discard-parcels'
+import { lockOrder } from '@/lib/services/_steps/lock-order'
+import { LIVE } from '@/lib/services/_steps/move-attempt'
+import { moveOrder } from '@/lib/services/_steps/move-order'
+import { orderMailFacts } from '@/lib/services/_steps/order-mail-facts'
+import { queueMail } from '@/lib/services/_steps/queue-mail'
+import { refundOrder, repaidOf } from '@/lib/services/_steps/refund-order'
+import { releasePlace } from '@/lib/services/_steps/release-place'
+import { type Order, PaymentAttempt } from '@/models'
+import type { CallOffCause } from '@/models/words'
+
+/** States in which an order of a run that is called off is still to be ended. */
+export const CALLED_OFF_FROM: readonly OrderState[] = [
+  'waiting',
+  'awaiting_deposit',
+  'reserved',
+  'balance_due',
+  'paid',
+  'packed',
+]
+
+type Given = { orderId: string; cause: CallOffCause; reason: string; now: Date }
+
+/**
+ * Ends one order of a run that is called off: cancelled, everything captured on its way back, the buyer told. Open
+ * payments must have been ended at the provider first.
+ * Refuses: not_found · payment_in_flight (a payment could still be captured: come again). Locks: run, order, attempts.
+ * Writes: order, parcels, counts, refunds, due rows, mail. Repeat: safe; an order that has ended is left alone.
+ */
+export async function callOffOrder(
+  tx: Transaction,
+  given: Given,
+): Promise<Result<true, 'not_found' | 'payment_in_flight' | 'not_allowed'>> {
+  const { cause, reason, now } = given
+  const locked = await lockOrder(tx, given.orderId)
+  if (!locked) return refuse('not_found')
+  const { order } = locked
+  if (!CALLED_OFF_FROM.includes(order.state)) return ok(true)
+  const live = await PaymentAttempt.count({
+    where: { orderId: order.id, state: [...LIVE] },
+    transaction: tx,
+  })
+  if (live > 0) return refuse('payment_in_flight')
+
+  const hadPlace = order.state !== 'waiting'
+  const change = { cancelCause: 'run_called_off' as const, cancelReason: reason }
+  const moved = await moveOrder(tx, order, 'run_called_off', { now, change })
+  if (!moved.ok) return moved
+  await discardParcels(tx, order, now)
+  if (hadPlace) await releasePlace(tx, order)
+  await dropDue(tx, 'hold_ended', order.id)
+  await dropBalanceDues(tx, order.id)
+  const owedMinor = await leftOf(tx, order)
+  await refundOrder(tx, { order, why: 'run_called_off', now, reason: cause === 'owner' ? reason : null })
+  await tell(tx, order, given, owedMinor)
+  return ok(true)
+}
+
+/** What was taken and has not gone back; of a disputed order it goes back once the bank has decided. */
+async function leftOf(tx: Transaction, order: Order): Promise<number> {
+  const captured = await PaymentAttempt.findAll({
+    where: { orderId: order.id, state: 'captured' },
+    transaction: tx,
+  })
+  let left = 0
+  for (const attempt of captured) left += attempt.amountMinor - (await repaidOf(tx, attempt))
+  return left
+}
+
+async function tell(tx: Transaction, order: Order, given: Given, refundMinor: number): Promise<void> {
+  // What was paid outside is settled outside.
+  if (order.kind === 'manual') return
+  const { ofOrder } = await orderMailFacts(tx, order)
+  await queueMail(tx, {
+    kind: 'run_called_off',
+    workshopId: order.workshopId,
+    personId: order.personId,
+    subjectId: order.id,
+    props: {
+      ...ofOrder,
+      currency: order.currency,
+      cause: given.cause,
+      reason: given.cause === 'owner' ? given.reason : null,
+      refundMinor,
+    },
+    now: given.now,
+  })
+}
