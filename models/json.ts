@@ -1,17 +1,7 @@
 import type { Minor } from '@/lib/core/brand'
 import type { OfferKind } from './words'
 
-/** Something on a front panel; millimetres from its top left corner to the centre. */
-export type FrontPanelControl = {
-  kind: 'knob' | 'jack' | 'switch' | 'button' | 'light' | 'slider' | 'display'
-  label: string
-  xMm: number
-  yMm: number
-  /** Diameter, or the longer side; millimetres. */
-  sizeMm: number
-}
-
-export type SpecificationLine = { name: string; value: string }
+export type { FrontPanelControl, SpecificationLine } from '@/lib/contracts/front-panel'
 
 /** Price of a weight: `upTo` grams, inclusive; tax as the workshop's prices. */
 export type PostageBand = { upTo: number; priceMinor: Minor }

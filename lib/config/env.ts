@@ -114,3 +114,6 @@ function given(): Record<string, string> {
   const filled = Object.entries(process.env).filter((entry): entry is [string, string] => Boolean(entry[1]))
   return Object.fromEntries(filled)
 }
+
+/** Whether the framework is building: there are no settings and there is no database then. */
+export const isBuilding = (): boolean => process.env.NEXT_PHASE === 'phase-production-build'

@@ -29,3 +29,18 @@ export type TokenInput = z.infer<typeof TokenInput>
 
 /** 'confirmed' again for a link used twice; 'taken_back' after take-back. */
 export type SignUpState = { state: 'confirmed' | 'taken_back' }
+
+/** What the page of a mailed link shows before its button. */
+export type LinkedSignUp = {
+  state: 'unconfirmed' | 'confirmed' | 'superseded' | 'taken_back'
+  /** Not confirmed in time. */
+  isExpired: boolean
+  workshop: { slug: string; name: string }
+  module: { slug: string; name: string }
+  offer: 'boards' | 'kit' | 'built'
+  quantity: number
+  country: string
+  certainty: Certainty
+}
+
+export const UnsubscribeParams = z.object({ token: z.string().regex(/^[A-Za-z0-9_-]{16,100}$/) })

@@ -14,6 +14,7 @@ const STATUS: Record<string, number> = {
   invalid: 422,
   other_body_for_key: 422,
   token_unknown: 404,
+  unknown_link: 404,
   token_expired: 409,
   too_many: 429,
   busy: 503,

@@ -3,9 +3,18 @@ import { money } from './money'
 import { post } from './post'
 import { runs } from './runs'
 import { signIn } from './sign-in'
+import { signups } from './signups'
 import { workshops } from './workshops'
 
-const sentences: Record<string, string> = { ...general, ...signIn, ...workshops, ...runs, ...money, ...post }
+const sentences: Record<string, string> = {
+  ...general,
+  ...signIn,
+  ...signups,
+  ...workshops,
+  ...runs,
+  ...money,
+  ...post,
+}
 
 /** The sentence a person reads for a refusal; each says what to do. Services' reasons stand in these files by domain. */
 export function reasonWords(reason: string): string {
