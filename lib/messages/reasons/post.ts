@@ -1,2 +1,17 @@
-/** Refusals of the services under post. */
-export const post: Record<string, string> = {}
+/** Refusals of the services under packing; each says what to do. */
+export const post: Record<string, string> = {
+  order_cancelled:
+    'This order has been cancelled. Take the parcel apart and put the things back on the shelf.',
+  order_not_paid: 'This order is not paid. Leave it; it comes back into the queue once it is.',
+  order_disputed:
+    'The buyer’s bank has opened a dispute about this order. Set it aside until the owner says that it is settled.',
+  destination_paused:
+    'Posting to this country is paused at present. Set the parcel aside and take the next one.',
+  on_hold: 'This parcel is on hold. Its page says why; take the next one.',
+  already_packed: 'This parcel is packed already. Open its page to hand it over, or to unpack it.',
+  already_handed_over: 'This parcel has been handed over and cannot be changed any more.',
+  parcel_discarded: 'This parcel was taken apart. Look in the queue for the order’s new one.',
+  not_packed: 'This parcel is not packed yet. Pack it first, then hand it over.',
+  weight_surprise:
+    'The weight differs from what these things should weigh together. Look for what is missing or too much. If the parcel is right, say so below the weight.',
+}

@@ -1,50 +1,35 @@
 import 'server-only'
 import type { Transaction } from 'sequelize'
-import { next, PARCEL_MOVES, type ParcelEvent } from '@/lib/core/states/parcel'
-import { recordMove } from '@/lib/services/_steps/record-move'
+import { lockParcel } from '@/lib/services/_steps/lock-parcel'
+import { moveParcel } from '@/lib/services/_steps/move-parcel'
+import { unpackParcel } from '@/lib/services/_steps/unpack-parcel'
 import { type Order, OrderLine, Parcel, ParcelLine } from '@/models'
 
 /**
- * Takes the parcels of an order apart that have not left: packed ones are opened again first.
- * The caller has locked the order. Locks: the parcels. Writes: parcels, audit entries. Repeat: safe.
+ * Takes the parcels of an order apart that have not left: packed ones are unpacked first, their units are free again, and
+ * an order still packed is paid.
+ * The caller has locked run and order. Locks: the parcels. Writes: parcels, units, order, audit. Repeat: safe.
  */
 export async function discardParcels(tx: Transaction, order: Order, now: Date): Promise<void> {
-  const lines = await OrderLine.findAll({
-    where: { orderId: order.id },
-    attributes: ['id'],
-    transaction: tx,
-  })
-  const packed = await ParcelLine.findAll({
-    where: { orderLineId: lines.map(({ id }) => id) },
-    attributes: ['parcelId'],
-    transaction: tx,
-  })
-  const parcels = await Parcel.findAll({
-    where: { id: [...new Set(packed.map(({ parcelId }) => parcelId))], state: ['open', 'packed'] },
-    order: [['id', 'ASC']],
-    transaction: tx,
-    lock: tx.LOCK.UPDATE,
-  })
-  for (const parcel of parcels) {
-    if (parcel.state === 'packed') await move(tx, parcel, 'reopen', now)
-    await move(tx, parcel, 'discard', now)
+  const by = { now, byPersonId: null }
+  for (const parcelId of await unsentOf(tx, order)) {
+    const locked = await lockParcel(tx, { workshopId: order.workshopId, parcelId })
+    if (!locked) throw new Error(`the parcel ${parcelId} has gone`)
+    const { parcel, lines } = locked
+    if (parcel.state === 'packed') await unpackParcel(tx, { order, parcel, lines }, by)
+    const gone = await moveParcel(tx, parcel, 'discard', { ...by, change: { discardedAt: now } })
+    if (!gone.ok) throw new Error(`the parcel ${parcelId} cannot be discarded from ${parcel.state}`)
   }
 }
 
-async function move(tx: Transaction, parcel: Parcel, event: ParcelEvent, now: Date): Promise<void> {
-  const from = parcel.state
-  const to = next(PARCEL_MOVES, from, event)
-  if (!to.ok) throw new Error(`parcel ${parcel.id} cannot ${event} from ${from}`)
-  const isGone = to.value === 'discarded'
-  await parcel.update({ state: to.value, discardedAt: isGone ? now : null }, { transaction: tx })
-  await recordMove(tx, {
-    workshopId: parcel.workshopId,
-    subjectType: 'parcel',
-    subjectId: parcel.id,
-    from,
-    event,
-    to: to.value,
-    byPersonId: null,
-    at: now,
+async function unsentOf(tx: Transaction, order: Order): Promise<string[]> {
+  const lines = await ParcelLine.findAll({
+    attributes: ['parcelId'],
+    include: [
+      { model: OrderLine, as: 'orderLine', attributes: [], where: { orderId: order.id }, required: true },
+      { model: Parcel, as: 'parcel', attributes: [], where: { state: ['open', 'packed'] }, required: true },
+    ],
+    transaction: tx,
   })
+  return [...new Set(lines.map(({ parcelId }) => parcelId))].sort()
 }

@@ -1,0 +1,155 @@
+import { plural } from './plural'
+import { writtenWeight } from './written'
+
+const orders = (count: number) => plural(count, { one: '# order', other: '# orders' })
+
+/** Mistakes at the fields of packing and handing over. */
+export const packingMistakes = {
+  foreignLine: 'This line does not belong to this parcel. Take it out.',
+  lineTwice: 'This line is named twice. Name it once.',
+  lineMissing: (names: readonly string[]) => `Not ticked yet: ${names.join('; ')}. Put it in, then tick it.`,
+  quantityIs: (quantity: number) => `${quantity} of this belong in the parcel. Count again.`,
+  serialCount: (quantity: number) =>
+    plural(quantity, {
+      one: 'Enter one serial number, or none.',
+      other: 'Enter # serial numbers, one for each piece, or none.',
+    }),
+  serialUnknown: (serial: string) =>
+    `There is no unit ${serial} of this run in this form. Look at its label again.`,
+  serialElsewhere: (serial: string) => `Unit ${serial} belongs to another order. Take a different one.`,
+  serialNotPassed: (serial: string) => `Unit ${serial} has not passed its test plan. Take a different one.`,
+  serialTwice: (serial: string) => `Unit ${serial} is named twice. Scan the other one.`,
+  serviceElsewhere: 'This service does not go to this country. Choose another one.',
+  tooHeavy: (service: string, most: number, grams: number) =>
+    `${service} takes at most ${writtenWeight(most)}; this parcel weighs ${writtenWeight(grams)}. Choose another service.`,
+  tooLarge: (service: string, most: number) =>
+    `${service} takes at most ${most} mm on the longest side. Choose another service.`,
+  tracking: {
+    check_digit:
+      'One digit of this number is mistyped: its check digit does not match. Scan or type it again.',
+    characters: 'Use letters, digits and hyphens, as printed on the label.',
+    length: 'Use at most 40 characters.',
+  },
+  trackingTaken: (parcel: number) =>
+    `This number stands on parcel ${parcel} already. Scan the label of this one.`,
+}
+
+/** The packer's pages. */
+export const packingWords = {
+  title: 'Packing',
+  nav: { queue: 'Queue', packed: 'Packed', posted: 'Posted', papers: 'Papers', desk: 'Workshop’s desk' },
+  queueLead: (count: number) =>
+    count === 0 ? 'Nothing waits to be packed.' : `${orders(count)} can be packed now, oldest promise first.`,
+  tabs: 'Parcels',
+  tab: { queue: 'To pack', packed: 'Packed', handed_over: 'Posted' },
+  table: {
+    queue: 'Parcels to pack, oldest promise first',
+    packed: 'Packed parcels, waiting to be handed over',
+    handed_over: 'Parcels handed over, newest first',
+  },
+  order: 'Order',
+  to: 'To',
+  contents: 'Contents',
+  postedBy: 'Promised by',
+  parcel: 'Parcel',
+  weight: 'Weight',
+  service: 'Service',
+  tracking: 'Tracking',
+  when: 'Handed over',
+  pack: 'Pack',
+  handOver: 'Hand over',
+  look: 'Look',
+  empty: {
+    queue: 'Nothing waits to be packed. An order comes here by itself once it is paid.',
+    filtered: 'Nothing in the queue is like this. Show everything again.',
+    packed: 'Nothing is packed. Take the first parcel of the queue.',
+    handed_over: 'Nothing was handed over yet.',
+  },
+  filter: {
+    offer: 'Offer',
+    country: 'Country',
+    all: 'All',
+    apply: 'Show',
+    clear: 'Show everything',
+  },
+  scan: {
+    label: 'Order number',
+    hint: 'Scan the bar code of a slip or list, or type the number.',
+    find: 'Open',
+    none: (number: string) =>
+      `There is no parcel of order ${number}. Check the number, or take one from the queue.`,
+  },
+  progress: (module: string, run: number) => `${module}, run ${run}: orders posted`,
+  stopped: {
+    title: 'Not in the queue',
+    caption: 'Paid orders that cannot be packed now',
+    why: 'Why',
+    reasons: {
+      order_disputed: 'disputed by the buyer’s bank',
+      destination_paused: 'posting to this country is paused',
+      on_hold: 'on hold',
+      no_address: 'no address',
+      not_yet: 'waits for its units, or to be looked at again',
+    },
+    fill: 'Look again',
+    hint: 'Orders whose obstacle has gone come into the queue when you look again.',
+  },
+  parcelTitle: (order: string) => `Order ${order}`,
+  parcelOf: (number: number, nth: number, of: number) =>
+    of === 1 ? `Parcel ${number}` : `Parcel ${number}, ${nth} of ${of} of this order`,
+  states: {
+    open: 'to pack',
+    packed: 'packed',
+    handed_over: 'handed over',
+    delivered: 'delivered',
+    lost: 'lost',
+    returned: 'returned',
+    discarded: 'taken apart',
+  },
+  stop: 'Stop',
+  address: 'Goes to',
+  ownScript: 'In the buyer’s own script',
+  lines: 'In the parcel',
+  linesHint: 'Tick each line as it goes in.',
+  each: (quantity: number, module: string, offer: string) => `${quantity} × ${module}, ${offer}`,
+  serials: 'Serial numbers',
+  serialsHint: 'Scan or type them, a space between. May stay empty.',
+  grams: 'Weight on the scale',
+  expected: (grams: number, tolerance: number) =>
+    `Should be about ${writtenWeight(grams)}, give or take ${writtenWeight(tolerance)}.`,
+  noExpected: 'Nobody has weighed this offer yet, so nothing can be compared.',
+  scaleBlind: 'This check cannot notice the lightest piece: count it.',
+  confirm: 'The parcel is right as it is; I have looked.',
+  size: 'Size of the parcel',
+  length: 'Length',
+  width: 'Width',
+  height: 'Height',
+  packed: 'It is packed',
+  unpack: 'Unpack it again',
+  unpackHint: 'Undo is possible until it is handed over.',
+  handOverTitle: 'Hand over',
+  serviceHint: 'Choose one of the services to this country, or type another.',
+  quoted: (service: string) => `The buyer was quoted ${service}.`,
+  trackingHint: 'Scan or type it. May stay empty for a service without one.',
+  handOverButton: 'It is handed over: tell the buyer',
+  handOverNote: 'The buyer’s mail goes out at once. After this nothing can be undone here.',
+  trackingKind: {
+    s10: 'check digit verified',
+    other: 'another carrier’s form; cannot be verified',
+  },
+  next: 'Next in the queue',
+  slip: 'Packing slip',
+  slipPdf: 'Packing slip as PDF',
+  papersTitle: 'Papers',
+  listTitle: 'Fulfilment list',
+  slipsTitle: 'Packing slips',
+  listPdf: 'Fulfilment list as PDF',
+  slipsPdf: 'Packing slips as PDF',
+  letter: 'on US Letter',
+  printHint: 'Print this page, or take the PDF.',
+  papersCut: (most: number) => `These are the first ${most} of the queue. Pack them, then print the next.`,
+  listName: (runs: readonly { module: string; revision: string; run: number }[]) =>
+    runs.length === 0
+      ? 'Nothing to pack'
+      : runs.map(({ module, revision, run }) => `${module}, revision ${revision}, run ${run}`).join('; '),
+}

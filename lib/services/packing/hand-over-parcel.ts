@@ -1,0 +1,119 @@
+import 'server-only'
+import { type Transaction, UniqueConstraintError } from 'sequelize'
+import type { HandOverInput } from '@/lib/contracts/packing'
+import { refuseFields } from '@/lib/contracts/problem'
+import { can, type Actor } from '@/lib/core/policy/can'
+import { readTracking } from '@/lib/core/post/tracking'
+import { ok, refuse } from '@/lib/core/result'
+import { addDays } from '@/lib/core/time/day'
+import { dayIn } from '@/lib/core/time/zone'
+import { inTransaction } from '@/lib/db/in-transaction'
+import { packingMistakes as words } from '@/lib/messages/packing'
+import { countRevenue } from '@/lib/services/_steps/count-revenue'
+import { type LockedParcel, lockParcel } from '@/lib/services/_steps/lock-parcel'
+import { modulePageChanged } from '@/lib/services/_steps/module-page-changed'
+import { moveOrder } from '@/lib/services/_steps/move-order'
+import { moveParcel } from '@/lib/services/_steps/move-parcel'
+import { moveUnit } from '@/lib/services/_steps/move-unit'
+import { parcelMayGoOut } from '@/lib/services/_steps/parcel-may-go-out'
+import { Parcel, Workshop } from '@/models'
+import { chooseService } from './choose-service'
+import { mailHandOver } from './mail-hand-over'
+import { unitsLeft } from './units-left'
+
+type Command = {
+  actor: Actor
+  workshopId: string
+  parcelId: string
+  input: HandOverInput
+  now: Date
+}
+
+/**
+ * Hands a packed parcel to the post: the buyer's mail goes out, and with the order's last parcel the order is posted and
+ * its money becomes sales.
+ * Refuses: not_found · forbidden · not_packed · already_handed_over · parcel_discarded · order_cancelled · order_not_paid ·
+ * order_disputed · destination_paused · on_hold · invalid, at `service` (it takes no such parcel, or does not go there)
+ * or `tracking` (mistyped, or on another parcel).
+ * Locks: run, order, parcel. Writes: parcel, units, order, ledger, mail, audit; the module's page is made anew. Repeat:
+ * refused as already_handed_over.
+ */
+export async function handOverParcel(cmd: Command) {
+  try {
+    return await inTransaction((tx) => handOver(tx, cmd))
+  } catch (error) {
+    // Two parcels got the same number at the same moment; the second is told once the first stands.
+    const isTaken = error instanceof UniqueConstraintError && 'tracking' in error.fields
+    if (isTaken) return inTransaction((tx) => handOver(tx, cmd))
+    throw error
+  }
+}
+
+async function handOver(tx: Transaction, { actor, workshopId, parcelId, input, now }: Command) {
+  if (actor.kind !== 'person' || !can(actor, 'parcel:hand_over', { workshopId })) return refuse('forbidden')
+  const locked = await lockParcel(tx, { workshopId, parcelId })
+  if (!locked) return refuse('not_found')
+  const { order, parcel } = locked
+  if (parcel.handedOverAt !== null) return refuse('already_handed_over')
+  const may = await parcelMayGoOut(tx, locked)
+  if (!may.ok) return may
+  if (parcel.state !== 'packed') return refuse(parcel.state === 'open' ? 'not_packed' : 'parcel_discarded')
+
+  const chosen = await chooseService(tx, parcel, order.country, input.service)
+  const tracking = await trackingOf(tx, workshopId, input.tracking)
+  const errors = {
+    ...(chosen.mistake && { service: chosen.mistake }),
+    ...(tracking.mistake && { tracking: tracking.mistake }),
+  }
+  if (Object.keys(errors).length > 0) return refuseFields(errors)
+
+  const workshop = await Workshop.findByPk(workshopId, { transaction: tx, rejectOnEmpty: true })
+  const today = dayIn(now, workshop.timeZone)
+  const claimDays = chosen.service?.claimWithinDays ?? null
+  const by = { now, byPersonId: actor.personId }
+  const gone = await moveParcel(tx, parcel, 'hand_over', {
+    ...by,
+    change: {
+      serviceId: chosen.service?.id ?? null,
+      serviceName: chosen.name,
+      tracking: tracking.number,
+      trackingKind: tracking.kind,
+      claimByOn: claimDays === null ? null : addDays(today, claimDays),
+      handedOverAt: now,
+      handedOverByPersonId: actor.personId,
+    },
+  })
+  if (!gone.ok) return gone
+  await postUnits(tx, locked, by)
+  const more = (await unitsLeft(tx, order.id, 'handed_over')) > 0
+  if (!more) {
+    const posted = await moveOrder(tx, order, 'hand_over', by)
+    if (!posted.ok) return posted
+    await countRevenue(tx, order, now)
+    await modulePageChanged(tx, locked.run.moduleId)
+  }
+  await mailHandOver(tx, locked, { service: chosen.service, workshop, today, more, now })
+  return ok({ parcel: parcel.id, state: parcel.state, order: order.state, tracking: parcel.tracking })
+}
+
+type ReadTracking = { number: string | null; kind: 's10' | 'other' | null; mistake: string | null }
+
+async function trackingOf(tx: Transaction, workshopId: string, typed?: string): Promise<ReadTracking> {
+  if (typed === undefined) return { number: null, kind: null, mistake: null }
+  const read = readTracking(typed)
+  if (!read.ok) return { number: null, kind: null, mistake: words.tracking[read.reason] }
+  const other = await Parcel.findOne({
+    where: { workshopId, tracking: read.value.number },
+    attributes: ['number'],
+    transaction: tx,
+  })
+  return { ...read.value, mistake: other && words.trackingTaken(other.number) }
+}
+
+async function postUnits(tx: Transaction, { lines }: LockedParcel, by: { now: Date; byPersonId: string }) {
+  for (const { unit } of lines) {
+    if (!unit) continue
+    const posted = await moveUnit(tx, unit, 'hand_over', by)
+    if (!posted.ok) throw new Error(`unit ${unit.id} cannot be handed over from ${unit.state}`)
+  }
+}
