@@ -5,8 +5,8 @@ import { paths } from '@/lib/paths'
 import { Module, Workshop } from '@/models'
 
 /**
- * Says that a module's public page and its workshop's front show old counts.
- * Locks: nothing. Writes: two notifications, sent at commit. Repeat: safe.
+ * Says that a module's public page, its workshop's front and the front of the site show old counts.
+ * Locks: nothing. Writes: three notifications, sent at commit. Repeat: safe.
  */
 export async function modulePageChanged(tx: Transaction, moduleId: string): Promise<void> {
   const module = await Module.findByPk(moduleId, {
@@ -21,4 +21,5 @@ export async function modulePageChanged(tx: Transaction, moduleId: string): Prom
   })
   await pageChanged(tx, paths.module(workshop.slug, module.slug))
   await pageChanged(tx, paths.workshop(workshop.slug))
+  await pageChanged(tx, paths.home)
 }

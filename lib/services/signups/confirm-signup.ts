@@ -5,11 +5,11 @@ import { env } from '@/lib/config/env'
 import { ok, refuse } from '@/lib/core/result'
 import { next, SIGNUP_MOVES } from '@/lib/core/states/signup'
 import { inTransaction } from '@/lib/db/in-transaction'
-import { pageChanged } from '@/lib/db/page-changed'
 import { dropDue } from '@/lib/jobs/set-due'
 import { paths } from '@/lib/paths'
 import { Module, Offer, Person, Run, SignUp, Workshop } from '@/models'
 import { inviteSignUp } from '../_steps/invite-signup'
+import { modulePageChanged } from '../_steps/module-page-changed'
 import { queueMail } from '../_steps/queue-mail'
 import { recordMove } from '../_steps/record-move'
 import { takeBackToken } from '../_steps/take-back-token'
@@ -78,16 +78,15 @@ async function supersedeEarlier(signUp: SignUp, now: Date, tx: Transaction): Pro
 }
 
 async function tell(signUp: SignUp, takeBack: string, now: Date, tx: Transaction): Promise<void> {
-  const [workshop, module, offer, run] = await Promise.all([
-    Workshop.findByPk(signUp.workshopId, { transaction: tx, rejectOnEmpty: true }),
-    Module.findByPk(signUp.moduleId, { transaction: tx, rejectOnEmpty: true }),
-    Offer.findByPk(signUp.offerId, { transaction: tx, rejectOnEmpty: true }),
-    Run.findOne({
-      where: { moduleId: signUp.moduleId, state: 'taking_deposits', decideByAt: { [Op.gt]: now } },
-      order: [['number', 'DESC']],
-      transaction: tx,
-    }),
-  ])
+  const found = { transaction: tx, rejectOnEmpty: true } as const
+  const workshop = await Workshop.findByPk(signUp.workshopId, found)
+  const module = await Module.findByPk(signUp.moduleId, found)
+  const offer = await Offer.findByPk(signUp.offerId, found)
+  const run = await Run.findOne({
+    where: { moduleId: signUp.moduleId, state: 'taking_deposits', decideByAt: { [Op.gt]: now } },
+    order: [['number', 'DESC']],
+    transaction: tx,
+  })
   const modulePath = paths.module(workshop.slug, module.slug)
   await queueMail(tx, {
     kind: 'signup_confirmed',
@@ -105,5 +104,5 @@ async function tell(signUp: SignUp, takeBack: string, now: Date, tx: Transaction
     now,
   })
   if (run) await inviteSignUp(tx, { run, signUp, now })
-  await pageChanged(tx, modulePath)
+  await modulePageChanged(tx, module.id)
 }

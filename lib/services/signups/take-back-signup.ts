@@ -4,9 +4,8 @@ import { hashToken } from '@/lib/config/secrets'
 import { ok, refuse } from '@/lib/core/result'
 import { next, SIGNUP_MOVES } from '@/lib/core/states/signup'
 import { inTransaction } from '@/lib/db/in-transaction'
-import { pageChanged } from '@/lib/db/page-changed'
-import { paths } from '@/lib/paths'
-import { Invitation, Module, SignUp, Workshop } from '@/models'
+import { Invitation, SignUp } from '@/models'
+import { modulePageChanged } from '../_steps/module-page-changed'
 import { recordMove } from '../_steps/record-move'
 
 /**
@@ -54,9 +53,7 @@ export function takeBackSignUp(cmd: { token: string; now: Date }) {
         at: now,
       })
     }
-    const module = await Module.findByPk(signUp.moduleId, { transaction: tx, rejectOnEmpty: true })
-    const workshop = await Workshop.findByPk(signUp.workshopId, { transaction: tx, rejectOnEmpty: true })
-    await pageChanged(tx, paths.module(workshop.slug, module.slug))
+    await modulePageChanged(tx, signUp.moduleId)
     return ok({ state: 'taken_back' as const })
   })
 }

@@ -1,98 +1,68 @@
-import { describe, expect, test } from 'vitest'
+import { expect, test } from 'vitest'
 import { ok } from '@/lib/core/result'
 import { inTransaction } from '@/lib/db/in-transaction'
-import { endInvitations, inviteSignUps, signUpsToInvite } from '@/lib/services/_steps/invite-signups'
-import { confirmSignUp } from '@/lib/services/signups/confirm-signup'
-import { submitSignUp } from '@/lib/services/signups/submit-signup'
+import { endInvitations } from '@/lib/services/_steps/end-invitations'
+import { inviteSignUp } from '@/lib/services/_steps/invite-signup'
 import { takeBackSignUp } from '@/lib/services/signups/take-back-signup'
-import { AuditEntry, Invitation, MailOutbox, type Run } from '@/models'
+import { AuditEntry, Invitation, MailOutbox, type Run, type SignUp } from '@/models'
 import { hoursAfter, NOW } from '@/tests/support/worlds/base'
 import { makeRun } from '@/tests/support/worlds/run'
 import { makeSignUp } from '@/tests/support/worlds/sign-up'
-import { tokenOf } from './mailed-token'
+import { signUp } from './sign-up-world'
 
-const toInvite = (run: Run) =>
-  inTransaction(async (tx) => ok(await signUpsToInvite(tx, run))).then((found) => found.value)
-const invite = (run: Run, signUpIds: string[]) =>
-  inTransaction(async (tx) => ok(await inviteSignUps(tx, { runId: run.id, signUpIds, now: NOW }))).then(
-    (found) => found.value,
+const invite = async (run: Run, signup: SignUp) => {
+  const done = await inTransaction(async (tx) =>
+    ok(await inviteSignUp(tx, { run, signUp: signup, now: NOW })),
   )
-
-async function invitedWorld() {
-  const { workshop, module, offers, run } = await makeRun()
-  const { signup } = await makeSignUp(offers.kit)
-  await makeSignUp(offers.kit, { state: 'unconfirmed' })
-  return { workshop, module, offers, run, signup }
+  return done.value
+}
+const statesOf = async (run: Run) => {
+  const rows = await Invitation.findAll({ where: { runId: run.id }, order: [['state', 'ASC']] })
+  return rows.map(({ state }) => state)
 }
 
-describe('a run that opens', () => {
-  test('invites confirmed sign-ups, first come first, each once, with one mail', async () => {
-    const { run, offers, signup } = await invitedWorld()
-    const early = await makeSignUp(offers.built, { confirmedAt: hoursAfter(NOW, -90) })
-    const ids = await toInvite(run)
-    expect(ids).toEqual([early.signup.id, signup.id])
-    expect(await invite(run, ids)).toBe(2)
-    expect(await invite(run, ids)).toBe(0)
-    expect(await toInvite(run)).toEqual([])
-    const invitations = await Invitation.findAll({ where: { runId: run.id } })
-    const mails = await MailOutbox.findAll({ where: { kind: 'deposits_open' } })
-    expect(mails.map(({ subjectId }) => subjectId).sort()).toEqual(invitations.map(({ id }) => id).sort())
-  })
-
-  test('leaves out who took it back meanwhile, and everybody once it takes no deposits', async () => {
-    const { run, offers, signup } = await invitedWorld()
-    const gone = await makeSignUp(offers.kit)
-    const ids = [signup.id, gone.signup.id]
-    await takeBackSignUp({ token: gone.tokens.takeBack, now: NOW })
-    expect(await invite(run, ids)).toBe(1)
-    const later = await makeSignUp(offers.kit)
-    await run.update({
-      state: 'called_off',
-      calledOffAt: NOW,
-      callOffCause: 'owner',
-      callOffReason: 'Tried.',
-    })
-    expect(await invite(run, [later.signup.id])).toBe(0)
-  })
-
-  test('never invites the sign-ups of another module', async () => {
-    const { run } = await invitedWorld()
-    const other = await invitedWorld()
-    expect(await invite(run, [other.signup.id])).toBe(0)
-  })
+test('a sign-up is invited to a run once, with one mail', async () => {
+  const { run, offers } = await makeRun()
+  const { signup } = await makeSignUp(offers.kit)
+  expect(await invite(run, signup)).toBe(true)
+  expect(await invite(run, signup)).toBe(false)
+  const invitation = await Invitation.findOne({ where: { runId: run.id }, rejectOnEmpty: true })
+  const mails = await MailOutbox.findAll({ where: { kind: 'deposits_open', subjectId: invitation.id } })
+  expect(mails).toHaveLength(1)
+  expect(mails[0]?.props).toMatchObject({ minimum: 3, maximum: 5, decideBy: '2027-04-01' })
 })
 
-test('who confirms while the run takes deposits is invited at once', async () => {
-  const { workshop, module, run } = await invitedWorld()
-  await submitSignUp({
-    input: {
-      workshop: workshop.slug,
-      module: module.slug,
-      offer: 'built',
-      quantity: 1,
-      country: 'DE',
-      certainty: 'certain',
-      email: 'late@example.org',
-      updates: false,
-    },
-    now: NOW,
-  })
-  await confirmSignUp({ token: await tokenOf('confirm_signup', 'late@example.org'), now: NOW })
-  expect(await Invitation.count({ where: { runId: run.id, state: 'sent' } })).toBe(1)
+test('during the head start the mail names its end, afterwards none', async () => {
+  const { run, offers } = await makeRun(undefined, { opensToAllAt: hoursAfter(NOW, 48) })
+  const { signup } = await makeSignUp(offers.kit)
+  await invite(run, signup)
+  const mail = await MailOutbox.findOne({ where: { kind: 'deposits_open' }, order: [['queuedAt', 'DESC']] })
+  const { opensToAllAt } = (await Invitation.findOne({ where: { runId: run.id }, include: 'run' }))!.run!
+  const mine = await MailOutbox.findAll({ where: { kind: 'deposits_open', personId: signup.personId } })
+  expect(mine[0]?.props).toMatchObject({ opensToAllAt: opensToAllAt!.toISOString() })
+  expect(mail).not.toBeNull()
 })
 
-test('taking the sign-up back declines the invitation; the end of deposits ends the open ones', async () => {
-  const { run, offers } = await invitedWorld()
+test('who confirms while a run takes deposits is invited at once; not once decide-by has passed', async () => {
+  const open = await makeRun()
+  await signUp(open, { email: 'late@example.org' })
+  expect(await statesOf(open.run)).toEqual(['sent'])
+
+  const over = await makeRun()
+  await signUp(over, { email: 'later@example.org' }, new Date('2027-04-02T09:00:00Z'))
+  expect(await statesOf(over.run)).toEqual([])
+})
+
+test('taking the sign-up back declines its invitation; the end of deposits ends the open ones', async () => {
+  const { run, offers } = await makeRun()
   const first = await makeSignUp(offers.kit)
   const second = await makeSignUp(offers.kit)
-  await invite(run, [first.signup.id, second.signup.id])
+  await invite(run, first.signup)
+  await invite(run, second.signup)
   await takeBackSignUp({ token: first.tokens.takeBack, now: NOW })
-  const ended = await inTransaction(async (tx) => ok(await endInvitations(tx, { runId: run.id, now: NOW })))
-  expect(ended.value).toBe(1)
-  const states = await Invitation.findAll({ where: { runId: run.id }, order: [['state', 'ASC']] })
-  expect(states.map(({ state }) => state)).toEqual(['declined', 'expired'])
-  const moves = await AuditEntry.count({
-    where: { subjectType: 'invitation', toState: ['declined', 'expired'] },
-  })
-  expect(moves).toBe(2)
+  expect(await statesOf(run)).toEqual(['declined', 'sent'])
+  await inTransaction(async (tx) => ok(await endInvitations(tx, run, NOW)))
+  expect(await statesOf(run)).toEqual(['declined', 'expired'])
+  const moves = await AuditEntry.findAll({ where: { subjectType: 'invitation', workshopId: run.workshopId } })
+  expect(moves.map(({ event }) => event).sort()).toEqual(['decline', 'end', 'send', 'send'])
 })
