@@ -1,5 +1,6 @@
 import 'server-only'
 import { createTransport } from 'nodemailer'
+import { parseConnectionUrl } from 'nodemailer/lib/shared/index.js'
 import { ok, refuse, type Result } from '@/lib/core/result'
 import { withSafeHeaders } from '@/lib/gateways/mailer/safe-headers'
 import { type Mailer, type Message, type SendFailure } from '@/lib/gateways/mailer/types'
@@ -29,7 +30,8 @@ const headersOf = ({ unsubscribeUrl }: Message): Record<string, string> => ({
  */
 export function smtpMailer(url: string): Mailer {
   const transport = createTransport({
-    url,
+    // Read here: beside a `url` the library ignores every other option.
+    ...parseConnectionUrl(url),
     pool: true,
     maxConnections: 4,
     connectionTimeout: WITHIN_MS,
