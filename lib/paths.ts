@@ -22,6 +22,7 @@ export const paths = {
     `/w/${part(workshop)}/${part(module)}/form/${part(draft)}`,
   signUpSent: (workshop: string, module: string) => `/w/${part(workshop)}/${part(module)}/sent`,
   orderForm: (workshop: string, module: string) => `/account/order/${part(workshop)}/${part(module)}`,
+  orderCheck: (workshop: string, module: string) => `/account/order/${part(workshop)}/${part(module)}/check`,
   confirm: (token: string) => `/confirm/${part(token)}`,
   takeBack: (token: string) => `/take-back/${part(token)}`,
   unsubscribe: (token: string) => `/unsubscribe/${part(token)}`,
@@ -29,6 +30,7 @@ export const paths = {
 
   account: '/account',
   accountOrder: (order: string) => `/account/orders/${part(order)}`,
+  accountOrderAddress: (order: string) => `/account/orders/${part(order)}/address`,
   accountOrderCancel: (order: string) => `/account/orders/${part(order)}/cancel`,
   accountData: '/account/data',
 
@@ -36,6 +38,11 @@ export const paths = {
   adminModules: (workshop: string) => `/admin/${part(workshop)}/modules`,
   adminModuleNew: (workshop: string) => `/admin/${part(workshop)}/modules/new`,
   adminModule: (workshop: string, module: string) => `/admin/${part(workshop)}/modules/${part(module)}`,
+  adminModulePage: (
+    workshop: string,
+    module: string,
+    page: 'facts' | 'offers' | 'revisions' | 'parts' | 'plan' | 'preview',
+  ) => `/admin/${part(workshop)}/modules/${part(module)}/${page}`,
   adminRuns: (workshop: string) => `/admin/${part(workshop)}/runs`,
   adminRunNew: (workshop: string) => `/admin/${part(workshop)}/runs/new`,
   adminRun: (workshop: string, run: string) => `/admin/${part(workshop)}/runs/${part(run)}`,
@@ -49,6 +56,8 @@ export const paths = {
   adminBulk: (workshop: string, bulk: string) => `/admin/${part(workshop)}/bulk/${part(bulk)}`,
   adminPaymentAccount: (workshop: string) => `/admin/${part(workshop)}/payment-account`,
   adminSettings: (workshop: string) => `/admin/${part(workshop)}/settings`,
+  adminSettingsPage: (workshop: string, page: 'postage' | 'terms' | 'members' | 'destinations') =>
+    `/admin/${part(workshop)}/settings/${page}`,
   bench: (workshop: string) => `/bench/${part(workshop)}`,
   packing: (workshop: string) => `/packing/${part(workshop)}`,
   packingParcel: (workshop: string, parcel: string) => `/packing/${part(workshop)}/parcels/${part(parcel)}`,
@@ -75,6 +84,8 @@ export const paths = {
     signUpTakeBack: '/api/signups/take-back',
     unsubscribe: (token: string) => `/api/unsubscribe/${part(token)}`,
     orders: '/api/orders',
+    orderDraft: '/api/orders/draft',
+    orderPaid: (order: string) => `/api/orders/${part(order)}/check`,
     orderPay: (order: string) => `/api/orders/${part(order)}/pay`,
     orderCancel: (order: string) => `/api/orders/${part(order)}/cancel`,
     orderAddress: (order: string) => `/api/orders/${part(order)}/address`,
@@ -86,12 +97,26 @@ export const paths = {
     adminAccount: (workshop: string) => `/api/admin/${part(workshop)}/payment-account`,
     adminSettings: (workshop: string, what: 'postage' | 'terms' | 'details' | 'destinations' | 'members') =>
       `/api/admin/${part(workshop)}/settings/${what}`,
+    adminSettingsDeed: (workshop: string, deed: 'postage/remove' | 'members/remove' | 'members/withdraw') =>
+      `/api/admin/${part(workshop)}/settings/${deed}`,
+    join: '/api/workshops/join',
     adminModules: (workshop: string) => `/api/admin/${part(workshop)}/modules`,
     adminModule: (workshop: string, module: string) => `/api/admin/${part(workshop)}/modules/${part(module)}`,
     adminModulePart: (
       workshop: string,
       module: string,
-      what: 'offers' | 'revisions' | 'lessons' | 'publish' | 'first-unit' | 'parts',
+      what:
+        | 'offers'
+        | 'revisions'
+        | 'lessons'
+        | 'lessons/mend'
+        | 'lessons/waive'
+        | 'publish'
+        | 'archive'
+        | 'first-unit'
+        | 'parts'
+        | 'samples'
+        | 'plan',
     ) => `/api/admin/${part(workshop)}/modules/${part(module)}/${what}`,
     adminRuns: (workshop: string) => `/api/admin/${part(workshop)}/runs`,
     adminRun: (workshop: string, run: string) => `/api/admin/${part(workshop)}/runs/${part(run)}`,
@@ -104,7 +129,9 @@ export const paths = {
     packingQueue: (workshop: string) => `/api/packing/${part(workshop)}/queue`,
     packingParcel: (workshop: string, parcel: string, deed: 'pack' | 'hand-over' | 'reopen') =>
       `/api/packing/${part(workshop)}/parcels/${part(parcel)}/${deed}`,
+    packingFill: (workshop: string) => `/api/packing/${part(workshop)}/fill`,
     packingList: (workshop: string) => `/api/packing/${part(workshop)}/list.pdf`,
+    packingSlips: (workshop: string) => `/api/packing/${part(workshop)}/slips.pdf`,
     packingSlip: (workshop: string, parcel: string) =>
       `/api/packing/${part(workshop)}/parcels/${part(parcel)}/slip.pdf`,
     webhook: '/api/webhooks/stripe',
