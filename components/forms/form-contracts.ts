@@ -8,6 +8,7 @@ export const FORM_CONTRACTS = {
   secondFactor: async () => (await import('@/lib/contracts/sign-in')).SecondFactorInput,
   signUp: async () => (await import('@/lib/contracts/signups')).SignUpInput,
   run: async () => (await import('@/lib/contracts/runs')).RunInput,
+  order: async () => (await import('@/lib/contracts/orders')).OrderInput,
   address: async () => (await import('@/lib/contracts/address')).AddressInput,
   pack: async () => (await import('@/lib/contracts/packing')).PackInput,
   handOver: async () => (await import('@/lib/contracts/packing')).HandOverInput,

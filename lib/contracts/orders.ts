@@ -1,6 +1,6 @@
 import { z } from 'zod'
 import { AddressInput } from './address'
-import { offerKind, uuid, wholeNumber } from './fields'
+import { offerKind, tick, uuid, wholeNumber } from './fields'
 
 export const OrderLineInput = z.object({
   offer: offerKind,
@@ -20,6 +20,23 @@ export const OrderInput = z.object({
 })
 export type OrderInput = z.infer<typeof OrderInput>
 
+/** An order form's rows that were left at zero or empty are no lines of the order. */
+export function readOrderForm(body: Record<string, unknown>): Record<string, unknown> {
+  if (!Array.isArray(body.lines)) return body
+  const lines = body.lines.filter((line: { quantity?: unknown }) => {
+    const typed = String(line.quantity ?? '').trim()
+    return typed !== '' && typed !== '0'
+  })
+  return { ...body, lines }
+}
+
+/** `otherCard`: give up the payment that waits for the bank and begin anew with another card. */
+export const PayInput = z.object({ otherCard: tick.optional() })
+export type PayInput = z.infer<typeof PayInput>
+
+export const AddressChange = z.object({ address: AddressInput })
+export type AddressChange = z.infer<typeof AddressChange>
+
 export type OrderPlaced = {
   order: string
   state: 'awaiting_deposit' | 'waiting'
@@ -30,6 +47,7 @@ export type OrderPlaced = {
 }
 
 export type PayAnswer = { payUrl: string }
+export type CheckAnswer = { state: string }
 export type CancelAnswer = { state: string; refundMinor: number }
 
 /** What the order's person may do with it now. */

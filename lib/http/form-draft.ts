@@ -3,7 +3,7 @@ import { FormDraft } from '@/models'
 
 const KEPT_MINUTES = 15
 /** Never written down, not even for 15 minutes. */
-const SECRET = /token|password|secret|card|code/i
+const SECRET = /token|password|secret|card|(^|\.)code$/i
 
 /** Keeps what was typed and what was wrong with it, for a form that comes back without JavaScript. Returns the draft's id. */
 export async function keepDraft(draft: {

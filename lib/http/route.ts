@@ -22,6 +22,8 @@ export type RouteContext<P, Q, B> = {
   params: P
   query: Q
   body: B
+  /** The fields as typed, when a form was sent. */
+  fields: Record<string, string> | null
   /** Business time. */
   now: Date
   /** The workshop named in the path; absent where the path names none. */
@@ -139,6 +141,7 @@ async function answerOf<P, Q, B>(
     params: params?.data ?? (rawParams as P),
     query: query?.data as Q,
     body: (body?.data ?? shaped) as B,
+    fields: carried.fields,
     workshop: workshop as RouteContext<P, Q, B>['workshop'],
   }
   const key = spec.idempotent ? requestKeyOf(request, carried) : null

@@ -27,7 +27,7 @@ export type QuotedOffer = {
   postedByOn: string
   /** Null while it has not been weighed and measured. */
   packed: { grams: number; sizeMm: [number, number, number] } | null
-  destination: ReturnType<Destination['facts']> | null
+  destination: (ReturnType<Destination['facts']> & { note: string }) | null
   choices: {
     id: string
     question: string
@@ -71,6 +71,7 @@ export async function loadOffers(
 function toQuoted(row: RunOffer): QuotedOffer {
   const offer = row.offer!
   const { packedWeightG: grams, lengthMm, widthMm, heightMm } = offer
+  const [destination] = offer.destinations ?? []
   const isMeasured = grams !== null && lengthMm !== null && widthMm !== null && heightMm !== null
   return {
     runOfferId: row.id,
@@ -80,7 +81,7 @@ function toQuoted(row: RunOffer): QuotedOffer {
     taxClass: row.taxClass,
     postedByOn: row.postedByOn,
     packed: isMeasured ? { grams, sizeMm: [lengthMm, widthMm, heightMm] } : null,
-    destination: offer.destinations?.[0]?.facts() ?? null,
+    destination: destination ? { ...destination.facts(), note: destination.note } : null,
     choices: (offer.choices ?? []).map(({ id, question, askedAfterLock, answers }) => ({
       id,
       question,

@@ -1,5 +1,6 @@
 import 'server-only'
 import type { Transaction } from 'sequelize'
+import type { Minor } from '@/lib/core/brand'
 import type { RefundEvent } from '@/lib/core/states/refund'
 import { crashPoint } from '@/lib/db/crash-point'
 import type { RefundFacts } from '@/lib/gateways/payments/types'
@@ -30,6 +31,8 @@ export async function recordRefund(
   refund: Refund,
   facts: RefundFacts,
   now: Date,
+  /** What the balance lacks, where that was looked up. */
+  shortBy?: Minor,
 ): Promise<void> {
   const isShort = facts.state === 'pending' && facts.failure === 'insufficient_funds'
   const moved = await moveRefund(tx, refund, EVENT[facts.state], now, {
@@ -37,7 +40,7 @@ export async function recordRefund(
     sentAt: refund.sentAt ?? now,
     ...(facts.state === 'failed' ? { failureCode: facts.failure ?? 'failed', failedAt: now } : {}),
     ...(facts.state === 'succeeded' ? { succeededAt: now, shortByMinor: null } : {}),
-    ...(isShort ? { shortByMinor: refund.shortByMinor ?? refund.amountMinor } : {}),
+    ...(isShort ? { shortByMinor: shortBy ?? refund.shortByMinor ?? refund.amountMinor } : {}),
   })
   if (!moved.ok) return
   const order = await Order.findByPk(refund.orderId, { transaction: tx, rejectOnEmpty: true })

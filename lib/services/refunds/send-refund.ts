@@ -18,7 +18,7 @@ const FINAL_AFTER_MS = 60_000
 const LOOK_UP_AGAIN_MS = 120_000
 
 type Sent =
-  | { state: 'answered'; facts: RefundFacts }
+  | { state: 'answered'; facts: RefundFacts; shortBy?: Minor }
   | { state: 'short'; byMinor: Minor }
   | { state: 'never_had_it' }
   | { state: 'unknown' }
@@ -63,7 +63,11 @@ async function send(
   }
   const { amountMinor: amount, currency, idempotencyKey: key } = refund
   const done = await payments().refund({ account, key, payment, amount, currency, refundId: refund.id })
-  if (done.ok) return { state: 'answered', facts: done.value }
+  if (done.ok) {
+    const isShort = done.value.failure === 'insufficient_funds'
+    const shortBy = isShort ? { shortBy: await shortfall(account, amount, currency) } : {}
+    return { state: 'answered', facts: done.value, ...shortBy }
+  }
   if (done.reason === 'insufficient_balance')
     return { state: 'short', byMinor: await shortfall(account, amount, currency) }
   if (done.reason !== 'unknown_outcome') return { state: 'refused', reason: done.reason }
@@ -89,7 +93,7 @@ async function record(refundId: string, sent: Sent, now: Date): Promise<Result<{
       rejectOnEmpty: true,
     })
     const { id: subjectId, workshopId } = refund
-    if (sent.state === 'answered') await recordRefund(tx, refund, sent.facts, now)
+    if (sent.state === 'answered') await recordRefund(tx, refund, sent.facts, now, sent.shortBy)
     else if (sent.state === 'short')
       await failRefund(tx, refund, {
         code: 'insufficient_balance',
