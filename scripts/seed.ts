@@ -1,10 +1,11 @@
 import { rmSync, writeFileSync } from 'node:fs'
 import { QueryTypes } from 'sequelize'
 import { sequelize } from '@/lib/db/sequelize'
-import { DEMO_SIGN_INS, seedDemo } from '@/seeders/demo'
+import { DEMO_DAYS, DEMO_SIGN_INS, seedDemo } from '@/seeders/demo'
+import { openDemoStage } from './support/demo-stage'
 
-// Fills an empty sandbox with the demo, by the services as people act, and names who can sign in. The marker
-// file named by start stays when this is killed, so that the next start begins again.
+// Fills an empty sandbox with the demo, by the services as people act, before anything else runs, and names who can sign
+// in. The marker file named by start stays when this is killed, so that the next start begins again.
 const marker = process.argv[2]
 
 async function isEmpty() {
@@ -20,9 +21,11 @@ async function isEmpty() {
 if (await isEmpty()) {
   if (marker) writeFileSync(marker, '')
   process.stdout.write('Making the demo (a minute or so) …\n')
-  await seedDemo((sentence: string) => process.stdout.write(`${sentence}\n`))
+  const stage = await openDemoStage(new Date(Date.now() - DEMO_DAYS * 86_400_000))
+  await seedDemo(stage, (sentence: string) => process.stdout.write(`${sentence}\n`))
+  await stage.close()
   if (marker) rmSync(marker)
 }
 process.stdout.write('Demo people to sign in as, at /sandbox:\n')
-for (const { email, what } of DEMO_SIGN_INS) process.stdout.write(`  ${email.padEnd(36)}${what}\n`)
+for (const { email, what } of DEMO_SIGN_INS) process.stdout.write(`  ${email.padEnd(40)}${what}\n`)
 await sequelize.close()

@@ -1,7 +1,28 @@
+import { designModule } from './acts/design-module'
+import { foundWorkshop } from './acts/found-workshop'
+import { KEDGE } from './hollow-pier/kedge'
+import { kedgeHistory } from './hollow-pier/kedge-history'
+import { HOLLOW_PIER } from './hollow-pier/workshop'
+import { PEOPLE } from './people'
+import type { Stage } from './stage'
+
 /** Who can sign in to the demo, in the order a visitor would try them. */
 export const DEMO_SIGN_INS: readonly { email: string; what: string }[] = [
-  { email: 'host@brimline.example', what: 'host: opens and suspends workshops' },
+  { email: PEOPLE.mara, what: 'owner of Hollow Pier Modular: runs, decisions, money' },
+  { email: PEOPLE.lene, what: 'packer there: the queue, papers, parcels' },
+  { email: PEOPLE.jonas, what: 'bench there: units and test sheets' },
+  { email: PEOPLE.gwen, what: 'owner of Fen Lamp Circuits' },
+  { email: PEOPLE.host, what: 'host: opens and suspends workshops' },
 ]
 
-/** Makes the demo by the services, as people act. No workshop is invented yet: only the host can sign in. */
-export async function seedDemo(_say: (sentence: string) => void): Promise<void> {}
+/** Days before today on which the demo's history begins. */
+export const DEMO_DAYS = 330
+
+/** Makes the demo by the services, as people act, from a day in the past up to now. */
+export async function seedDemo(stage: Stage, say: (sentence: string) => void): Promise<void> {
+  const house = await foundWorkshop(stage, HOLLOW_PIER)
+  await designModule(stage, house, KEDGE)
+  say('Hollow Pier Modular is open.')
+  await kedgeHistory(stage, house)
+  await stage.goTo(new Date())
+}
