@@ -1,4 +1,4 @@
-import { version } from '@/package.json'
+import { programVersion } from '@/lib/config/version'
 import { getHealth } from '@/lib/queries/public/get-health'
 
 export const dynamic = 'force-dynamic'
@@ -8,7 +8,7 @@ export async function GET(): Promise<Response> {
   const health = await getHealth()
   const status = health.database === 'down' ? 'down' : health.jobs === 'ok' ? 'ok' : 'degraded'
   return Response.json(
-    { status, ...health, version },
+    { status, ...health, version: programVersion() },
     { status: status === 'down' ? 503 : 200, headers: { 'cache-control': 'no-store' } },
   )
 }
