@@ -1,5 +1,5 @@
 import { z } from 'zod'
-import { day, line, minorAmount, offerKind, paragraphs, slug, wholeNumber } from './fields'
+import { day, line, minorAmount, offerKind, paragraphs, slug, uuid, wholeNumber } from './fields'
 
 export const balanceWhen = z.enum(['at_lock', 'units_passed', 'before_packing'], {
   error: 'Choose when balances fall due.',
@@ -78,6 +78,13 @@ export type LowerMinimumInput = z.infer<typeof LowerMinimumInput>
 
 /** The words typed on a check-answers page; a program that calls the API sends none. */
 export const Confirmed = z.object({ typed: z.string().max(200).optional() })
+
+export const LockBody = LockInput.extend(Confirmed.shape)
+export const CallOffBody = CallOffInput.extend(Confirmed.shape)
+
+export const RunParams = z.object({ workshop: slug, run: uuid })
+export const BulkParams = z.object({ workshop: slug, bulk: uuid })
+export const RunsQuery = z.object({ after: uuid.optional() })
 
 export type BulkAnswer = { bulk: string }
 /** `done` and `failed` are apart; what is in neither still waits. */

@@ -1,3 +1,4 @@
+import { formatMoney } from '@/lib/core/money/format'
 import type { ReadinessFigures } from '@/lib/core/states/readiness-figures'
 import type { ReadinessKey, ReadinessState } from '@/lib/core/states/run-readiness'
 import { plural } from './plural'
@@ -103,4 +104,26 @@ export function readinessWords(
   const words = WORDS[line.key](facts)
   if (line.state === 'waived') return `Let pass, because: ${line.waivedFor ?? ''}`
   return words[line.state]
+}
+
+type PageFacts = {
+  revision: string
+  currency: string
+  workshop: { locale: string }
+  readiness: readonly { key: ReadinessKey; state: ReadinessState; waivedFor: string | null }[]
+  readinessFigures: ReadinessFigures
+  repay: { state: 'yes' | 'unknown' } | { state: 'short'; shortByMinor: number }
+}
+
+/** The readiness list of a run in words. */
+export function readinessOfPage(page: PageFacts) {
+  const { repay, currency, workshop } = page
+  const shortBy = repay.state === 'short' ? formatMoney(repay.shortByMinor, currency, workshop.locale) : null
+  const facts = { ...page.readinessFigures, revision: page.revision, shortBy }
+  return page.readiness.map((line) => ({
+    key: line.key,
+    state: line.state,
+    title: readinessTitles[line.key],
+    words: readinessWords(line, facts),
+  }))
 }

@@ -62,6 +62,8 @@ export const runWords = {
   notChargeable: 'The payment provider cannot charge this sum. Choose another.',
 
   runTitle: (module: string, number: number) => `${module}, run ${number}`,
+  pages: 'Pages of this run',
+  decision: 'Decision',
   publicPage: 'The public page',
   gauge: 'Deposits',
   readiness: 'Readiness list',

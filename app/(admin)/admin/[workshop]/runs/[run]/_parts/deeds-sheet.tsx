@@ -1,0 +1,69 @@
+import { keptForm } from '@/components/forms/kept-form'
+import { Button, LinkButton } from '@/components/ui/button'
+import { Disclosure } from '@/components/ui/disclosure'
+import { Form } from '@/components/ui/form'
+import { Sheet } from '@/components/ui/sheet'
+import { NumberField } from '@/components/ui/text-field'
+import type { RunPage } from '@/lib/contracts/run-page'
+import { runWords as words } from '@/lib/messages/runs'
+import { paths } from '@/lib/paths'
+
+type Kept = { values: Record<string, string>; errors: Record<string, string>; reason: string } | null
+type Props = { page: RunPage; lowered: Kept; closed: Kept }
+
+/** What the owner can do with the run as it stands; what moves money leads to a page that asks once more. */
+export function DeedsSheet({ page, lowered, closed }: Props) {
+  const { workshop, id, state, minimum, orders } = page
+  if (state === 'closed' || state === 'called_off') return null
+  const to = (deed: Parameters<typeof paths.adminRunDeed>[2]) => paths.adminRunDeed(workshop.slug, id, deed)
+  const canAsk = state === 'locked' && (orders['reserved'] ?? 0) > 0
+  return (
+    <Sheet title={words.deeds}>
+      <div className="flex flex-col items-start gap-3">
+        {state === 'draft' ? (
+          <LinkButton href={to('open')} kind="primary">
+            {words.open}
+          </LinkButton>
+        ) : null}
+        {state === 'taking_deposits' ? (
+          <LinkButton href={to('lock')} kind="primary">
+            {words.lock}
+          </LinkButton>
+        ) : null}
+        {canAsk ? (
+          <LinkButton href={to('ask-balances')} kind="primary">
+            {words.ask}
+          </LinkButton>
+        ) : null}
+        <LinkButton href={to('call-off')}>{words.callOff}</LinkButton>
+        {state === 'taking_deposits' && minimum > 1 ? (
+          <LowerMinimum action={paths.api.adminRunDeed(workshop.slug, id, 'lower-minimum')} kept={lowered} />
+        ) : null}
+        {state === 'locked' ? (
+          <CloseRun action={paths.api.adminRunDeed(workshop.slug, id, 'close')} kept={closed} />
+        ) : null}
+      </div>
+    </Sheet>
+  )
+}
+
+function LowerMinimum({ action, kept }: { action: string; kept: Kept }) {
+  const form = keptForm(kept)
+  return (
+    <Disclosure summary={words.lowerMinimum} open={kept !== null}>
+      <Form action={action} form={form} foot={<Button kind="secondary">{words.lowerMinimum}</Button>}>
+        <NumberField name="minimum" label={words.newMinimum} hint={words.newMinimumHint} form={form} />
+      </Form>
+    </Disclosure>
+  )
+}
+
+function CloseRun({ action, kept }: { action: string; kept: Kept }) {
+  return (
+    <Disclosure summary={words.close} open={kept !== null}>
+      <Form action={action} form={keptForm(kept)} foot={<Button kind="secondary">{words.close}</Button>}>
+        <p className="max-w-words">{words.closeHint}</p>
+      </Form>
+    </Disclosure>
+  )
+}

@@ -1,0 +1,22 @@
+import { Tabs } from '@/components/ui/tabs'
+import { runWords as words } from '@/lib/messages/runs'
+import { paths } from '@/lib/paths'
+
+type Props = { workshop: string; run: string; current: 'run' | 'orders' }
+
+/** The pages of a run, side by side. */
+export function RunTabs({ workshop, run, current }: Props) {
+  return (
+    <Tabs
+      label={words.pages}
+      tabs={[
+        { href: paths.adminRun(workshop, run), label: words.decision, current: current === 'run' },
+        {
+          href: paths.adminRunPage(workshop, run, 'orders'),
+          label: words.ordersTitle,
+          current: current === 'orders',
+        },
+      ]}
+    />
+  )
+}
