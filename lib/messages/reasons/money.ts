@@ -1,7 +1,8 @@
 /** Refusals of the services under orders, payments and refunds. */
 export const money: Record<string, string> = {
   run_not_open: 'This run takes no orders now. Its page says where it stands.',
-  decide_by_past: 'The day of deciding has passed, so this run takes no new orders.',
+  decide_by_past:
+    'The decide-by day has come or passed, so nothing new can begin: the run takes no new orders, and a draft needs a later day.',
   not_open_to_all_yet:
     'People who signed up first may order now; everyone can once the head start is over. The module’s page says when.',
   limit_reached: 'This is more than one person may order in this run. Order fewer.',

@@ -1,4 +1,7 @@
 import { afterAll, beforeEach, describe, expect, test } from 'vitest'
+import { ok } from '@/lib/core/result'
+import { inTransaction } from '@/lib/db/in-transaction'
+import { enqueue } from '@/lib/jobs/enqueue'
 import { breakCalls } from '@/lib/gateways/payments/fake/break-calls'
 import { closeSandboxPool } from '@/lib/gateways/payments/fake/pool'
 import { expireHold } from '@/lib/services/orders/expire-hold'
@@ -65,11 +68,9 @@ describe('a hold that ends', () => {
   test('by its due row, as time passes', async () => {
     const { order } = await placed(world.run)
     await setBusinessTime(LATER)
-    const { inTransaction } = await import('@/lib/db/in-transaction')
-    const { enqueue } = await import('@/lib/jobs/enqueue')
     await inTransaction(async (tx) => {
       await enqueue(tx, 'due', {})
-      return { ok: true as const, value: null }
+      return ok({})
     })
     await runJobs()
     expect((await order.reload()).state).toBe('expired')

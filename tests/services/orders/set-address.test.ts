@@ -1,5 +1,6 @@
 import { afterAll, beforeEach, expect, test } from 'vitest'
 import { closeSandboxPool } from '@/lib/gateways/payments/fake/pool'
+import { placeOrder } from '@/lib/services/orders/place-order'
 import { setAddress } from '@/lib/services/orders/set-address'
 import { chargeBalance } from '@/lib/services/payments/charge-balance'
 import { Address, OrderLine, Parcel, Run } from '@/models'
@@ -72,7 +73,6 @@ test('is refused with a sentence at its field, for a place another live order go
   const made = await placed(world.run)
   expect(await change(made, { ...ULM, postcode: '' })).toEqual(['address.postcode'])
   expect(await change(made, { ...ULM, country: 'FR' })).toEqual(['address.country'])
-  const { placeOrder } = await import('@/lib/services/orders/place-order')
   const second = await placeOrder({
     actor: made.actor,
     input: orderInput(world.run, { address: ULM }),

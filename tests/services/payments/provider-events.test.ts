@@ -1,7 +1,10 @@
 import Stripe from 'stripe'
 import { afterAll, beforeEach, describe, expect, test } from 'vitest'
+import { minor } from '@/lib/core/brand'
 import { breakCalls } from '@/lib/gateways/payments/fake/break-calls'
 import { deliverDueEvents } from '@/lib/gateways/payments/fake/deliver'
+import { payments } from '@/lib/gateways/payments'
+import { CheckoutParams } from '@/lib/services/_steps/attempt-params'
 import { closeSandboxPool } from '@/lib/gateways/payments/fake/pool'
 import { applyProviderEvent } from '@/lib/services/payments/apply-provider-event'
 import { settleAttempt } from '@/lib/services/payments/settle-attempt'
@@ -140,7 +143,7 @@ describe('money that is not what was asked for', () => {
   test('another sum goes back whole, and the order keeps waiting', async () => {
     const { order, payUrl } = await placed(world.run)
     const [attempt] = await attemptsOf(order)
-    await attempt!.update({ amountMinor: 2_600 })
+    await attempt!.update({ amountMinor: minor(2_600) })
     await pay(payUrl)
     await settleAll()
     expect((await order.reload()).state).toBe('awaiting_deposit')
@@ -170,13 +173,11 @@ describe('money that is not what was asked for', () => {
       chargeId: null,
       feeMinor: null,
     } as never)
-    const { payments } = await import('@/lib/gateways/payments')
-    const { CheckoutParams } = await import('@/lib/services/_steps/attempt-params')
     const { amount, ...params } = CheckoutParams.parse(first!.params)
     const session = await payments().createCheckout({
       ...params,
       attemptId: second.id,
-      amount: amount as never,
+      amount: minor(amount),
       key: second.idempotencyKey,
       expiresAt: new Date(params.expiresAt),
     })
