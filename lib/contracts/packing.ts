@@ -1,5 +1,15 @@
 import { z } from 'zod'
-import { line, optionalLine, tick, uuid, wholeNumber } from './fields'
+import { countryCode, line, type OfferKind, offerKind, optionalLine, tick, uuid, wholeNumber } from './fields'
+
+/** One line of an order as a packer sees it: what it is, never what it cost. */
+export type PackLine = {
+  line: string
+  module: string
+  offer: OfferKind
+  quantity: number
+  /** Answers as given, such as `Front panel finish: sand`. */
+  choices: string[]
+}
 
 export type QueueItem = {
   order: string
@@ -7,9 +17,22 @@ export type QueueItem = {
   country: string
   name: string
   postedBy: string
-  lines: { line: string; offer: 'boards' | 'kit' | 'built'; quantity: number }[]
+  lines: PackLine[]
   parcel: string
 }
+
+const unlessEmpty = <T extends z.ZodType>(field: T) =>
+  z.preprocess((typed) => (typed === '' ? undefined : typed), field.optional())
+
+/** What narrows the queue; `after` is the `next` of the page before. */
+export const QueueQuery = z.object({
+  offer: unlessEmpty(offerKind),
+  country: unlessEmpty(countryCode),
+  after: unlessEmpty(
+    z.string().regex(/^\d{4}-\d\d-\d\d_\d{1,9}_[0-9a-f-]{36}$/, 'Start again from the first page.'),
+  ),
+})
+export type QueueQuery = z.infer<typeof QueueQuery>
 
 const millimetres = z.preprocess(
   (typed) => (typed === '' ? undefined : typed),
@@ -40,3 +63,69 @@ export const HandOverInput = z.object({
   tracking: optionalLine(40),
 })
 export type HandOverInput = z.infer<typeof HandOverInput>
+
+/** What the queue's page says beside the list. */
+export type PackSummary = {
+  /** Parcels that can be packed now, whatever the filter. */
+  toPack: number
+  packed: number
+  countries: string[]
+  /** Orders of each run under way, and how many of them are posted. */
+  progress: { run: string; module: string; number: number; posted: number; total: number }[]
+}
+
+export type StopReason = 'order_disputed' | 'destination_paused' | 'on_hold' | 'no_address' | 'not_yet'
+
+/** A paid order that is not in the queue, and why. */
+export type StoppedOrder = { order: string; number: string; country: string; reason: StopReason }
+
+/** A parcel that has left the queue: packed, or handed over. */
+export type PackedParcel = {
+  parcel: string
+  number: number
+  orderNumber: string
+  name: string
+  country: string
+  grams: number
+  service: string | null
+  tracking: string | null
+  at: string
+}
+
+type ParcelState = 'open' | 'packed' | 'handed_over' | 'delivered' | 'lost' | 'returned' | 'discarded'
+
+/** One parcel as its page shows it: what is on it and in it, and nothing else of the order. */
+export type ParcelPage = {
+  parcel: string
+  number: number
+  state: ParcelState
+  order: string
+  orderNumber: string
+  nth: number
+  of: number
+  /** Why it must not go out; null when it may. */
+  stop: string | null
+  onHoldReason: string | null
+  country: string
+  to: string[]
+  toOwnScript: string[] | null
+  lines: (PackLine & { serials: string[]; hasUnits: boolean })[]
+  expectedGrams: number | null
+  toleranceGrams: number | null
+  noticesLightest: boolean
+  grams: number | null
+  sizeMm: [number, number, number] | null
+  services: { name: string; maxGrams: number; tracked: boolean }[]
+  quotedService: string | null
+  service: string | null
+  tracking: string | null
+  trackingKind: 's10' | 'other' | null
+  handedOverAt: string | null
+  timeZone: string
+}
+
+/** Which papers are wanted; sizes as in the printer. */
+export const PaperQuery = QueueQuery.extend({
+  size: unlessEmpty(z.enum(['A4', 'Letter'], { error: 'Choose A4 or Letter.' })),
+})
+export type PaperQuery = z.infer<typeof PaperQuery>

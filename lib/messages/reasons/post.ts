@@ -8,6 +8,8 @@ export const post: Record<string, string> = {
   destination_paused:
     'Posting to this country is paused at present. Set the parcel aside and take the next one.',
   on_hold: 'This parcel is on hold. Its page says why; take the next one.',
+  label_void:
+    'The address has changed since the slip was printed. Throw the slip and its label away and print them again, then pack.',
   already_packed: 'This parcel is packed already. Open its page to hand it over, or to unpack it.',
   already_handed_over: 'This parcel has been handed over and cannot be changed any more.',
   parcel_discarded: 'This parcel was taken apart. Look in the queue for the order’s new one.',

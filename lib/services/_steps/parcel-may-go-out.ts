@@ -23,5 +23,6 @@ export async function parcelMayGoOut(
     disputed: order.disputedAt !== null,
     destinationPaused: paused > 0,
     onHold: parcel.onHoldReason !== null,
+    labelVoid: parcel.labelVoidAt !== null,
   })
 }

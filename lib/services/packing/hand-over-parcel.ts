@@ -33,7 +33,7 @@ type Command = {
  * Hands a packed parcel to the post: the buyer's mail goes out, and with the order's last parcel the order is posted and
  * its money becomes sales.
  * Refuses: not_found · forbidden · not_packed · already_handed_over · parcel_discarded · order_cancelled · order_not_paid ·
- * order_disputed · destination_paused · on_hold · invalid, at `service` (it takes no such parcel, or does not go there)
+ * order_disputed · destination_paused · on_hold · label_void · invalid, at `service` (it takes no such parcel, or does not go there)
  * or `tracking` (mistyped, or on another parcel).
  * Locks: run, order, parcel. Writes: parcel, units, order, ledger, mail, audit; the module's page is made anew. Repeat:
  * refused as already_handed_over.

@@ -20,7 +20,7 @@ import { unitsLeft } from './units-left'
 /**
  * Packs a parcel: its own lines, each once and whole, weighed. The order is packed when all of it is in packed parcels.
  * Refuses: not_found · forbidden · already_packed · already_handed_over · parcel_discarded · order_cancelled ·
- * order_not_paid · order_disputed · destination_paused · on_hold · invalid, with a sentence per field ·
+ * order_not_paid · order_disputed · destination_paused · on_hold · label_void · invalid, with a sentence per field ·
  * weight_surprise, when the scale differs by more than the tolerance and nobody confirmed it.
  * Locks: run, order, parcel, the run's units where serial numbers are given. Writes: parcel, its lines, units, order,
  * audit. Repeat: refused as already_packed.

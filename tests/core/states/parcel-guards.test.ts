@@ -3,7 +3,13 @@ import { ok, refuse } from '@/lib/core/result'
 import type { OrderState } from '@/lib/core/states/order'
 import { mayGoOut } from '@/lib/core/states/parcel-guards'
 
-const fine = { order: 'paid' as OrderState, disputed: false, destinationPaused: false, onHold: false }
+const fine = {
+  order: 'paid' as OrderState,
+  disputed: false,
+  destinationPaused: false,
+  onHold: false,
+  labelVoid: false,
+}
 
 test('a parcel of a paid or packed order goes out', () => {
   expect(mayGoOut(fine)).toEqual(ok(true))
@@ -25,8 +31,9 @@ test.each<[OrderState, string]>([
   expect(mayGoOut({ ...fine, order })).toEqual(refuse(reason))
 })
 
-test('a dispute, a paused destination and a hold stop it, the gravest named first', () => {
-  expect(mayGoOut({ ...fine, onHold: true })).toEqual(refuse('on_hold'))
+test('a dispute, a paused destination, a hold and a void label stop it, the gravest named first', () => {
+  expect(mayGoOut({ ...fine, labelVoid: true })).toEqual(refuse('label_void'))
+  expect(mayGoOut({ ...fine, onHold: true, labelVoid: true })).toEqual(refuse('on_hold'))
   expect(mayGoOut({ ...fine, onHold: true, destinationPaused: true })).toEqual(refuse('destination_paused'))
   expect(mayGoOut({ ...fine, destinationPaused: true, disputed: true })).toEqual(refuse('order_disputed'))
   expect(mayGoOut({ ...fine, disputed: true, order: 'cancelled' })).toEqual(refuse('order_cancelled'))

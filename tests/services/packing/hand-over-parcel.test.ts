@@ -17,9 +17,7 @@ import {
 } from '@/models'
 import { NOW } from '@/tests/support/worlds/base'
 import { makeUnit } from '@/tests/support/worlds/parcel'
-import { actorOf } from '@/tests/support/worlds/person'
-import { makeRun } from '@/tests/support/worlds/run'
-import { packingWorld } from './packing-world'
+import { elsewhere, packingWorld } from './packing-world'
 
 let world: Awaited<ReturnType<typeof packingWorld>>
 beforeAll(async () => {
@@ -209,12 +207,9 @@ describe('what stops it', () => {
     await cancelled.order.update({ state: 'cancelled', cancelledAt: NOW, cancelCause: 'run_called_off' })
     expect(await handOver(cancelled.parcel.id)).toEqual(refuse('order_cancelled'))
     const { parcel } = await packed()
-    const other = await makeRun()
-    const stranger = await actorOf(other.owner)
-    expect(await handOver(parcel.id, undefined, { actor: stranger })).toEqual(refuse('forbidden'))
-    expect(await handOver(parcel.id, undefined, { actor: stranger, workshopId: other.workshop.id })).toEqual(
-      refuse('not_found'),
-    )
+    const stranger = await elsewhere()
+    expect(await handOver(parcel.id, undefined, { actor: stranger.actor })).toEqual(refuse('forbidden'))
+    expect(await handOver(parcel.id, undefined, stranger)).toEqual(refuse('not_found'))
   })
 
   test('undo is possible until the hand-over, and not after', async () => {

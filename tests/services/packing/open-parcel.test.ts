@@ -2,16 +2,13 @@ import { beforeAll, expect, test } from 'vitest'
 import { ok } from '@/lib/core/result'
 import { inTransaction } from '@/lib/db/in-transaction'
 import { discardParcels } from '@/lib/services/_steps/discard-parcels'
-import { readdressParcels } from '@/lib/services/_steps/readdress-parcels'
 import { fillQueue } from '@/lib/services/packing/fill-queue'
 import { packParcel } from '@/lib/services/packing/pack-parcel'
 import { AuditEntry, Destination, Order, Parcel, ParcelLine, Unit } from '@/models'
 import { NOW } from '@/tests/support/worlds/base'
-import { makeAddress, makeOrder } from '@/tests/support/worlds/order'
+import { makeOrder } from '@/tests/support/worlds/order'
 import { makeUnit } from '@/tests/support/worlds/parcel'
-import { actorOf, makePerson } from '@/tests/support/worlds/person'
-import { makeRun } from '@/tests/support/worlds/run'
-import { open, packingWorld } from './packing-world'
+import { elsewhere, open, packingWorld } from './packing-world'
 
 let world: Awaited<ReturnType<typeof packingWorld>>
 beforeAll(async () => {
@@ -99,7 +96,7 @@ test('once units are recorded, an order waits until enough of them have passed',
 test('the queue is filled by those who may open parcels, of the own workshop only', async () => {
   const house = await packingWorld()
   await house.paidOrder()
-  const stranger = await actorOf((await makeRun()).owner)
+  const { actor: stranger } = await elsewhere()
   const asked = { workshopId: house.workshopId, now: NOW }
   expect(await fillQueue({ actor: stranger, ...asked })).toMatchObject({ reason: 'forbidden' })
   expect(await fillQueue({ actor: { kind: 'visitor' }, ...asked })).toMatchObject({ reason: 'forbidden' })
@@ -131,16 +128,4 @@ test('a called-off order leaves no parcel behind: packed ones are unpacked first
   expect(await order.reload()).toMatchObject({ state: 'paid', packedAt: null })
   expect(await unit.reload()).toMatchObject({ state: 'passed', orderLineId: null })
   await Unit.destroy({ where: { id: unit.id } })
-})
-
-test('a changed address reaches open parcels and voids what was printed', async () => {
-  const { order, parcel, person } = await world.queued()
-  const elsewhere = await makeAddress(world.workshopId, person, { city: 'Kiel', postcode: '24103' })
-  await parcel.update({ printedAt: NOW })
-  await order.update({ addressId: elsewhere.id, addressFingerprint: elsewhere.fingerprint })
-  await inTransaction(async (tx) => ok(await readdressParcels(tx, order, NOW)))
-  expect(await parcel.reload()).toMatchObject({ addressId: elsewhere.id, labelVoidAt: NOW })
-  const other = await world.queued(undefined, { person: await makePerson() })
-  await inTransaction(async (tx) => ok(await readdressParcels(tx, other.order, NOW)))
-  expect((await other.parcel.reload()).labelVoidAt).toBeNull()
 })

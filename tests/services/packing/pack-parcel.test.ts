@@ -2,14 +2,13 @@ import { randomUUID } from 'node:crypto'
 import { beforeAll, describe, expect, test } from 'vitest'
 import type { PackInput } from '@/lib/contracts/packing'
 import { ok, refuse } from '@/lib/core/result'
+import { notePrinted } from '@/lib/services/packing/note-printed'
 import { packParcel } from '@/lib/services/packing/pack-parcel'
 import { reopenParcel } from '@/lib/services/packing/reopen-parcel'
-import { AuditEntry, Destination, Order, ParcelLine } from '@/models'
+import { AuditEntry, Destination, type Order, ParcelLine } from '@/models'
 import { NOW } from '@/tests/support/worlds/base'
 import { makeUnit } from '@/tests/support/worlds/parcel'
-import { actorOf } from '@/tests/support/worlds/person'
-import { makeRun } from '@/tests/support/worlds/run'
-import { packingWorld } from './packing-world'
+import { elsewhere, packingWorld } from './packing-world'
 
 let world: Awaited<ReturnType<typeof packingWorld>>
 beforeAll(async () => {
@@ -134,15 +133,27 @@ describe('what stops a parcel', () => {
     expect(await packParcel(cmd)).toEqual(refuse('destination_paused'))
   })
 
+  test('a label that became wrong, until the papers are printed again', async () => {
+    const { lines, parcel } = await world.queued()
+    await parcel.update({ printedAt: NOW, labelVoidAt: NOW })
+    const input = { lines: [{ line: lines[0]!.id, quantity: 1 }], grams: 420 }
+    expect(await pack(parcel.id, input)).toEqual(refuse('label_void'))
+    const asked = { workshopId: world.workshopId, parcelIds: [parcel.id], now: NOW }
+    expect(await notePrinted({ actor: { kind: 'visitor' }, ...asked })).toEqual(refuse('forbidden'))
+    const { actor: stranger } = await elsewhere()
+    expect(await notePrinted({ actor: stranger, ...asked })).toEqual(refuse('forbidden'))
+    expect(await pack(parcel.id, input)).toEqual(refuse('label_void'))
+    expect(await notePrinted({ actor: world.packer, ...asked })).toEqual(ok({ printed: 1 }))
+    expect(await parcel.reload()).toMatchObject({ printedAt: NOW, labelVoidAt: null })
+    expect(await pack(parcel.id, input)).toMatchObject({ ok: true })
+  })
+
   test('a foreign workshop, its packer and the bench find nothing', async () => {
     const { lines, parcel } = await world.queued()
     const input = { lines: [{ line: lines[0]!.id, quantity: 1 }], grams: 420 }
-    const other = await makeRun()
-    const stranger = await actorOf(other.owner)
-    expect(await pack(parcel.id, input, { actor: stranger })).toEqual(refuse('forbidden'))
-    expect(await pack(parcel.id, input, { actor: stranger, workshopId: other.workshop.id })).toEqual(
-      refuse('not_found'),
-    )
+    const stranger = await elsewhere()
+    expect(await pack(parcel.id, input, { actor: stranger.actor })).toEqual(refuse('forbidden'))
+    expect(await pack(parcel.id, input, stranger)).toEqual(refuse('not_found'))
     expect(await pack(randomUUID(), input)).toEqual(refuse('not_found'))
     expect(await pack(parcel.id, input, { actor: { kind: 'visitor' } })).toEqual(refuse('forbidden'))
   })

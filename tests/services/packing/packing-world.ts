@@ -3,15 +3,19 @@ import { ok } from '@/lib/core/result'
 import { inTransaction } from '@/lib/db/in-transaction'
 import { openParcelForOrder } from '@/lib/services/_steps/open-parcel-for-order'
 import { postLedger } from '@/lib/services/_steps/post-ledger'
-import { Address, type Order, type Person, type RunOffer } from '@/models'
+import { type Address, type Order, type Person, type RunOffer } from '@/models'
 import { NOW } from '@/tests/support/worlds/base'
 import { makeAddress, makeOrder } from '@/tests/support/worlds/order'
 import { actorOf, makePerson, makeUser } from '@/tests/support/worlds/person'
+import { makeModule } from '@/tests/support/worlds/module'
 import { makeRun } from '@/tests/support/worlds/run'
+import { makeWorkshop } from '@/tests/support/worlds/workshop'
 
 /** A locked run whose workshop has a packer; a kit weighs 420 g, a built one 460 g, a board set 150 g. */
 export async function packingWorld() {
-  const house = await makeRun({}, { state: 'locked', lockedAt: NOW, maximum: 60 })
+  const { zones, owner, ...shop } = await makeWorkshop()
+  const design = await makeModule(shop.workshop)
+  const house = await makeRun({ ...shop, ...design }, { state: 'locked', lockedAt: NOW, maximum: 60 })
   const lene = await makePerson({ name: 'Lene Quast' })
   await makeUser({ person: lene, workshopId: house.workshop.id, role: 'packer' })
   const packer = await actorOf(lene)
@@ -43,7 +47,13 @@ export async function packingWorld() {
     return { ...made, parcel }
   }
 
-  return { ...house, workshopId, lene, packer, paidOrder, queued, open }
+  return { ...house, zones, owner, workshopId, lene, packer, paidOrder, queued, open }
+}
+
+/** The owner of a workshop that has nothing to do with this one. */
+export async function elsewhere() {
+  const { workshop, owner } = await makeWorkshop()
+  return { workshopId: workshop.id, owner, actor: await actorOf(owner) }
 }
 
 export async function open(order: Order) {
