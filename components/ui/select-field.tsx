@@ -38,12 +38,7 @@ export function SelectField(props: Props) {
         >
           {empty === false ? null : <option value="">{empty ?? ui.chooseOne}</option>}
           {options.map((option) => (
-            <option
-              key={option.value}
-              value={option.value}
-              disabled={option.disabled}
-              className="bg-sheet text-ink"
-            >
+            <option key={option.value} value={option.value} disabled={option.disabled}>
               {option.label}
             </option>
           ))}

@@ -18,6 +18,7 @@ const STATUS: Record<string, number> = {
   token_expired: 409,
   too_many: 429,
   busy: 503,
+  bug: 500,
 }
 
 export const statusOf = (reason: string): number => STATUS[reason] ?? 409

@@ -61,7 +61,7 @@ type Spec<P, Q, B> = {
 }
 
 type Answer = Response | Result<unknown, string> | FieldRefusal
-type Segment = { params: Promise<Record<string, string | string[] | undefined>> }
+type Segment = { params?: Promise<Record<string, string | string[] | undefined>> }
 
 /**
  * The one wrapper of a route handler: origin, session, rate limit, deed, input, then the body; a refusal becomes a
@@ -75,7 +75,9 @@ export function route<P = Record<string, string>, Q = unknown, B = unknown>(
   return async (request: Request, segment: Segment): Promise<Response> => {
     const requestId = request.headers.get('x-request-id') ?? randomUUID()
     try {
-      const answer = await answerOf(spec, run, request, await segment.params)
+      // A route without a parameter is handed none at all.
+      const params = (await segment.params) ?? {}
+      const answer = await answerOf(spec, run, request, params)
       answer.headers.set('x-request-id', requestId)
       return answer
     } catch (error) {
