@@ -12,6 +12,13 @@ export const FORM_CONTRACTS = {
   address: async () => (await import('@/lib/contracts/address')).AddressInput,
   pack: async () => (await import('@/lib/contracts/packing')).PackInput,
   handOver: async () => (await import('@/lib/contracts/packing')).HandOverInput,
+  details: async () => (await import('@/lib/contracts/settings')).DetailsInput,
+  postage: async () => (await import('@/lib/contracts/settings')).PostageInput,
+  terms: async () => (await import('@/lib/contracts/settings')).TermsInput,
+  moduleNew: async () => (await import('@/lib/contracts/module-forms')).ModuleNewInput,
+  moduleFacts: async () => (await import('@/lib/contracts/module-forms')).ModuleFactsInput,
+  offer: async () => (await import('@/lib/contracts/module-forms')).OfferInput,
+  plan: async () => (await import('@/lib/contracts/plan-forms')).PlanInput,
 } satisfies Record<string, () => Promise<z.ZodType>>
 
 export type FormName = keyof typeof FORM_CONTRACTS

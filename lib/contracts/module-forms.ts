@@ -45,6 +45,9 @@ export const revisionLetter = z
   .toUpperCase()
   .regex(/^[A-Z]{1,2}$/, 'Choose a revision by its letter.')
 
+/** The parts of an address that name a module. */
+export const ModuleParams = z.object({ workshop: slug, module: slug })
+
 export const ModuleNewInput = z.object({ name, slug, oneLine, widthHp, depthMm })
 export type ModuleNewInput = z.infer<typeof ModuleNewInput>
 

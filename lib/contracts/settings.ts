@@ -130,6 +130,7 @@ export type TermsView = {
 }
 export type MemberView = {
   id: string
+  personId: string
   email: string
   name: string | null
   role: 'owner' | 'bench' | 'packer'

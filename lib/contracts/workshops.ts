@@ -73,3 +73,42 @@ export type HostWorkshop = {
   runs: number
   units: number
 }
+
+/** What stands between starting a workshop and its first run, in the order in which it is quickest done. */
+export const FIRST_STEPS = [
+  'account',
+  'details',
+  'terms',
+  'postage',
+  'module',
+  'offers',
+  'revision',
+  'first_unit',
+  'plan',
+  'packer',
+  'publish',
+] as const
+export type FirstStep = (typeof FIRST_STEPS)[number]
+
+/** The owner's desk: how far the workshop is, and the runs that are going. */
+export type Desk = {
+  workshop: {
+    slug: string
+    name: string
+    state: 'pending' | 'open' | 'suspended'
+    currency: string
+    chargesEnabled: boolean
+  }
+  steps: { key: FirstStep; done: boolean }[]
+  /** The module begun first, whose page the steps lead to; null while there is none. */
+  firstModule: string | null
+  runs: {
+    id: string
+    module: string
+    state: 'draft' | 'taking_deposits' | 'locked'
+    minimum: number
+    maximum: number
+    committed: number
+    decideBy: string
+  }[]
+}

@@ -13,6 +13,7 @@ export const settingsWords = {
   save: 'Save',
   saved: 'Saved',
   savedWords: 'What you entered is saved.',
+  notDone: 'Not done',
 
   who: 'Who you are',
   name: 'Name of the workshop',

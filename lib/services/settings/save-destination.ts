@@ -6,23 +6,20 @@ import { ok, refuse } from '@/lib/core/result'
 import { inTransaction } from '@/lib/db/in-transaction'
 import { settingsWords as words } from '@/lib/messages/settings'
 import { Destination, Module, Offer, Workshop } from '@/models'
+import { recordMove } from '../_steps/record-move'
 import { workshopPagesChanged } from '../_steps/workshop-pages-changed'
 
 /**
  * Opens, closes or pauses a country for every offer of one module, or of all. Orders placed before are not touched; while a
  * destination is paused their parcels wait.
- * Refuses: not_found · forbidden · invalid (no zone reaches the country). Locks: the workshop. Writes: destinations;
+ * Refuses: not_found · forbidden · invalid (no zone reaches the country). Locks: the workshop. Writes: destinations, audit;
  * public pages are made anew. Repeat: safe.
  */
-export function saveDestination(cmd: {
-  actor: Actor
-  workshopId: string
-  input: DestinationInput
-  now: Date
-}) {
-  const { actor, workshopId, input } = cmd
+export function saveDestination(cmd: { actor: Actor; workshopId: string; input: DestinationInput }) {
+  const { actor, workshopId, input, now } = cmd
   return inTransaction(async (tx) => {
-    if (!can(actor, 'destination:write', { workshopId })) return refuse('forbidden')
+    if (actor.kind !== 'person' || !can(actor, 'destination:write', { workshopId }))
+      return refuse('forbidden')
     const workshop = await Workshop.findByPk(workshopId, { transaction: tx, lock: tx.LOCK.UPDATE })
     if (!workshop) return refuse('not_found')
     const offers = await Offer.findAll({
@@ -45,6 +42,16 @@ export function saveDestination(cmd: {
       { where: { offerId: offers.map(({ id }) => id), country: input.country }, transaction: tx },
     )
     if (changed === 0) return refuseFields({ country: words.unknownCountryOfZones })
+    await recordMove(tx, {
+      workshopId,
+      subjectType: 'destination',
+      subjectId: workshop.id,
+      from: null,
+      event: input.state,
+      to: input.country,
+      byPersonId: actor.personId,
+      at: now,
+    })
     await workshopPagesChanged(tx, workshop)
     return ok({ changed })
   })

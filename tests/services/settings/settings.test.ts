@@ -134,12 +134,12 @@ test('what an owner closed stays closed when zones change', async () => {
     now: NOW,
   })
   expect(added.ok).toBe(true)
-  expect(await saveDestination({ actor: owner, workshopId, input })).toEqual(ok({ changed: 3 }))
+  expect(await saveDestination({ actor: owner, workshopId, input, now: NOW })).toEqual(ok({ changed: 3 }))
   await savePostage({ actor: owner, workshopId, input: zone({ name: 'Faroes', countries: 'FO' }), now: NOW })
   const rows = await Destination.findAll({ where: { offerId: world.offers.kit.id, country: 'FR' } })
   expect(rows.map(({ state, reason }) => [state, reason])).toEqual([['paused', 'The post is on strike.']])
   const unknown = DestinationInput.parse({ country: 'MN', state: 'closed', reason: 'Too far.' })
-  expect(await saveDestination({ actor: owner, workshopId, input: unknown })).toMatchObject({
+  expect(await saveDestination({ actor: owner, workshopId, input: unknown, now: NOW })).toMatchObject({
     errors: { country: expect.any(String) },
   })
 })

@@ -1,0 +1,28 @@
+import { RowsField } from '@/components/forms/rows-field'
+import type { FormState } from '@/components/ui/form-state'
+import { Sheet } from '@/components/ui/sheet'
+import { planAdminWords as words } from '@/lib/messages/plan-admin'
+
+/** The steps from the lock to the last parcel, each with three estimates. */
+export function PlanSchedule({ form }: { form: FormState }) {
+  return (
+    <Sheet title={words.schedule}>
+      <RowsField
+        name="steps"
+        legend={words.schedule}
+        hint={words.scheduleHint}
+        rowLabel={words.stepRow}
+        form={form}
+        spare={2}
+        most={30}
+        columns={[
+          { name: 'name', label: words.step },
+          { name: 'optimistic', label: words.optimistic, kind: 'number', unit: words.days },
+          { name: 'likely', label: words.likely, kind: 'number', unit: words.days },
+          { name: 'pessimistic', label: words.pessimistic, kind: 'number', unit: words.days },
+          { name: 'after', label: words.after },
+        ]}
+      />
+    </Sheet>
+  )
+}
