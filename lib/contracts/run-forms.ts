@@ -3,9 +3,13 @@ type Fields = Record<string, unknown>
 const rowsOf = (value: unknown): Fields[] => (Array.isArray(value) ? (value as Fields[]) : [])
 const isFilled = (value: unknown) => typeof value === 'string' && value.trim() !== ''
 
-/** A drafted run as its form sends it: an offer whose posted-by date is empty is left out. */
-export function readRunForm(body: Fields): Fields {
-  return { ...body, offers: rowsOf(body.offers).filter(({ postedBy }) => isFilled(postedBy)) }
+/** A drafted run as its form sends it: an offer whose posted-by date is empty is left out, an empty head start is the workshop's. */
+export function readRunForm({ headStartHours, ...body }: Fields): Fields {
+  return {
+    ...body,
+    ...(isFilled(headStartHours) && { headStartHours }),
+    offers: rowsOf(body.offers).filter(({ postedBy }) => isFilled(postedBy)),
+  }
 }
 
 /** A lock as its form sends it: lines let pass without a reason are not let pass; the words to be typed must be there. */
