@@ -7,6 +7,30 @@ import type { Row } from './roles'
  */
 export const API_TABLE: Readonly<Record<string, Row>> = {
   'POST /api/account/second-factor': '401 422 422 422 422 422 422',
+  'GET /api/admin/[workshop]': '401 404 200 404 404 404 404',
+  'POST /api/admin/[workshop]/modules': '401 404 422 404 404 404 404',
+  'POST /api/admin/[workshop]/modules/[module]': '401 404 422 404 404 404 404',
+  // A run of the small world's module takes deposits.
+  'POST /api/admin/[workshop]/modules/[module]/archive': '401 404 409 404 404 404 404',
+  'POST /api/admin/[workshop]/modules/[module]/first-unit': '401 404 422 422 404 404 404',
+  'POST /api/admin/[workshop]/modules/[module]/lessons': '401 404 422 422 404 404 404',
+  'POST /api/admin/[workshop]/modules/[module]/lessons/mend': '401 404 422 422 404 404 404',
+  'POST /api/admin/[workshop]/modules/[module]/lessons/waive': '401 404 422 404 404 404 404',
+  'POST /api/admin/[workshop]/modules/[module]/offers': '401 404 422 404 404 404 404',
+  'POST /api/admin/[workshop]/modules/[module]/parts': '401 404 422 404 404 404 404',
+  'POST /api/admin/[workshop]/modules/[module]/plan': '401 404 422 404 404 404 404',
+  // It is published already, which is no mistake.
+  'POST /api/admin/[workshop]/modules/[module]/publish': '401 404 200 404 404 404 404',
+  'POST /api/admin/[workshop]/modules/[module]/revisions': '401 404 422 404 404 404 404',
+  'POST /api/admin/[workshop]/modules/[module]/samples': '401 404 422 422 404 404 404',
+  'POST /api/admin/[workshop]/settings/destinations': '401 404 422 404 404 404 404',
+  'POST /api/admin/[workshop]/settings/details': '401 404 422 404 404 404 404',
+  'POST /api/admin/[workshop]/settings/members': '401 404 422 404 404 404 404',
+  'POST /api/admin/[workshop]/settings/members/remove': '401 404 422 404 404 404 404',
+  'POST /api/admin/[workshop]/settings/members/withdraw': '401 404 422 404 404 404 404',
+  'POST /api/admin/[workshop]/settings/postage': '401 404 422 404 404 404 404',
+  'POST /api/admin/[workshop]/settings/postage/remove': '401 404 422 404 404 404 404',
+  'POST /api/admin/[workshop]/settings/terms': '401 404 422 404 404 404 404',
   // The account of the small world is not in the provider's books: the owner gets as far as the provider.
   'POST /api/admin/[workshop]/payment-account': '401 404 409 404 404 404 404',
   'GET /api/auth/[...nextauth]': '405 405 405 405 405 405 405',
@@ -28,4 +52,5 @@ export const API_TABLE: Readonly<Record<string, Row>> = {
   'POST /api/signups/confirm': '422 422 422 422 422 422 422',
   'POST /api/signups/take-back': '422 422 422 422 422 422 422',
   'POST /api/workshops': '401 422 422 422 422 422 422',
+  'POST /api/workshops/join': '401 422 422 422 422 422 422',
 }
