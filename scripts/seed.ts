@@ -22,7 +22,7 @@ if (await isEmpty()) {
   if (marker) writeFileSync(marker, '')
   process.stdout.write('Making the demo (a minute or so) …\n')
   const stage = await openDemoStage(new Date(Date.now() - DEMO_DAYS * 86_400_000))
-  await seedDemo(stage, (sentence: string) => process.stdout.write(`${sentence}\n`))
+  await seedDemo(stage)
   await stage.close()
   if (marker) rmSync(marker)
 }

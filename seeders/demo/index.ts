@@ -1,10 +1,12 @@
-import { designModule } from './acts/design-module'
 import { foundWorkshop } from './acts/found-workshop'
-import { KEDGE } from './hollow-pier/kedge'
-import { kedgeHistory } from './hollow-pier/kedge-history'
+import { fenLampStory } from './fen-lamp/story'
+import { fairleadStory } from './hollow-pier/fairlead-story'
+import { kedgeStory } from './hollow-pier/kedge-story'
+import { rowlockStory } from './hollow-pier/rowlock-story'
 import { HOLLOW_PIER } from './hollow-pier/workshop'
 import { PEOPLE } from './people'
 import type { Stage } from './stage'
+import { tellTogether } from './story'
 
 /** Who can sign in to the demo, in the order a visitor would try them. */
 export const DEMO_SIGN_INS: readonly { email: string; what: string }[] = [
@@ -19,10 +21,14 @@ export const DEMO_SIGN_INS: readonly { email: string; what: string }[] = [
 export const DEMO_DAYS = 330
 
 /** Makes the demo by the services, as people act, from a day in the past up to now. */
-export async function seedDemo(stage: Stage, say: (sentence: string) => void): Promise<void> {
+export async function seedDemo(stage: Stage): Promise<void> {
+  const today = new Date()
   const house = await foundWorkshop(stage, HOLLOW_PIER)
-  await designModule(stage, house, KEDGE)
-  say('Hollow Pier Modular is open.')
-  await kedgeHistory(stage, house)
+  await tellTogether(stage, [
+    kedgeStory(stage, house),
+    fairleadStory(stage, house, today),
+    rowlockStory(stage, house, today),
+    fenLampStory(stage, today),
+  ])
   await stage.goTo(new Date())
 }

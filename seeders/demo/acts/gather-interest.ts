@@ -4,6 +4,7 @@ import { submitSignUp } from '@/lib/services/signups/submit-signup'
 import { chanceOf } from '../chance'
 import type { Buyer } from '../crowd'
 import type { Stage } from '../stage'
+import type { Story } from '../story'
 import { done } from './done'
 import { sideBySide } from './side-by-side'
 
@@ -38,13 +39,13 @@ const QUANTITY: readonly (readonly [number, number])[] = [
 ]
 
 /** People register interest over some days and confirm from the mail; gives back those who did. */
-export async function gatherInterest(stage: Stage, given: Interest): Promise<Interested[]> {
+export async function* gatherInterest(stage: Stage, given: Interest): Story<Interested[]> {
   const chance = chanceOf(given.seed)
   const began = await stage.now()
   const confirmed: Interested[] = []
-  const perDay = Math.ceil(given.people.length / given.days)
   for (let day = 0; day < given.days; day += 1) {
-    const today = given.people.slice(day * perDay, (day + 1) * perDay).map((buyer) => ({
+    const upTo = (passed: number) => Math.round((given.people.length * passed) / given.days)
+    const today = given.people.slice(upTo(day), upTo(day + 1)).map((buyer) => ({
       ...buyer,
       offer: chance.weighted(given.offers),
       quantity: chance.weighted(QUANTITY),
@@ -53,7 +54,6 @@ export async function gatherInterest(stage: Stage, given: Interest): Promise<Int
       topPriceMinor: given.topPrices && chance.pick(given.topPrices),
       updates: chance.next() < 0.6,
     }))
-    if (today.length === 0) break
     const now = await stage.now()
     await sideBySide(today, async ({ confirms: _, name: _name, address: _address, ...asked }) => {
       const input = SignUpInput.parse({ workshop: given.workshop, module: given.module, ...asked })
@@ -66,7 +66,13 @@ export async function gatherInterest(stage: Stage, given: Interest): Promise<Int
       done(await confirmSignUp({ token, now: await stage.now() }), 'confirming')
     })
     confirmed.push(...sure)
-    await stage.goTo(new Date(began.getTime() + (day + 1) * 86_400_000))
+    yield new Date(began.getTime() + (day + 1) * 86_400_000)
   }
   return confirmed
 }
+
+/** What somebody who was interested orders: what they said. */
+export const orderOf = ({ offer, quantity, ...buyer }: Interested) => ({
+  ...buyer,
+  lines: [{ offer, quantity }],
+})

@@ -1,7 +1,9 @@
 import { OrderInput } from '@/lib/contracts/orders'
+import { payOrder } from '@/lib/services/payments/pay-order'
 import { placeOrder } from '@/lib/services/orders/place-order'
 import type { Buyer } from '../crowd'
 import type { Stage } from '../stage'
+import type { Story } from '../story'
 import { done } from './done'
 
 /** Published test cards by what they do: see lib/gateways/payments/fake/cards.ts. */
@@ -18,28 +20,49 @@ export type Wanted = Buyer & {
   card?: string
 }
 
-/** People order and pay the deposit, one after another over some days from now. Gives back each order's id. */
-export async function placeOrders(
+/**
+ * People order over some days from now, one after another, and fill in the card page while the next one orders. Gives
+ * back each order's id.
+ */
+export async function* placeOrders(
   stage: Stage,
   run: string,
   wanted: readonly Wanted[],
   days: number,
-): Promise<string[]> {
+): Story<string[]> {
   const began = await stage.now()
   const orders: string[] = []
-  const perDay = Math.ceil(wanted.length / days)
-  for (let day = 0; day * perDay < wanted.length; day += 1) {
-    for (const { email, address, lines, card } of wanted.slice(day * perDay, (day + 1) * perDay)) {
+  for (let day = 0; day < days; day += 1) {
+    const upTo = (passed: number) => Math.round((wanted.length * passed) / days)
+    const paying: Promise<void>[] = []
+    for (const { email, address, lines, card = CARD.pays } of wanted.slice(upTo(day), upTo(day + 1))) {
       const [actor, now] = [await stage.person(email), await stage.now()]
       const input = OrderInput.parse({ run, lines, address })
       const placed = done(await placeOrder({ actor, input, now }), `an order of ${email}`)
       orders.push(placed.order)
-      if (placed.payUrl === null) continue
-      const outcome = await stage.pay(placed.payUrl, card ?? CARD.pays)
-      if (outcome !== 'captured') throw new Error(`the demo: the deposit of ${email} ${outcome}`)
+      if (placed.payUrl !== null) paying.push(pay(stage, placed.payUrl, card))
     }
+    await Promise.all(paying)
     await stage.settle()
-    await stage.goTo(new Date(began.getTime() + (day + 1) * 86_400_000))
+    yield new Date(began.getTime() + (day + 1) * 86_400_000)
   }
   return orders
+}
+
+/** Somebody pays what is due now from the page of their order. */
+export async function payWhatIsDue(
+  stage: Stage,
+  email: string,
+  orderId: string,
+  card: string,
+): Promise<void> {
+  const [actor, now] = [await stage.person(email), await stage.now()]
+  const { payUrl } = done(await payOrder({ actor, orderId, otherCard: true, now }), `a payment of ${email}`)
+  await pay(stage, payUrl, card)
+  await stage.settle()
+}
+
+async function pay(stage: Stage, payUrl: string, card: string): Promise<void> {
+  const outcome = await stage.pay(payUrl, card)
+  if (outcome !== 'captured') throw new Error(`the demo: a payment ${outcome}`)
 }

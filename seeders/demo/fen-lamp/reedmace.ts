@@ -1,6 +1,12 @@
 import type { ModulePlan } from '../acts/design-module'
 import { CAUTIONS } from '../cautions'
-import { shortPlan, threeOffers, usualParts } from '../hollow-pier/shared'
+import { shortPlan, threeOffers, usualParts, type Prices } from '../hollow-pier/shared'
+
+export const REEDMACE_PRICES: Prices = {
+  boards: { priceMinor: 4800, depositMinor: 1200 },
+  kit: { priceMinor: 11_900, depositMinor: 3000 },
+  built: { priceMinor: 21_900, depositMinor: 5000 },
+}
 
 /** Two resonators; dear to make, and honestly not wanted by enough people yet. */
 export const REEDMACE: ModulePlan = {
@@ -29,11 +35,7 @@ export const REEDMACE: ModulePlan = {
     specification: [{ name: 'Range', value: '40 Hz to 6 kHz, tracks for four octaves' }],
     cautions: CAUTIONS,
   },
-  offers: threeOffers('GBP', 'GB', {
-    boards: { priceMinor: 4800, depositMinor: 1200 },
-    kit: { priceMinor: 11_900, depositMinor: 3000 },
-    built: { priceMinor: 21_900, depositMinor: 5000 },
-  }),
+  offers: threeOffers('GBP', 'GB', REEDMACE_PRICES),
   revisions: [{ letter: 'A', note: 'Third board, first lettered one.' }],
   firstUnit: 'Tuned and left ringing for a night.',
   parts: usualParts({ jacks: 6, pots: 9, chips: 7, controller: false }),
