@@ -31,10 +31,12 @@ export function SelectField(props: Props) {
           id={id}
           name={name}
           required={!optional}
-          defaultValue={select.value === undefined ? (typedText(form, name) ?? '') : undefined}
           className={classNames(controlClass, className)}
           {...aria}
           {...select}
+          defaultValue={
+            select.value === undefined ? (typedText(form, name) ?? select.defaultValue ?? '') : undefined
+          }
         >
           {empty === false ? null : <option value="">{empty ?? ui.chooseOne}</option>}
           {options.map((option) => (

@@ -26,10 +26,10 @@ export function TextArea(props: FieldProps & Area) {
         name={name}
         rows={5}
         required={!optional}
-        defaultValue={area.value === undefined ? typedText(form, name) : undefined}
         className={classNames(controlClass, 'max-w-words resize-y', className)}
         {...aria}
         {...area}
+        defaultValue={area.value === undefined ? (typedText(form, name) ?? area.defaultValue) : undefined}
       />
     </FieldFrame>
   )

@@ -31,10 +31,10 @@ export function TextField(props: Props) {
           name={name}
           type="text"
           required={!optional}
-          defaultValue={input.value === undefined ? typedText(form, name) : undefined}
           className={classNames(controlClass, className)}
           {...aria}
           {...input}
+          defaultValue={input.value === undefined ? (typedText(form, name) ?? input.defaultValue) : undefined}
           aria-describedby={described}
         />
         {unit ? (

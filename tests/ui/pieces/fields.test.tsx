@@ -37,6 +37,23 @@ test('a field without trouble is neither invalid nor described', () => {
   expect(input).not.toHaveAttribute('aria-describedby')
 })
 
+test('what was typed stands again where a field starts with something, emptied ones too', () => {
+  const kept = { values: { quantity: '', country: 'FR', story: 'Mine.' } }
+  const countries = ['FR', 'IE'].map((value) => ({ value, label: value }))
+  render(
+    <>
+      <NumberField name="quantity" label="Quantity" defaultValue="1" form={kept} />
+      <SelectField name="country" label="Country" options={countries} defaultValue="IE" form={kept} />
+      <TextArea name="story" label="Story" defaultValue="Theirs." form={kept} />
+      <TextField name="email" label="E-mail" defaultValue="ada@example.org" />
+    </>,
+  )
+  expect(screen.getByRole('textbox', { name: 'Quantity' })).toHaveValue('')
+  expect(screen.getByRole('combobox', { name: 'Country' })).toHaveValue('FR')
+  expect(screen.getByRole('textbox', { name: 'Story' })).toHaveValue('Mine.')
+  expect(screen.getByRole('textbox', { name: 'E-mail' })).toHaveValue('ada@example.org')
+})
+
 test('numbers and sums are typed as text, with their unit read out', () => {
   render(
     <>

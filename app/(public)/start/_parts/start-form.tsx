@@ -29,8 +29,8 @@ export function StartForm({ form, email }: { form?: FormState; email: string }) 
         name="replyTo"
         type="email"
         label={words.replyTo}
-        defaultValue={form ? undefined : email}
         form={form}
+        {...(form ? {} : { defaultValue: email })}
       />
     </Form>
   )
