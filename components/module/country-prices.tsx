@@ -2,7 +2,7 @@
 import { useRef, useState } from 'react'
 import { SelectField } from '@/components/ui/select-field'
 import type { ModulePublic } from '@/lib/contracts/modules'
-import { publicWords as words } from '@/lib/messages/public'
+import { deliveryWords as words } from '@/lib/messages/delivery'
 import { paths } from '@/lib/paths'
 import type { TaxFacts } from './delivery-table'
 

@@ -2,7 +2,8 @@ import { Money } from '@/components/format/money'
 import { Table } from '@/components/ui/table'
 import type { Delivery, OfferDelivery } from '@/lib/contracts/modules'
 import { countryName, isCountry } from '@/lib/core/data/country'
-import { offerWords, publicWords as words } from '@/lib/messages/public'
+import { deliveryWords as words } from '@/lib/messages/delivery'
+import { offerWords } from '@/lib/messages/public'
 
 export type TaxFacts = { pricesIncludeTax: boolean; taxNote: string | null }
 
@@ -14,7 +15,7 @@ export function DeliveryTable({ delivery, tax }: { delivery: Delivery; tax: TaxF
   return (
     <div className="flex flex-col gap-3">
       <Table
-        caption={words.costCaption(isCountry(country) ? countryName(country) : country)}
+        caption={words.caption(isCountry(country) ? countryName(country) : country)}
         rows={offers}
         rowKey={(row) => row.offer}
         empty={words.noOffers}

@@ -7,7 +7,8 @@ import { Notice } from '@/components/ui/notice'
 import { Sheet } from '@/components/ui/sheet'
 import type { ModulePage, PageRun } from '@/lib/contracts/module-page'
 import { formatMoney } from '@/lib/core/money/format'
-import { offerWords, publicWords as words } from '@/lib/messages/public'
+import { offerNames } from '@/lib/messages/mails/words'
+import { publicWords as words } from '@/lib/messages/public'
 import { LOCALE } from '@/lib/messages/ui'
 import { writtenNumber } from '@/lib/messages/written'
 import { paths } from '@/lib/paths'
@@ -99,12 +100,18 @@ function factsOf(run: PageRun, zone: string) {
     ...(isTaking && !run.isOpenToAll && run.opensToAllAt
       ? [fact(words.opensToAll, <When at={run.opensToAllAt} zone={zone} />)]
       : []),
-    ...run.offers.map(({ offer, postedBy }) =>
-      fact(words.postedByOffer(offerWords[offer].toLowerCase()), <DayText day={postedBy} />),
-    ),
+    ...promisesOf(run).map(([name, day]) => fact(name, <DayText day={day} />)),
     ...(run.held > 0 ? [fact(words.held, writtenNumber(run.held))] : []),
     ...(run.waiting > 0 ? [fact(words.waiting, writtenNumber(run.waiting))] : []),
     fact(words.revision, run.revision),
     ...(isTaking ? [fact(words.limit, writtenNumber(run.limitPerPerson))] : []),
   ]
+}
+
+/** One line where every form is promised for the same day. */
+function promisesOf({ offers }: PageRun): [name: string, day: string][] {
+  const days = new Set(offers.map(({ postedBy }) => postedBy))
+  const [only] = days
+  if (days.size === 1 && only !== undefined) return [[words.postedBy, only]]
+  return offers.map(({ offer, postedBy }) => [words.postedByOffer(offerNames[offer]), postedBy])
 }

@@ -4,7 +4,8 @@ import { Facts } from '@/components/ui/facts'
 import { PlainText } from '@/components/ui/plain-text'
 import { Sheet } from '@/components/ui/sheet'
 import type { ModulePage } from '@/lib/contracts/module-page'
-import { offerWords, publicWords as words } from '@/lib/messages/public'
+import { offerNames } from '@/lib/messages/mails/words'
+import { publicWords as words } from '@/lib/messages/public'
 
 /** What must be known before building or using it: of the module, then of each form. */
 export function CautionsSheet({ page: { module, offers } }: { page: ModulePage }) {
@@ -13,19 +14,26 @@ export function CautionsSheet({ page: { module, offers } }: { page: ModulePage }
     <Sheet title={words.cautionsTitle} id="cautions">
       <div className="flex flex-col gap-3">
         {module.cautions ? <PlainText text={module.cautions} /> : null}
-        {offers
-          .filter(({ cautions }) => cautions !== '')
-          .map(({ offer, cautions }) => (
-            <div key={offer}>
-              <h3 className="text-17">{words.cautionsOffer(offerWords[offer].toLowerCase())}</h3>
-              <PlainText text={cautions} />
-            </div>
-          ))}
+        {cautionsOf(offers).map(([cautions, names]) => (
+          <div key={names}>
+            <h3 className="text-17">{words.cautionsOffer(names)}</h3>
+            <PlainText text={cautions} />
+          </div>
+        ))}
         {ages.length > 0 ? <p>{words.age(Math.max(...ages))}</p> : null}
         <p className="max-w-words text-15 text-quiet">{words.cautionsLocal}</p>
       </div>
     </Sheet>
   )
+}
+
+/** Forms that are cautioned alike share a paragraph. */
+function cautionsOf(offers: ModulePage['offers']): [cautions: string, names: string][] {
+  const texts = [...new Set(offers.map(({ cautions }) => cautions))].filter((text) => text !== '')
+  return texts.map((text) => {
+    const same = offers.filter(({ cautions }) => cautions === text)
+    return [text, same.map(({ offer }) => offerNames[offer]).join(', ')]
+  })
 }
 
 /** The workshop's terms in full: those a run was opened under, else the newest. */

@@ -7,6 +7,7 @@ import { NumberField, TextField } from '@/components/ui/text-field'
 import { Money } from '@/components/format/money'
 import type { PageOffer } from '@/lib/contracts/module-page'
 import { COUNTRIES } from '@/lib/core/data/countries'
+import { offerNames } from '@/lib/messages/mails/words'
 import { offerWords } from '@/lib/messages/public'
 import { signUpWords as words } from '@/lib/messages/signups'
 import { paths } from '@/lib/paths'
@@ -65,7 +66,7 @@ export function SignUpForm({ workshop, module, currency, offers, form }: Props) 
         <ChoiceField
           name="topPriceMinor"
           label={words.topPrice}
-          hint={words.topPriceHint}
+          hint={topPriceHint(offers)}
           form={form}
           optional
           choices={[
@@ -91,13 +92,23 @@ export function SignUpForm({ workshop, module, currency, offers, form }: Props) 
   )
 }
 
+const isOpen = ({ priceListMinor }: PageOffer) => priceListMinor.length > 0
+const named = (offers: readonly PageOffer[]) => offers.map(({ offer }) => offerNames[offer]).join(', ')
+
+/** Names the forms it is asked for, where other forms have their price. */
+function topPriceHint(offers: readonly PageOffer[]): string {
+  const open = offers.filter(isOpen)
+  return open.length < offers.length
+    ? `${words.topPriceHint} ${words.topPriceOnly(named(open))}`
+    : words.topPriceHint
+}
+
 /** Each price once, naming its forms where the open ones are asked by different lists. */
 function topPrices(offers: readonly PageOffer[]): { minor: number; hint?: string }[] {
-  const open = offers.filter(({ priceListMinor }) => priceListMinor.length > 0)
+  const open = offers.filter(isOpen)
   const prices = [...new Set(open.flatMap(({ priceListMinor }) => priceListMinor))].sort((a, b) => a - b)
   return prices.map((minor) => {
     const asking = open.filter(({ priceListMinor }) => priceListMinor.includes(minor))
-    const names = asking.map(({ offer }) => offerWords[offer].toLowerCase()).join(', ')
-    return { minor, ...(open.length > 1 && { hint: words.topPriceFor(names) }) }
+    return { minor, ...(open.length > 1 && { hint: words.topPriceFor(named(asking)) }) }
   })
 }

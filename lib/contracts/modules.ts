@@ -1,7 +1,6 @@
 import { z } from 'zod'
-import { countryCode, type OfferKind, slug } from './fields'
+import { countryCode, type OfferKind } from './fields'
 
-export const ModuleParams = z.object({ workshop: slug, module: slug })
 export const ModuleQuery = z.object({ country: countryCode.optional() })
 
 /** One piece of an offer, delivered to one country; amounts as the buyer pays them, tax included. */

@@ -1,5 +1,5 @@
 import { plural } from './plural'
-import { writtenDay, writtenNumber, writtenPercent } from './written'
+import { writtenDay, writtenNumber } from './written'
 
 const units = (count: number) => plural(count, { one: '# unit', other: '# units' })
 const days = (count: number) => plural(count, { one: '# day', other: '# days' })
@@ -15,7 +15,7 @@ export const offerWords = {
 export const publicWords = {
   account: 'Your account',
   workshopsTitle: 'Workshops',
-  modulesTitle: 'Modules you can hear and follow now',
+  modulesTitle: 'Modules',
   frontTitle: 'Small runs of rack-mounted modules, made when enough people want one',
   frontLead:
     'Makers show what they have built. You say that you would like one. When enough deposits are in by the date on the page, the run is built; if not, everyone is paid back in full.',
@@ -87,35 +87,6 @@ export const publicWords = {
   priceOpen: 'The price is still open.',
 
   costTitle: 'What it costs',
-  costCaption: (country: string) => `One piece, delivered to ${country}`,
-  offer: 'Form',
-  price: 'Price',
-  deposit: 'Deposit now',
-  postage: 'Postage',
-  total: 'In all',
-  open: 'open',
-  notPosted: 'not posted there',
-  states: {
-    closed: 'Not posted to this country.',
-    paused: 'Not posted to this country at present.',
-    no_post: 'No postage to this country has been set yet.',
-  },
-  noOffers: 'The forms in which it will be sold are not set yet.',
-  country: 'Country it goes to',
-  countryHint: 'Postage and tax for another country.',
-  countryNoScript: 'Postage and tax for other countries are shown before you order.',
-  countryFailed: 'The prices for this country could not be loaded. Try again in a moment.',
-  tax: {
-    included: (rate: number) => `Prices and postage include ${writtenPercent(rate / 10_000)} tax.`,
-    added: (rate: number) => `Prices and postage are shown with ${writtenPercent(rate / 10_000)} tax added.`,
-    none: 'No sales tax is part of these prices.',
-    mixed: 'Prices and postage include the tax of each form.',
-  },
-  duties: {
-    buyer_pays: 'Customs may ask you for tax, duty and a handling fee on arrival; you pay them there.',
-    prepaid: 'Tax and duty on arrival are paid by the workshop beforehand.',
-    refused: 'Not posted where duty falls due on arrival.',
-  },
   contents: (offer: string) => `What is in it: ${offer}`,
   surcharge: (label: string, sum: string) => `${label} (+ ${sum})`,
   choices: 'You choose',
@@ -148,7 +119,7 @@ export const publicWords = {
       'If the date by which it is posted cannot be kept, you are told before it passes and can wait or cancel for a full refund.',
   },
   cautionsTitle: 'Before you build or use it',
-  cautionsOffer: (offer: string) => `Cautions: ${offer}`,
+  cautionsOffer: (offers: string) => `Cautions: ${offers}`,
   age: (years: number) => `Meant for people of ${writtenNumber(years)} and older.`,
   cautionsLocal:
     'Safety, radio interference and waste rules differ by country. This page is no legal advice; ask locally if you are unsure.',

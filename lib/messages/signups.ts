@@ -20,6 +20,7 @@ export const signUpWords = {
   } as const,
   topPrice: 'The highest price at which you would still join',
   topPriceHint: 'The price is still open. Whatever people answer here, everyone pays the same price.',
+  topPriceOnly: (offers: string) => `Asked for: ${offers}.`,
   topPriceFor: (offers: string) => `for ${offers}`,
   noTopPrice: 'I would rather not say',
   email: 'E-mail address',

@@ -17,13 +17,10 @@ const runOf = async (named: Named, now = NOW) => (await pageOf(named, now))!.run
 
 /** Statements sent while something runs. */
 async function statements(during: () => Promise<unknown>): Promise<number> {
+  const { options } = sequelize as unknown as { options: { logging: false | (() => void) } }
   let count = 0
-  sequelize.options.logging = () => void (count += 1)
-  try {
-    await during()
-  } finally {
-    sequelize.options.logging = false
-  }
+  options.logging = () => void (count += 1)
+  await during().finally(() => (options.logging = false))
   return count
 }
 

@@ -1,4 +1,5 @@
-import { ModuleParams, ModuleQuery } from '@/lib/contracts/modules'
+import { ModuleParams } from '@/lib/contracts/module-forms'
+import { ModuleQuery } from '@/lib/contracts/modules'
 import { refuseFields } from '@/lib/contracts/problem'
 import { isCountry } from '@/lib/core/data/country'
 import { ok, refuse } from '@/lib/core/result'

@@ -4,7 +4,7 @@ import { PublicFrame } from '@/components/site/public-frame'
 import { LinkButton } from '@/components/ui/button'
 import { Words } from '@/components/ui/columns'
 import { PageHead } from '@/components/ui/page-head'
-import { ModuleParams } from '@/lib/contracts/modules'
+import { ModuleParams } from '@/lib/contracts/module-forms'
 import { signUpWords as words } from '@/lib/messages/signups'
 import { paths } from '@/lib/paths'
 
