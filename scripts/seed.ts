@@ -20,7 +20,6 @@ async function isEmpty() {
 
 if (await isEmpty()) {
   if (marker) writeFileSync(marker, '')
-  process.stdout.write('Making the demo (a minute or so) …\n')
   const stage = await openDemoStage(new Date(Date.now() - DEMO_DAYS * 86_400_000))
   await seedDemo(stage)
   await stage.close()

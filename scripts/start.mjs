@@ -41,7 +41,7 @@ async function start(dataFolder, running) {
   if (wantsSandbox(process.env))
     say('No payment key and no mail server given: the sandbox plays both. Nothing is charged or sent.')
   await checkSettings(env)
-  await Promise.all([prepareData(env, dataFolder), isDev ? undefined : ensureBuild()])
+  const [signIns] = await Promise.all([prepareData(env, dataFolder), isDev ? undefined : ensureBuild()])
   say('Starting web, worker and what they need …')
   const parts = await startParts(env, { isDev })
   const stopDatabaseAfter = stopEverything
@@ -51,7 +51,7 @@ async function start(dataFolder, running) {
   }
   process.on('SIGINT', () => isEnding && parts.kill())
   writeFileSync(running, env.BASE_URL)
-  await seed(env, dataFolder)
+  if (signIns) say(signIns)
   say(
     `\nBrimline is at ${env.BASE_URL} (ready in ${Math.round((performance.now() - began) / 1000)} s). Ctrl-C stops it.`,
   )
@@ -73,15 +73,15 @@ async function database(dataFolder) {
   return ensureDatabase(url)
 }
 
-async function prepareData(env) {
+/** The database as the code wants it; the demo fills an empty sandbox before anything else runs. Gives back who can sign in. */
+async function prepareData(env, dataFolder) {
   const { output } = await runScript('scripts/migrate.ts', env)
   if (output.trim()) say(output.trim())
-}
-
-/** The demo fills an empty sandbox, then says who can sign in; a marker tells a killed one. */
-async function seed(env, dataFolder) {
-  if (env.SANDBOX !== '1') return
-  await runScript('scripts/seed.ts', env, { args: [join(dataFolder, 'seeding')], show: true })
+  if (env.SANDBOX !== '1') return ''
+  const marker = join(dataFolder, 'seeding')
+  const isNew = output.includes('migrated')
+  if (isNew) say('Making the demo (a minute or so) …')
+  return (await runScript('scripts/seed.ts', env, { args: [marker] })).output.trim()
 }
 
 async function end() {
