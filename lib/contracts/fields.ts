@@ -77,6 +77,8 @@ export const offerKind = z.enum(['boards', 'kit', 'built'], { error: 'Choose one
 export type OfferKind = z.infer<typeof offerKind>
 
 export const uuid = z.uuid('Unknown.')
+/** Whether a part of a page's address can be an id at all; one that cannot names nothing. */
+export const isUuid = (text: string): boolean => uuid.safeParse(text).success
 
 /** A single-use secret of a mail's link: 43 characters of base64url (32 bytes). */
 export const token = z

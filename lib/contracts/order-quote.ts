@@ -27,6 +27,8 @@ export type OrderQuoteView = {
   balanceWhen: 'at_lock' | 'units_passed' | 'before_packing'
   minimum: number
   decideBy: string
+  /** No place is left for it as things stand: it would enter the waiting list, and nothing is paid. */
+  willWait: boolean
   holdMinutes: number
   terms: { number: number; body: string }
 }
@@ -49,6 +51,7 @@ export type OrderFormOffer = {
 export type OrderFormView = {
   run: string
   workshop: { slug: string; name: string; country: string }
+  timeZone: string
   module: { slug: string; name: string }
   currency: string
   pricesIncludeTax: boolean

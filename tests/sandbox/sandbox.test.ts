@@ -6,6 +6,7 @@ import { POST as signIn } from '@/app/(sandbox)/sandbox/sign-in/route'
 import { GET as ownOrders } from '@/app/api/account/orders/route'
 import { forgetEnv } from '@/lib/config/env'
 import { deliverDueEvents } from '@/lib/gateways/payments/fake/deliver'
+import { mailer } from '@/lib/gateways/mailer'
 import { closeSandboxMailbox } from '@/lib/gateways/mailer/sandbox-mailbox'
 import { closeSandboxPool } from '@/lib/gateways/payments/fake/pool'
 import { TASKS } from '@/lib/tasks'
@@ -37,6 +38,7 @@ beforeEach(async () => {
 afterAll(async () => {
   clearInterval(sending)
   await worker.stop()
+  mailer().close()
   await mails.close()
   await store.close()
   await closeSandboxMailbox()

@@ -1,3 +1,6 @@
+/** Over a refusal that stands on a page by itself. */
+export const refusedTitle = 'Not done'
+
 /** Refusals any page may meet. */
 export const general = {
   refused: 'This is not possible in the present state. Load the page again to see what has changed.',

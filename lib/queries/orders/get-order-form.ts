@@ -31,6 +31,7 @@ export async function getOrderForm(asked: {
   return {
     run: run.id,
     workshop: { slug: workshop.slug, name: workshop.name, country: workshop.country },
+    timeZone: workshop.timeZone,
     module: { slug: module.slug, name: module.name },
     currency: run.currency,
     pricesIncludeTax: workshop.pricesIncludeTax,

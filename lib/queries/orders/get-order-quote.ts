@@ -4,13 +4,14 @@ import type { OrderQuoteView } from '@/lib/contracts/order-quote'
 import type { FieldRefusal } from '@/lib/contracts/problem'
 import type { Actor } from '@/lib/core/policy/can'
 import { can } from '@/lib/core/policy/can'
+import { freeUnits } from '@/lib/core/orders/free'
 import { ok, refuse, type Result } from '@/lib/core/result'
 import { quoteOrder } from '@/lib/queries/orders/quote-order'
-import { Module, Run, TermsVersion, Workshop } from '@/models'
+import { Module, Order, Run, RunOffer, TermsVersion, Workshop } from '@/models'
 
 /**
  * What an order would cost if it were placed now, for the page where it is read once more. Nothing is written.
- * Refuses: not_found · run_not_open · weights_missing · field mistakes. Bounded: ten statements.
+ * Refuses: not_found · run_not_open · weights_missing · field mistakes. Bounded: twelve statements.
  */
 export async function getOrderQuote(asked: {
   actor: Actor
@@ -28,6 +29,9 @@ export async function getOrderQuote(asked: {
   if (!quote.ok) return quote
   const terms = await TermsVersion.findByPk(run.termsVersionId ?? '', { rejectOnEmpty: true })
   const { totals, postage, lines } = quote.value
+  const offers = await RunOffer.findAll({ where: { runId: run.id } })
+  const wanted = lines.map(({ offer, quantity }) => ({ runOfferId: offer.runOfferId, quantity }))
+  const waiting = await Order.count({ where: { runId: run.id, state: 'waiting' } })
   return ok({
     run: run.id,
     workshop: { slug: workshop.slug, name: workshop.name },
@@ -51,6 +55,7 @@ export async function getOrderQuote(asked: {
     balanceWhen: run.balanceWhen,
     minimum: run.minimum,
     decideBy: run.decideByOn,
+    willWait: waiting > 0 || quote.value.units > freeUnits(run, offers, wanted),
     holdMinutes: Math.max(31, workshop.holdMinutes),
     terms: { number: terms.number, body: terms.body },
   })

@@ -23,8 +23,12 @@ export async function getOrder(asked: {
   if (!can(asked.actor, 'order:read', { workshopId, personId })) return null
   const card = await ProviderCustomer.findOne({ where: { workshopId, personId } })
   const terms = order.termsVersionId === null ? null : await TermsVersion.findByPk(order.termsVersionId)
+  const view = toOrderView(found, card)
+  // The workshop reads an order; what can be done with it here is its buyer's.
+  const isOwn = asked.actor.kind === 'person' && asked.actor.personId === personId
   return {
-    ...toOrderView(found, card),
+    ...view,
+    can: isOwn ? view.can : [],
     timeZone: workshop.timeZone,
     homeCountry: workshop.country,
     country: order.country,

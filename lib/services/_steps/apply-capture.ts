@@ -1,12 +1,12 @@
 import 'server-only'
 import type { Transaction } from 'sequelize'
 import { balancePaid, depositPaid } from '@/lib/core/ledger/entries'
+import { freeUnits } from '@/lib/core/orders/free'
 import { mayAccept, mayReserveLate } from '@/lib/core/states/order-guards'
 import type { PaymentFacts } from '@/lib/gateways/payments/types'
 import { acceptBalance } from '@/lib/services/_steps/accept-balance'
 import { acceptDeposit } from '@/lib/services/_steps/accept-deposit'
 import { applyFee } from '@/lib/services/_steps/apply-fee'
-import { freeFor } from '@/lib/services/_steps/fits-in'
 import { moveAttempt } from '@/lib/services/_steps/move-attempt'
 import { noteEffect } from '@/lib/services/_steps/note-effect'
 import { postLedger } from '@/lib/services/_steps/post-ledger'
@@ -96,7 +96,7 @@ async function whyBack(
   const isFree = mayReserveLate({
     run: run.state,
     units: order.unitCount,
-    free: freeFor(run, offers, lines),
+    free: freeUnits(run, offers, lines),
   })
   return isFree.ok ? null : 'late_capture'
 }

@@ -1,11 +1,11 @@
 import 'server-only'
 import { Op, type Transaction } from 'sequelize'
 import { refuse, type Result } from '@/lib/core/result'
+import { freeUnits } from '@/lib/core/orders/free'
 import { mayPlace } from '@/lib/core/states/order-guards'
 import type { OrderState } from '@/lib/core/states/order'
 import { dayIn } from '@/lib/core/time/zone'
 import type { OrderQuote } from '@/lib/queries/orders/quote-order'
-import { freeFor } from '@/lib/services/_steps/fits-in'
 import { Invitation, Order, type Run, RunOffer, type Workshop } from '@/models'
 
 const LIVE: OrderState[] = ['waiting', 'awaiting_deposit', 'reserved', 'balance_due', 'paid', 'packed']
@@ -49,7 +49,7 @@ export async function placeOrQueue(
     units: quote.units,
     unitsBefore: mine.reduce((sum, { unitCount }) => sum + unitCount, 0),
     limit: run.limitPerPerson,
-    free: freeFor(run, offers, lines),
+    free: freeUnits(run, offers, lines),
     waiting: await Order.count({ where: { runId: run.id, state: 'waiting' }, transaction: tx }),
   })
 }

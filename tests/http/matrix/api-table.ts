@@ -6,6 +6,7 @@ import type { Row } from './roles'
  * "let in, then asked for more"; 409 "let in, then the state refused".
  */
 export const API_TABLE: Readonly<Record<string, Row>> = {
+  'GET /api/account/orders': '401 200 200 200 200 200 200',
   'POST /api/account/second-factor': '401 422 422 422 422 422 422',
   'GET /api/admin/[workshop]': '401 404 200 404 404 404 404',
   'POST /api/admin/[workshop]/modules': '401 404 422 404 404 404 404',
@@ -46,6 +47,15 @@ export const API_TABLE: Readonly<Record<string, Row>> = {
   'GET /api/auth/[...nextauth]': '405 405 405 405 405 405 405',
   'POST /api/auth/[...nextauth]': '404 404 404 404 404 404 404',
   'POST /api/host/workshops/[workshop]/[move]': '401 404 404 404 404 409 404',
+  'POST /api/orders': '401 422 422 422 422 422 422',
+  'POST /api/orders/draft': '401 422 422 422 422 422 422',
+  // The body is read before the order is looked for: nobody learns whether it exists.
+  'POST /api/orders/[order]/address': '401 422 422 422 422 422 422',
+  'PUT /api/orders/[order]/address': '401 422 422 422 422 422 422',
+  'POST /api/orders/[order]/cancel': '401 200 404 404 404 404 404',
+  'POST /api/orders/[order]/check': '401 200 404 404 404 404 404',
+  // By then the customer has cancelled it.
+  'POST /api/orders/[order]/pay': '401 409 404 404 404 404 404',
   'GET /api/packing/[workshop]/list.pdf': '401 404 200 404 200 404 404',
   'GET /api/packing/[workshop]/parcels/[parcel]/slip.pdf': '401 404 200 404 200 404 404',
   'GET /api/packing/[workshop]/queue': '401 404 200 404 200 404 404',
@@ -61,6 +71,7 @@ export const API_TABLE: Readonly<Record<string, Row>> = {
   'POST /api/signups': '422 422 422 422 422 422 422',
   'POST /api/signups/confirm': '422 422 422 422 422 422 422',
   'POST /api/signups/take-back': '422 422 422 422 422 422 422',
+  'POST /api/webhooks/stripe': '400 400 400 400 400 400 400',
   'POST /api/workshops': '401 422 422 422 422 422 422',
   'POST /api/workshops/join': '401 422 422 422 422 422 422',
 }

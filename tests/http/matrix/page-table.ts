@@ -5,6 +5,19 @@ import type { Row } from './roles'
  * owner of another workshop. 307 leads to the sign-in page; what somebody may not see does not exist (404).
  */
 export const PAGE_TABLE: Readonly<Record<string, Row>> = {
+  'PAGE /account': '307 200 200 200 200 200 200',
+  'PAGE /account/order/[workshop]/[module]': '307 200 200 200 200 200 200',
+  // Without a kept form it leads back to an empty one.
+  'PAGE /account/order/[workshop]/[module]/check': '307 307 307 307 307 307 307',
+  'PAGE /account/orders/[order]': '307 200 200 404 404 404 404',
+  'PAGE /account/orders/[order]/address': '307 200 200 404 404 404 404',
+  'PAGE /account/orders/[order]/cancel': '307 200 200 404 404 404 404',
+  'PAGE /sandbox': '200 200 200 200 200 200 200',
+  'PAGE /sandbox/mail': '200 200 200 200 200 200 200',
+  'GET /sandbox/mail.json': '200 200 200 200 200 200 200',
+  'POST /sandbox/clock': '422 422 422 422 422 422 422',
+  'POST /sandbox/pay': '422 422 422 422 422 422 422',
+  'POST /sandbox/sign-in': '422 422 422 422 422 422 422',
   'PAGE /account/code': '307 200 200 200 200 200 200',
   'PAGE /admin/[workshop]': '307 404 200 404 404 404 404',
   'PAGE /admin/[workshop]/modules': '307 404 200 404 404 404 404',

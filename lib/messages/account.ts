@@ -1,0 +1,27 @@
+/** A person's own pages. */
+export const accountWords = {
+  title: 'Your account',
+  lead: 'Your orders and sign-ups, in every workshop.',
+  orders: 'Orders',
+  number: 'Order',
+  module: 'Module',
+  workshop: 'Workshop',
+  state: 'Where it stands',
+  units: 'What',
+  total: 'Total',
+  noOrders: 'No orders yet. A module’s page says when its run takes deposits.',
+  more: 'Older orders',
+  newest: 'Newest orders',
+  open: 'Open',
+  signUps: 'Sign-ups',
+  signUpStates: {
+    unconfirmed: 'not confirmed yet: follow the link in the mail',
+    confirmed: 'confirmed',
+    superseded: 'replaced by a later one',
+    taken_back: 'taken back',
+  } as Readonly<Record<string, string>>,
+  quantity: 'Units',
+  since: 'Since',
+  noSignUps: 'No sign-ups yet. On a module’s page you say whether you would buy one.',
+  takeBack: 'The mail that confirmed a sign-up has a link to change it or take it back.',
+} as const
