@@ -32,7 +32,7 @@ export const deskWords = {
     packer: 'Invite somebody who packs',
     publish: 'Publish the module',
   },
-  packerSelf: 'You can pack yourself; then leave this open.',
+  stepHints: { packer: 'You can pack yourself; then leave this open.' },
   stepDone: 'done',
   stepOpen: 'to do',
   runsTitle: 'Runs that are going',

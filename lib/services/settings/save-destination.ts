@@ -15,7 +15,12 @@ import { workshopPagesChanged } from '../_steps/workshop-pages-changed'
  * Refuses: not_found · forbidden · invalid (no zone reaches the country). Locks: the workshop. Writes: destinations, audit;
  * public pages are made anew. Repeat: safe.
  */
-export function saveDestination(cmd: { actor: Actor; workshopId: string; input: DestinationInput }) {
+export function saveDestination(cmd: {
+  actor: Actor
+  workshopId: string
+  input: DestinationInput
+  now: Date
+}) {
   const { actor, workshopId, input, now } = cmd
   return inTransaction(async (tx) => {
     if (actor.kind !== 'person' || !can(actor, 'destination:write', { workshopId }))

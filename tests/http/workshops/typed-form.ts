@@ -1,10 +1,14 @@
-import { JSDOM } from 'jsdom'
 import type { ReactElement } from 'react'
 import { renderToStaticMarkup } from 'react-dom/server'
 import { SESSION_COOKIE } from '@/lib/auth/cookies'
 import { sessionOf } from '@/tests/http/matrix/people'
 import { postForm } from '@/tests/http/signups/post-form'
 import type { Person } from '@/models'
+
+// The package brings no types of its own.
+const { JSDOM } = (await import('jsdom' as string)) as {
+  JSDOM: new (html: string) => { window: { document: Document } }
+}
 
 type Handler = Parameters<typeof postForm>[0]
 type Control = HTMLInputElement | HTMLSelectElement | HTMLTextAreaElement

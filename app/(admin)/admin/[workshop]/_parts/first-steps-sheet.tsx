@@ -4,6 +4,8 @@ import type { Desk, FirstStep } from '@/lib/contracts/workshops'
 import { deskWords as words } from '@/lib/messages/desk'
 import { paths } from '@/lib/paths'
 
+const hints: Partial<Record<FirstStep, string>> = words.stepHints
+
 /** The check list of a new workshop: each line with its state and the way to where it is done. */
 export function FirstStepsSheet({ desk }: { desk: Desk }) {
   const open = desk.steps.filter(({ done }) => !done).length
