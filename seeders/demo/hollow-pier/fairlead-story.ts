@@ -36,7 +36,7 @@ export async function* fairleadStory(stage: Stage, house: Founded, today: Date):
     days: 14,
     unconfirmedPercent: 9,
   }
-  yield* gatherInterest(stage, { ...interest, seed: 31, people: crowd(31, 70) })
+  yield* gatherInterest(stage, { ...interest, seed: 31, people: crowd(31, 36) })
 
   yield before(96)
   const run = await openRun(stage, house, {

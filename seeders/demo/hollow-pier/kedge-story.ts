@@ -27,10 +27,10 @@ export async function* kedgeStory(stage: Stage, house: Founded): Story {
   await designModule(stage, house, KEDGE)
   const began = await stage.now()
   const interest = { workshop: house.slug, module: 'kedge', offers: OFFERS, days: 8, unconfirmedPercent: 6 }
-  const first = yield* gatherInterest(stage, { ...interest, seed: 21, people: crowd(21, 24) })
+  const first = yield* gatherInterest(stage, { ...interest, seed: 21, people: crowd(21, 14) })
   yield* wholeRun(stage, house, { buyers: first.slice(0, 11), minimum: 10, postedIn: 96, packedIn: 92 })
   yield daysAfter(began, 112)
-  const second = yield* gatherInterest(stage, { ...interest, seed: 22, people: crowd(22, 18) })
+  const second = yield* gatherInterest(stage, { ...interest, seed: 22, people: crowd(22, 13) })
   yield* wholeRun(stage, house, { buyers: second.slice(0, 10), minimum: 10, postedIn: 84, packedIn: 103 })
 
   yield daysAfter(began, 232)

@@ -28,7 +28,7 @@ export async function* rowlockStory(stage: Stage, house: Founded, today: Date): 
     days: 48,
     unconfirmedPercent: 8,
   }
-  const interested = yield* gatherInterest(stage, { ...interest, seed: 41, people: crowd(41, 140) })
+  const interested = yield* gatherInterest(stage, { ...interest, seed: 41, people: crowd(41, 100) })
 
   yield before(17)
   const run = await openRun(stage, house, {
