@@ -56,6 +56,12 @@ export const API_TABLE: Readonly<Record<string, Row>> = {
   'POST /api/orders/[order]/check': '401 200 404 404 404 404 404',
   // By then the customer has cancelled it.
   'POST /api/orders/[order]/pay': '401 409 404 404 404 404 404',
+  'GET /api/health': '200 200 200 200 200 200 200',
+  'GET /api/openapi.json': '200 200 200 200 200 200 200',
+  'GET /api/w/[workshop]/[module]': '200 200 200 200 200 200 200',
+  // A mail program without one click is led to the page that asks.
+  'GET /api/unsubscribe/[token]': '303 303 303 303 303 303 303',
+  'POST /api/unsubscribe/[token]': '404 404 404 404 404 404 404',
   'GET /api/packing/[workshop]/list.pdf': '401 404 200 404 200 404 404',
   'GET /api/packing/[workshop]/parcels/[parcel]/slip.pdf': '401 404 200 404 200 404 404',
   'GET /api/packing/[workshop]/queue': '401 404 200 404 200 404 404',

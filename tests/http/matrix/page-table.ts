@@ -5,6 +5,19 @@ import type { Row } from './roles'
  * owner of another workshop. 307 leads to the sign-in page; what somebody may not see does not exist (404).
  */
 export const PAGE_TABLE: Readonly<Record<string, Row>> = {
+  'PAGE /': '200 200 200 200 200 200 200',
+  'PAGE /terms': '200 200 200 200 200 200 200',
+  'PAGE /privacy': '200 200 200 200 200 200 200',
+  'PAGE /accessibility': '200 200 200 200 200 200 200',
+  'PAGE /w/[workshop]': '200 200 200 200 200 200 200',
+  'PAGE /w/[workshop]/[module]': '200 200 200 200 200 200 200',
+  'PAGE /w/[workshop]/[module]/sent': '200 200 200 200 200 200 200',
+  // A form that is kept no longer leads back to the module's page.
+  'PAGE /w/[workshop]/[module]/form/[draft]': '307 307 307 307 307 307 307',
+  // Links nobody was sent: said so.
+  'PAGE /confirm/[token]': '200 200 200 200 200 200 200',
+  'PAGE /take-back/[token]': '200 200 200 200 200 200 200',
+  'PAGE /unsubscribe/[token]': '200 200 200 200 200 200 200',
   'PAGE /account': '307 200 200 200 200 200 200',
   'PAGE /account/order/[workshop]/[module]': '307 200 200 200 200 200 200',
   // Without a kept form it leads back to an empty one.

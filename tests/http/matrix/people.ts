@@ -42,6 +42,7 @@ export async function matrixWorld() {
     revision: world.revision.letter,
     move: 'open',
     token: makeToken(),
+    draft: makeToken(),
     nextauth: ['callback', 'email'],
   }
   return { ...world, people, params }
