@@ -20,3 +20,6 @@ export const QUEUE_FROM = `
 
 /** SQL: the promise of a parcel, the earliest of its lines. */
 export const PROMISE = 'min(coalesce(ol.revised_posted_by_on, ol.posted_by_on))'
+
+/** SQL: the addressee as whoever packs can read it: in Latin letters where they were given. */
+export const ADDRESSEE = "coalesce(nullif(a.latin ->> 'name', ''), a.name)"

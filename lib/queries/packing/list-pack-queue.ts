@@ -3,7 +3,7 @@ import { QueryTypes } from 'sequelize'
 import type { PackLine, QueueItem, QueueQuery } from '@/lib/contracts/packing'
 import { can, type Actor } from '@/lib/core/policy/can'
 import { sequelize } from '@/lib/db/sequelize'
-import { PROMISE, QUEUE_FROM } from '@/lib/queries/packing/in-queue'
+import { ADDRESSEE, PROMISE, QUEUE_FROM } from '@/lib/queries/packing/in-queue'
 import type { ChosenAnswer } from '@/models/json'
 
 const PER_PAGE = 50
@@ -32,7 +32,7 @@ export async function listPackQueue(cmd: {
   if (!can(actor, 'packing:read', { workshopId })) return { items: [], next: null }
   const [day, number, parcel] = query.after?.split('_') ?? []
   const rows = await sequelize.query<Row>(
-    `select p.id as parcel, o.id as "order", o.number, a.country, a.name, r.id as run, ${PROMISE}::text as "postedBy",
+    `select p.id as parcel, o.id as "order", o.number, a.country, ${ADDRESSEE} as name, r.id as run, ${PROMISE}::text as "postedBy",
             json_agg(json_build_object('line', ol.id, 'module', m.name, 'offer', ol.offer_kind,
                                        'quantity', pl.quantity, 'choices', ol.choices) order by ol.position) as lines
      from ${QUEUE_FROM} and ($country::text is null or a.country = $country)

@@ -3,6 +3,7 @@ import { QueryTypes } from 'sequelize'
 import type { PackedParcel } from '@/lib/contracts/packing'
 import { can, type Actor } from '@/lib/core/policy/can'
 import { sequelize } from '@/lib/db/sequelize'
+import { ADDRESSEE } from '@/lib/queries/packing/in-queue'
 
 const PER_PAGE = 50
 
@@ -22,7 +23,7 @@ export async function listPackedParcels(cmd: {
   const rows = await sequelize.query<
     Omit<PackedParcel, 'at' | 'orderNumber'> & { at: Date; orderNumber: number }
   >(
-    `select p.id as parcel, p.number, min(o.number) as "orderNumber", a.name, a.country, p.grams,
+    `select p.id as parcel, p.number, min(o.number) as "orderNumber", ${ADDRESSEE} as name, a.country, p.grams,
             p.service_name as service, p.tracking, coalesce(p.handed_over_at, p.packed_at) as at
      from parcels p join addresses a on a.id = p.address_id join parcel_lines pl on pl.parcel_id = p.id
      join order_lines ol on ol.id = pl.order_line_id join orders o on o.id = ol.order_id

@@ -17,9 +17,9 @@ import { moveParcel } from '@/lib/services/_steps/move-parcel'
 import { moveUnit } from '@/lib/services/_steps/move-unit'
 import { parcelMayGoOut } from '@/lib/services/_steps/parcel-may-go-out'
 import { Parcel, Workshop } from '@/models'
-import { chooseService } from './choose-service'
-import { mailHandOver } from './mail-hand-over'
-import { unitsLeft } from './units-left'
+import { chooseService } from '@/lib/services/_steps/choose-service'
+import { mailHandOver } from '@/lib/services/_steps/mail-hand-over'
+import { unitsLeft } from '@/lib/services/_steps/units-left'
 
 type Command = {
   actor: Actor

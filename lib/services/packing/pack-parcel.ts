@@ -12,10 +12,10 @@ import { moveOrder } from '@/lib/services/_steps/move-order'
 import { moveParcel } from '@/lib/services/_steps/move-parcel'
 import { parcelMayGoOut } from '@/lib/services/_steps/parcel-may-go-out'
 import type { ParcelLine } from '@/models'
-import { checkLines, type ExpectedLine } from './check-lines'
-import { fillWithUnits } from './fill-with-units'
-import { findSerials } from './find-serials'
-import { unitsLeft } from './units-left'
+import { checkPackedLines, type ExpectedLine } from '@/lib/services/_steps/check-packed-lines'
+import { fillWithUnits } from '@/lib/services/_steps/fill-with-units'
+import { findSerials } from '@/lib/services/_steps/find-serials'
+import { unitsLeft } from '@/lib/services/_steps/units-left'
 
 /**
  * Packs a parcel: its own lines, each once and whole, weighed. The order is packed when all of it is in packed parcels.
@@ -44,7 +44,7 @@ export function packParcel(cmd: {
     if (parcel.state !== 'open')
       return refuse(parcel.state === 'packed' ? 'already_packed' : 'parcel_discarded')
 
-    const mistakes = checkLines(lines.map(asExpected), input.lines)
+    const mistakes = checkPackedLines(lines.map(asExpected), input.lines)
     if (mistakes) return refuseFields(mistakes)
     const orderLines = lines.map((line) => line.orderLine!)
     const { units, errors } = await findSerials(tx, orderLines, locked.run.id, input.lines)

@@ -2,6 +2,7 @@ import { beforeAll, expect, test } from 'vitest'
 import { getFulfilmentOrders } from '@/lib/queries/packing/get-fulfilment-orders'
 import { getPackingSlips } from '@/lib/queries/packing/get-packing-slips'
 import { getParcelPage } from '@/lib/queries/packing/get-parcel-page'
+import { listPackQueue } from '@/lib/queries/packing/list-pack-queue'
 import { packParcel } from '@/lib/services/packing/pack-parcel'
 import { elsewhere, packingWorld } from '@/tests/services/packing/packing-world'
 import { NOW } from '@/tests/support/worlds/base'
@@ -105,6 +106,8 @@ test('a slip names sender, addressee in both scripts, lines and serial numbers',
     person,
     address,
   })
+  const { items } = await listPackQueue({ actor: world.packer, workshopId: world.workshopId })
+  expect(items.find((item) => item.parcel === parcel.id)?.name).toBe('Hana Mori')
   const units = [await makeUnit(world.run), await makeUnit(world.run)]
   const serials = units.map(({ serial }) => serial)
   const input = { lines: [{ line: lines[0]!.id, quantity: 2, serials }], grams: 920 }

@@ -79,16 +79,18 @@ export default async function ParcelRoute({ params, searchParams }: Props) {
             {parcel.state === 'packed' ? <UnpackForm slug={slug} parcel={parcel.parcel} /> : null}
             {parcel.handedOverAt === null ? null : <a href={paths.packing(slug)}>{words.next}</a>}
           </Stack>
-          <Sheet title={words.address} id="address">
-            <AddressLines lines={parcel.to} />
-            {parcel.toOwnScript ? (
-              <div className="mt-3 border-t border-rule pt-3">
-                <p className="text-13 text-quiet">{words.ownScript}</p>
-                <AddressLines lines={parcel.toOwnScript} />
-              </div>
-            ) : null}
-            <PaperLinks slug={slug} parcel={parcel.parcel} />
-          </Sheet>
+          <div>
+            <Sheet title={words.address} id="address">
+              <AddressLines lines={parcel.to} />
+              {parcel.toOwnScript ? (
+                <div className="mt-3 border-t border-rule pt-3">
+                  <p className="text-13 text-quiet">{words.ownScript}</p>
+                  <AddressLines lines={parcel.toOwnScript} />
+                </div>
+              ) : null}
+              <PaperLinks slug={slug} parcel={parcel.parcel} />
+            </Sheet>
+          </div>
         </Columns>
       </Stack>
     </>

@@ -5,11 +5,11 @@ import { paths } from '@/lib/paths'
 /** The slip of this parcel, on a page that prints and as PDF. */
 export function PaperLinks({ slug, parcel }: { slug: string; parcel: string }) {
   return (
-    <div className="flex flex-wrap gap-3 pt-4 print:hidden">
+    <div className="flex flex-wrap items-center gap-x-6 pt-4 print:hidden">
       <LinkButton href={paths.packingSlip(slug, parcel)}>{words.slip}</LinkButton>
-      <LinkButton kind="plain" href={paths.api.packingSlip(slug, parcel)}>
+      <a href={paths.api.packingSlip(slug, parcel)} className="inline-flex min-h-14 items-center">
         {words.slipPdf}
-      </LinkButton>
+      </a>
     </div>
   )
 }

@@ -8,7 +8,7 @@ export type ExpectedLine = { line: string; quantity: number; name: string }
  * What is wrong with the lines a packer ticked, by field: every line of the parcel exactly once, all of it, and nothing
  * else; null when nothing is. Serial numbers are only counted here.
  */
-export function checkLines(
+export function checkPackedLines(
   expected: readonly ExpectedLine[],
   given: PackInput['lines'],
 ): Record<string, string> | null {
