@@ -26,9 +26,7 @@ export function FirstStepsSheet({ desk }: { desk: Desk }) {
               {words.steps[key]}
             </a>
             <StateMark kind={done ? 'done' : 'open'}>{done ? words.stepDone : words.stepOpen}</StateMark>
-            {key === 'packer' && !done ? (
-              <p className="w-full text-13 text-quiet">{words.packerSelf}</p>
-            ) : null}
+            {!done && hints[key] ? <p className="w-full text-13 text-quiet">{hints[key]}</p> : null}
           </li>
         ))}
       </ol>
