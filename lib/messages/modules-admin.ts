@@ -31,6 +31,10 @@ export const modulesAdminWords = {
     plan: 'Cost plan',
   },
   publicPage: 'See its public page',
+  preview: 'Preview',
+  previewWords:
+    'This is what everyone reads once the module is published. The form is shown and takes nothing until then.',
+  backToModule: 'Back to the module',
   publish: 'Publish',
   publishAgain: 'Publish again',
   archive: 'Archive',

@@ -12,9 +12,16 @@ export async function findPublicModule(cmd: {
   module: string
 }): Promise<FoundModule | null> {
   const workshop = await Workshop.findOne({ where: { slug: cmd.workshop, state: ['open', 'suspended'] } })
-  if (!workshop) return null
+  return workshop && findWithOffers(workshop, { slug: cmd.module, state: 'published' })
+}
+
+/** A module of a workshop with its offers and their questions, whatever its state unless that is named. Three statements. */
+export async function findWithOffers(
+  workshop: Workshop,
+  where: { slug: string; state?: 'published' },
+): Promise<FoundModule | null> {
   const module = await Module.findOne({
-    where: { workshopId: workshop.id, slug: cmd.module, state: 'published' },
+    where: { ...where, workshopId: workshop.id },
     include: [
       {
         model: Offer,

@@ -5,7 +5,7 @@ import { dayIn } from '@/lib/core/time/zone'
 import { sequelize } from '@/lib/db/sequelize'
 import { type Module, type Offer, type Run, TermsVersion, type Workshop } from '@/models'
 import { deliveryOf } from './delivery-of'
-import { findPublicModule } from './find-public-module'
+import { findPublicModule, type FoundModule } from './find-public-module'
 import { countUnits, findPublicRun, toPageRun } from './find-public-run'
 import { getInterest } from './get-interest'
 import { getPublicRecord } from './get-public-record'
@@ -22,18 +22,22 @@ export async function getModulePage(cmd: {
   now: Date
 }): Promise<ModulePage | null> {
   const found = await findPublicModule(cmd)
-  if (!found) return null
+  return found && toModulePage(found, cmd.now)
+}
+
+/** A module as its page shows it; who may see it has been asked before. */
+export async function toModulePage(found: FoundModule, now: Date): Promise<ModulePage> {
   const { workshop, module, offers } = found
   const run = await findPublicRun(module.id)
   const units = await countUnits(run ? [run.id] : [])
   const priceOf = pricesOf(run?.offers ?? [])
-  const on = dayIn(cmd.now, workshop.timeZone)
+  const on = dayIn(now, workshop.timeZone)
   return {
     workshop: factsOfWorkshop(workshop),
     module: factsOfModule(module),
     offers: offers.map((offer) => toPageOffer(offer, priceOf)),
     interest: await getInterest(module),
-    run: run && toPageRun(run, workshop, units.get(run.id), cmd.now),
+    run: run && toPageRun(run, workshop, units.get(run.id), now),
     terms: await termsOf(workshop, run),
     maker: toMaker(workshop),
     record: await getPublicRecord(workshop),

@@ -5,9 +5,11 @@ import { sequelize } from '@/lib/db/sequelize'
 import { getStaffInvitation } from '@/lib/queries/members/get-staff-invitation'
 import { listMembers } from '@/lib/queries/members/list-members'
 import { getModuleDesk } from '@/lib/queries/modules-admin/get-module-desk'
+import { getModulePreview } from '@/lib/queries/modules-admin/get-module-preview'
 import { getPartsDesk } from '@/lib/queries/modules-admin/get-parts-desk'
 import { getPlanDesk } from '@/lib/queries/modules-admin/get-plan-desk'
 import { listModules } from '@/lib/queries/modules-admin/list-modules'
+import { getModulePage } from '@/lib/queries/public/get-module-page'
 import { getSettings } from '@/lib/queries/settings/get-settings'
 import { getDesk } from '@/lib/queries/workshops/get-desk'
 import { listWorkshops } from '@/lib/queries/host/list-workshops'
@@ -44,6 +46,7 @@ const everything = (who: Actor) => {
     module: () => getModuleDesk(of),
     parts: () => getPartsDesk(of),
     plan: () => getPlanDesk(of),
+    preview: () => getModulePreview(of),
   }
 }
 
@@ -146,6 +149,17 @@ test('a module’s desk holds what there is: offers, revisions, interest', async
   ])
   expect(settings.homeRate).toMatchObject({ country: 'DE', basisPoints: 1900 })
   expect(settings.zones.map(({ name }) => name)).toEqual(['At home', 'Neighbours', 'Everywhere else'])
+})
+
+test('a draft can be previewed by those who work on it, and by nobody else', async () => {
+  await world.module.update({ state: 'draft' })
+  const page = await getModulePreview({ actor, workshopId, module: 'rowlock', now: NOW })
+  expect(page).toMatchObject({ module: { name: 'Rowlock' }, maker: { legalName: 'Mara Quill' } })
+  expect(page?.offers.map(({ offer }) => offer)).toEqual(['boards', 'kit', 'built'])
+  const bench = await actorOf(world.bench)
+  expect(await getModulePreview({ actor: bench, workshopId, module: 'rowlock', now: NOW })).toEqual(page)
+  expect(await getModulePage({ workshop: 'hollow-pier', module: 'rowlock', now: NOW })).toBeNull()
+  await world.module.update({ state: 'published' })
 })
 
 test('the number of statements does not grow with what there is', async () => {

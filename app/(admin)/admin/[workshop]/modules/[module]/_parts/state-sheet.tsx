@@ -21,6 +21,9 @@ export function StateSheet({ slug, module }: { slug: string; module: ModuleDesk[
             <Button>{state === 'draft' ? words.publish : words.publishAgain}</Button>
           </DeedForm>
         )}
+        {state === 'published' ? null : (
+          <LinkButton href={paths.adminModulePage(slug, module.slug, 'preview')}>{words.preview}</LinkButton>
+        )}
         {state === 'published' ? (
           <DeedForm action={paths.api.adminModulePart(slug, module.slug, 'archive')}>
             <Button kind="secondary">{words.archive}</Button>
