@@ -59,7 +59,7 @@ export const modulesAdminWords = {
 
   factsLead: 'What its page says, and what its front panel is drawn from.',
   story: 'What it does and why',
-  power: 'Power',
+  power: 'Size and power',
   plus12Ma: 'From +12 V',
   minus12Ma: 'From −12 V',
   plus5Ma: 'From +5 V',

@@ -85,6 +85,7 @@ export const planAdminWords = {
 
   schedule: 'Schedule',
   scheduleHint: 'Working days: at best, likely, at worst. “After” names rows by their number.',
+  steps: 'Steps from the lock to the last parcel',
   stepRow: (row: number) => `Step ${row}`,
   step: 'Step',
   optimistic: 'At best',

@@ -80,7 +80,7 @@ export const settingsWords = {
   price: 'Price',
   grams: 'g',
   millimetres: 'mm',
-  row: (n: number) => `row ${n}`,
+  row: (n: number) => `Price ${n}`,
   countryTaken: (country: string, zone: string) => `${country} stands in the zone “${zone}” already.`,
   otherwiseTaken: (zone: string) => `The zone “${zone}” already stands for everywhere else.`,
   nothingLeft: 'All member states stand in other zones already.',

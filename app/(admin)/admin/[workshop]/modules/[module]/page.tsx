@@ -29,7 +29,7 @@ export default async function ModulePage({ params, searchParams }: ModulePagePro
               <OffersTable slug={workshop.slug} desk={desk} currency={workshop.currency} />
             </Sheet>
             <Sheet title={words.cautionsTitle} id="cautions">
-              <PlainText text={module.cautions} />
+              <PlainText text={module.cautions || words.notSet} />
             </Sheet>
           </Stack>
           <FrontPanelDrawing name={module.name} widthHp={module.widthHp} controls={module.controls} />

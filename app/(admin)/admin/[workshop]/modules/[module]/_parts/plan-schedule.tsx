@@ -9,7 +9,7 @@ export function PlanSchedule({ form }: { form: FormState }) {
     <Sheet title={words.schedule}>
       <RowsField
         name="steps"
-        legend={words.schedule}
+        legend={words.steps}
         hint={words.scheduleHint}
         rowLabel={words.stepRow}
         form={form}
