@@ -38,6 +38,7 @@ export function PartsForm({ slug, module, parts, form }: Props) {
           form={form}
           className="figures max-w-none"
           spellCheck={false}
+          wrap="off"
         />
         <Disclosure summary={words.columns}>
           <p className="figures text-13 break-words">{PART_HEADINGS.join(', ')}</p>
