@@ -35,7 +35,7 @@ export default defineConfig({
           environment: 'node',
           setupFiles: ['tests/support/db-setup.ts'],
           globalSetup: ['tests/support/db-global.ts'],
-          testTimeout: 60_000,
+          testTimeout: 120_000,
           hookTimeout: 60_000,
           maxWorkers: 2,
         },
