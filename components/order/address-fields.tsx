@@ -49,11 +49,17 @@ export function AddressFields({ prefix, form, countries }: Props) {
         name={at('postcode')}
         label={words.postcode}
         form={form}
-        width="short"
+        hint={words.postcodeHint}
         autoComplete="postal-code"
-        optional
+        required={false}
       />
-      <TextField name={at('city')} label={words.city} form={form} autoComplete="address-level2" optional />
+      <TextField
+        name={at('city')}
+        label={words.city}
+        form={form}
+        autoComplete="address-level2"
+        required={false}
+      />
       <TextField
         name={at('region')}
         label={words.region}

@@ -94,6 +94,7 @@ export const addressWords = {
   city: 'Town or city',
   region: 'State, province or prefecture',
   postcode: 'Postcode',
+  postcodeHint: 'Leave it empty where there is none.',
   phone: 'Telephone',
   phoneHint: 'With its country code; the carrier uses it. Some countries need it.',
   taxNumber: 'Tax number',

@@ -23,7 +23,8 @@ export const dynamic = 'force-dynamic'
 type Props = { searchParams: Promise<{ draft?: string }> }
 
 export default async function SandboxPage({ searchParams }: Props) {
-  if (!env().SANDBOX) notFound()
+  const { SANDBOX, HOST_EMAILS } = env()
+  if (!SANDBOX) notFound()
   const { draft } = await searchParams
   const signIn = keptForm(await getFormDraft(draft, 'sandbox-sign-in'))
   const clock = keptForm(await getFormDraft(draft, 'sandbox-clock'))
@@ -33,7 +34,7 @@ export default async function SandboxPage({ searchParams }: Props) {
       <Stack>
         <Sheet title={words.signIn.title} id="sign-in">
           <SignInForm form={signIn} />
-          <PeopleTable people={await listSandboxPeople()} />
+          <PeopleTable people={await listSandboxPeople(HOST_EMAILS)} />
         </Sheet>
         <Sheet title={words.clock.title} id="clock">
           <ClockForm now={await businessNow()} form={clock} />

@@ -31,4 +31,4 @@ export function PeopleTable({ people }: { people: readonly SandboxPerson[] }) {
 }
 
 const worksOf = ({ works }: SandboxPerson) =>
-  works.map(({ role, workshop }) => `${role}, ${workshop}`).join('; ') || words.noWork
+  works.map(({ role, workshop }) => [role, workshop].filter(Boolean).join(', ')).join('; ') || words.noWork

@@ -24,7 +24,8 @@ export function OfferRow({ run, offer, index, form }: Props) {
         error={form?.errors?.[`lines.${index}.quantity`] ?? form?.errors?.[`lines.${index}.offer`]}
         form={form}
         defaultValue={form ? undefined : only ? '1' : '0'}
-        optional
+        width="medium"
+        required={false}
       />
       {offer.choices.map((choice) => (
         <SelectField
@@ -38,7 +39,7 @@ export function OfferRow({ run, offer, index, form }: Props) {
             value: id,
             label: surchargeMinor > 0 ? words.surcharge(label, sum(surchargeMinor)) : label,
           }))}
-          optional
+          required={false}
         />
       ))}
     </div>
