@@ -3,7 +3,7 @@ import type { OfferKind } from './fields'
 /** An order as it would be placed: what the buyer reads once more before the button. */
 export type OrderQuoteView = {
   run: string
-  workshop: { slug: string; name: string }
+  workshop: { slug: string; name: string; country: string }
   module: { slug: string; name: string }
   currency: string
   lines: {

@@ -34,7 +34,7 @@ export async function getOrderQuote(asked: {
   const waiting = await Order.count({ where: { runId: run.id, state: 'waiting' } })
   return ok({
     run: run.id,
-    workshop: { slug: workshop.slug, name: workshop.name },
+    workshop: { slug: workshop.slug, name: workshop.name, country: workshop.country },
     module: { slug: module.slug, name: module.name },
     currency: run.currency,
     lines: lines.map(({ offer, quantity, choices }, index) => ({

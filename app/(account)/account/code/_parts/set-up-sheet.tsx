@@ -16,11 +16,11 @@ export function SetUpSheet({ secret, uri, recoveryCodes }: Props) {
         alt={words.squareAlt}
         width={200}
         height={200}
-        className="my-4 bg-white p-3"
+        className="bg-white my-4 p-3"
       />
       <p className="figures break-all">{secret}</p>
       <CopyText text={secret} label={words.key} />
-      <h3 className="text-17 pt-5">{words.recovery}</h3>
+      <h3 className="pt-5 text-17">{words.recovery}</h3>
       <p className="max-w-words text-15">{words.recoveryLead}</p>
       <ul className="figures grid grid-cols-2 gap-x-6 pt-2 sm:grid-cols-4">
         {recoveryCodes.map((code) => (

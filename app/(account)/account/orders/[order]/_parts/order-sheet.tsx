@@ -37,7 +37,7 @@ export function OrderSheet({ order }: { order: OrderPageView }) {
       </Sheet>
       <Sheet title={words.money} id="money">
         <Sums {...order} />
-        {order.card ? (
+        {order.card && (order.state === 'reserved' || order.state === 'balance_due') ? (
           <p className="pt-3 text-15">
             {words.card}: {words.cardEnding(order.card.brand, order.card.last4)}
           </p>

@@ -31,7 +31,9 @@ export function OrderCheck({ quote, input, values, draft, change }: Props) {
     {
       key: 'address',
       question: words.address,
-      answer: <AddressLines lines={formatAddress(input.address, { script: 'own', from: '' })} />,
+      answer: (
+        <AddressLines lines={formatAddress(input.address, { script: 'own', from: quote.workshop.country })} />
+      ),
       changeHref: change,
     },
     { key: 'balance', question: words.when, answer: words.balanceWhen[quote.balanceWhen] },
