@@ -1,4 +1,5 @@
 import { expect, test as base, type BrowserContext } from '@playwright/test'
+import { demoTemplate } from '../../scripts/support/demo-template.mjs'
 import { startTestApplication, type TestApplication } from '../../scripts/support/test-application.mjs'
 import { Sandbox } from './browser/sandbox'
 import { Watch } from './browser/watch'
@@ -26,17 +27,18 @@ export const test = base.extend<PerTest, PerWorker>({
   world: ['empty', { scope: 'worker', option: true }],
   application: [
     async ({ world }, use, { workerIndex }) => {
-      const template = world === 'demo' ? process.env.E2E_DEMO_TEMPLATE : process.env.E2E_TEMPLATE
+      const { E2E_SERVER_URL = '', E2E_TEMPLATE = '', E2E_FOLDER = '', E2E_SECRET = '' } = process.env
       const application = await startTestApplication({
-        serverUrl: process.env.E2E_SERVER_URL ?? '',
-        template: template ?? '',
-        folder: process.env.E2E_FOLDER ?? '.data/test',
+        serverUrl: E2E_SERVER_URL,
+        template: world === 'demo' ? await demoTemplate(E2E_FOLDER) : E2E_TEMPLATE,
+        folder: E2E_FOLDER,
         name: `e2e_${process.pid}_${workerIndex}`,
+        settings: { AUTH_SECRET: E2E_SECRET },
       })
       await use(application)
       await application.stop()
     },
-    { scope: 'worker', timeout: 120_000 },
+    { scope: 'worker', timeout: 300_000 },
   ],
   baseURL: async ({ application }, use) => use(application.baseUrl),
   watch: [

@@ -46,7 +46,7 @@ export async function keepParts(
       note: 'Fits the front panel and the footprint.',
     }
     done(
-      await recordSampleCheck({ actor, workshopId, module, input: SampleInput.parse(seen), now }),
+      await recordSampleCheck({ actor, workshopId, input: SampleInput.parse(seen), now }),
       `${module}: sample of ${code}`,
     )
   }

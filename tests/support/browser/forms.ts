@@ -1,0 +1,54 @@
+import { expect, type Locator, type Page } from '@playwright/test'
+
+type Typed = Record<string, string | boolean>
+
+/** The form that posts to an address, as somebody fills it in: by the names of its fields, whatever kind they are. */
+export function formTo(page: Page, action: string, nth = 0): Form {
+  return new Form(page, page.locator(`form[action="${action}"]`).nth(nth))
+}
+
+export class Form {
+  constructor(
+    private readonly page: Page,
+    readonly itself: Locator,
+  ) {}
+
+  async fill(typed: Typed): Promise<this> {
+    for (const [name, value] of Object.entries(typed)) await this.fillOne(name, value)
+    return this
+  }
+
+  /** Presses a button of the form, waits for the next page to load, and says what the form said where none came. */
+  async press(button: string | RegExp, leadsTo: RegExp): Promise<void> {
+    const loaded = this.page.waitForEvent('load', { timeout: 30_000 })
+    await Promise.all([loaded, this.itself.getByRole('button', { name: button }).first().click()]).catch(
+      async (error: unknown) => {
+        const said = await this.page.locator('main').innerText()
+        throw new Error(`no page came after "${String(button)}" at ${this.page.url()}:\n${said}`, {
+          cause: error,
+        })
+      },
+    )
+    const at = this.page.url()
+    if (!leadsTo.test(at)) {
+      const said = (await this.page.locator('main').innerText()).slice(0, 3000)
+      throw new Error(`"${String(button)}" led to ${at} instead of ${leadsTo}:\n${said}`)
+    }
+  }
+
+  private async fillOne(name: string, value: string | boolean): Promise<void> {
+    const fields = this.itself.locator(`[name="${name}"]:not([type=hidden])`)
+    await expect(fields.first(), `a field ${name}`).toBeAttached()
+    const kind = await fields.first().evaluate((field) => {
+      const { type, localName } = field as HTMLInputElement
+      return localName === 'select' ? 'select' : type
+    })
+    if (kind === 'radio') return this.itself.locator(`[name="${name}"][value="${value}"]`).check()
+    if (kind === 'checkbox') return fields.first().setChecked(value !== false)
+    if (kind === 'select') {
+      await fields.first().selectOption(String(value))
+      return
+    }
+    await fields.first().fill(String(value))
+  }
+}
