@@ -13,7 +13,6 @@ import { showSignInCode } from '@/lib/services/sign-in/show-sign-in-code'
 export const metadata: Metadata = {
   title: words.linkTitle,
   robots: { index: false },
-  referrer: 'no-referrer',
 }
 
 type Props = { params: Promise<{ token: string }> }
