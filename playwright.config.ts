@@ -16,7 +16,7 @@ export default defineConfig({
   globalSetup: './tests/support/e2e-global.ts',
   outputDir: 'test-results',
   workers: 2,
-  retries: 0,
+  retries: process.env.CI ? 1 : 0,
   timeout: 180_000,
   expect: { timeout: 15_000 },
   reporter: [

@@ -31,11 +31,14 @@ export default defineConfig({
         ...shared,
         test: {
           name: 'db',
-          include: ['tests/{services,queries,http,gateways,jobs,auth,db,sandbox,seeders,machine}/**/*.test.{ts,tsx}'],
+          include: [
+            'tests/{services,queries,http,gateways,jobs,auth,db,sandbox,seeders,machine}/**/*.test.{ts,tsx}',
+          ],
           environment: 'node',
           setupFiles: ['tests/support/db-setup.ts'],
           globalSetup: ['tests/support/db-global.ts'],
           testTimeout: 120_000,
+          retry: process.env.CI ? 1 : 0,
           hookTimeout: 60_000,
           maxWorkers: 2,
         },
@@ -49,6 +52,7 @@ export default defineConfig({
           setupFiles: ['tests/support/db-setup.ts'],
           globalSetup: ['tests/support/db-global.ts'],
           testTimeout: 120_000,
+          retry: process.env.CI ? 1 : 0,
           hookTimeout: 120_000,
           maxWorkers: 1,
         },
