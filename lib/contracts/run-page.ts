@@ -1,5 +1,5 @@
 import type { ReadinessFigures } from '@/lib/core/states/readiness-figures'
-import type { ReadinessKey, ReadinessState, RunView } from './runs'
+import type { ReadinessKey, ReadinessState, RunFigures, RunView } from './runs'
 
 export type OrderCounts = {
   /** Orders per state, those of the run's own buyers. */
@@ -69,6 +69,8 @@ export type RunPage = Omit<RunView, 'readiness'> & {
   /** Confirmed sign-ups of the module, and how many of them have not ordered in this run. */
   signUps: { confirmed: number; notOrdered: number }
   bulk: BulkSummary[]
+  /** What the run was locked on; null while it was not. */
+  decided: { at: string; figures: RunFigures; waived: { key: ReadinessKey; reason: string }[] } | null
 }
 
 export type RunOrderItem = {
@@ -79,7 +81,7 @@ export type RunOrderItem = {
   state: string
   kind: 'paid' | 'manual'
   units: number
-  lines: string
+  lines: { offer: 'boards' | 'kit' | 'built'; quantity: number }[]
   totalMinor: number
   depositMinor: number
   balanceMinor: number

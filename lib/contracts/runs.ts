@@ -125,5 +125,7 @@ export type RunListItem = Pick<
   RunView,
   'id' | 'module' | 'revision' | 'state' | 'minimum' | 'maximum' | 'decideBy'
 > & {
+  /** Counts up from 1 within the module. */
+  number: number
   deposited: number
 }

@@ -30,7 +30,11 @@ export const decision = {
       return { kind: 'stopped', title: 'Called off', words: 'This run will not be built.' }
     if (state === 'closed') return { kind: 'done', title: 'Closed', words: 'Everything of this run is done.' }
     if (state === 'locked')
-      return { kind: 'done', title: 'Locked', words: 'The run goes ahead; its figures are frozen.' }
+      return {
+        kind: 'done',
+        title: 'Locked',
+        words: 'The run goes ahead. These are the figures as they stand today.',
+      }
     if (state === 'draft')
       return { kind: 'plain', title: 'Not open yet', words: 'Nobody sees this run before you open it.' }
     const left = minimum - figures.deposited

@@ -53,7 +53,10 @@ const WORDS: Readonly<Record<ReadinessKey, (facts: Facts) => Words>> = {
     ready:
       samplesMarked === 0
         ? 'No part is marked to be checked first.'
-        : `All ${parts(samplesMarked)} marked to be checked first have been.`,
+        : plural(samplesMarked, {
+            one: 'The one part marked to be checked first has been.',
+            other: 'All # parts marked to be checked first have been.',
+          }),
     missing: `${parts(samplesMarked - samplesChecked)} marked to be checked first, without a good check on record.`,
     unknown: 'There is no parts list yet.',
   }),

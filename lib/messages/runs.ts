@@ -92,6 +92,10 @@ export const runWords = {
   } as Record<string, string>,
   bulkProgress: (done: number, total: number, failed: number) =>
     `${done} of ${total}${failed > 0 ? `, ${failed} not` : ''}`,
+  decidedTitle: 'What it was locked on',
+  decidedLead: 'Frozen with the lock, as it stood then.',
+  lockedOn: 'Locked',
+  letPass: (title: string) => `Let pass: ${title}`,
   lockedBelow: 'Locked below the minimum, because:',
   calledOffBecause: 'Called off, because:',
 

@@ -1,12 +1,13 @@
 import 'server-only'
-import { Run } from '@/models'
 import type { RepayAnswer, RunPage } from '@/lib/contracts/run-page'
+import type { RunFigures } from '@/lib/contracts/runs'
 import { can, type Actor } from '@/lib/core/policy/can'
 import { readinessFigures } from '@/lib/core/states/readiness-figures'
 import { readinessOf } from '@/lib/core/states/run-guards'
-import { listRunBulk } from './list-run-bulk'
+import { Decision, Run } from '@/models'
 import { figuresOf } from './figures-of'
 import { getRunFacts } from './get-run-facts'
+import { listRunBulk } from './list-run-bulk'
 import { runLineOf } from './promise-of'
 import { readinessFactsOf, repayOf } from './readiness-facts-of'
 import type { RunFacts } from './run-facts'
@@ -57,6 +58,7 @@ export async function getRunPage(cmd: {
     withdrawableUnits: unitsOf(facts).withdrawable,
     signUps: { confirmed: facts.signUps.confirmed, notOrdered: facts.signUps.notOrdered.length },
     bulk: await listRunBulk(runId),
+    decided: await decidedOf(runId, facts),
   }
 }
 
@@ -107,5 +109,20 @@ function moneyOf({ sums, money }: RunFacts): Pick<RunPage, 'orders' | 'money'> {
         .filter(({ state }) => state === 'reserved')
         .reduce((sum, { balanceMinor }) => sum + balanceMinor, 0),
     },
+  }
+}
+
+/** The figures frozen with the lock, and the lines that were let pass. */
+async function decidedOf(runId: string, { waivers }: RunFacts): Promise<RunPage['decided']> {
+  const decision = await Decision.findOne({ where: { runId, kind: 'lock' } })
+  if (!decision) return null
+  const { readiness, ...figures } = decision.figures as RunFigures & {
+    readiness: { key: string; state: string }[]
+  }
+  const passed = readiness.filter(({ state }) => state === 'waived').map(({ key }) => key)
+  return {
+    at: decision.at.toISOString(),
+    figures,
+    waived: waivers.filter(({ key }) => passed.includes(key)).map(({ key, reason }) => ({ key, reason })),
   }
 }

@@ -23,8 +23,9 @@ export async function getRunTemplate(cmd: {
   })
   if (!workshop || !module) return null
   const offers = [...(module.offers ?? [])].sort((a, b) => a.position - b.position)
+  // Newest first: AA after Z.
   const revisions = [...(module.revisions ?? [])].sort(
-    (a, b) => b.createdAt.getTime() - a.createdAt.getTime(),
+    ({ letter: a }, { letter: b }) => b.length - a.length || (a < b ? 1 : -1),
   )
   return {
     module: { slug: module.slug, name: module.name, state: module.state },

@@ -23,7 +23,7 @@ export async function listRunOrders(cmd: {
   if (!can(actor, 'order:list', { workshopId })) return { items: [], next: null }
   const rows = await sequelize.query<Row>(
     `select o.id, o.number, coalesce(a.name, p.name) as name, o.country, o.state, o.kind, o.unit_count as units,
-            (select string_agg(l.quantity || ' ' || l.offer_kind, ', ' order by l.position)
+            (select json_agg(json_build_object('offer', l.offer_kind, 'quantity', l.quantity) order by l.position)
              from order_lines l where l.order_id = o.id) as lines,
             o.total_minor as "totalMinor", o.deposit_minor as "depositMinor", o.balance_minor as "balanceMinor",
             o.placed_at as "placedAt", o.disputed_at is not null as "isDisputed"

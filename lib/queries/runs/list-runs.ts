@@ -19,7 +19,7 @@ export async function listRuns(cmd: {
 }): Promise<{ items: RunListItem[]; next: string | null }> {
   if (!can(cmd.actor, 'run:list', { workshopId: cmd.workshopId })) return { items: [], next: null }
   const rows = await sequelize.query<Row>(
-    `select r.id, m.slug, m.name, v.letter as revision, r.state, r.minimum, r.maximum,
+    `select r.id, r.number, m.slug, m.name, v.letter as revision, r.state, r.minimum, r.maximum,
             r.decide_by_on::text as "decideBy", r.created_at as "createdAt",
             coalesce((select sum(o.unit_count) from orders o where o.run_id = r.id and o.kind = 'paid'
                       and o.state in ('reserved', 'balance_due', 'paid', 'packed', 'posted')), 0)::int as deposited

@@ -1,15 +1,20 @@
 import 'server-only'
-import { QueryTypes } from 'sequelize'
+import { Op, QueryTypes, type Transaction } from 'sequelize'
 import { ok } from '@/lib/core/result'
 import { inTransaction } from '@/lib/db/in-transaction'
 import { sequelize } from '@/lib/db/sequelize'
+import { setDue } from '@/lib/jobs/set-due'
 import { lockOrder } from '@/lib/services/_steps/lock-order'
 import { PUT_OFF, putOffCharge } from '@/lib/services/_steps/put-off-charge'
 import { startBulk } from '@/lib/services/_steps/start-bulk'
+import { Order, type Run } from '@/models'
+
+/** Orders announced by one press fall due seconds apart: they wait for each other. */
+const TOGETHER_MS = 600_000
 
 /**
  * The day has come on which a balance is charged: a bulk job over every order of the run whose day it is, so that n of m
- * can be counted. The first order of a run to fall due brings the others along.
+ * can be counted. Orders that fall due within ten minutes of each other go together.
  * While a bank decides a dispute the charge is put off by a day.
  * Locks: run, order. Writes: a bulk job. Repeat: safe; an order is in one such job per announcement.
  */
@@ -20,6 +25,12 @@ export function startBalanceCharges(cmd: { orderId: string; now: Date }) {
     if (!locked || locked.run.state !== 'locked') return ok({ orders: 0 })
     const { run, order } = locked
     if (order.state === 'balance_due' && order.disputedAt !== null) await putOffCharge(tx, order, now)
+    const last = await lastSoon(tx, run, now)
+    if (last !== null) {
+      const { id: subjectId, workshopId } = order
+      await setDue(tx, { kind: 'balance_charge', subjectId, workshopId, at: last })
+      return ok({ orders: 0 })
+    }
     const rows = await sequelize.query<{ id: string }>(
       `select o.id from orders o
        where o.run_id = :runId and o.state = 'balance_due' and o.balance_charge_at <= :now
@@ -40,4 +51,15 @@ export function startBalanceCharges(cmd: { orderId: string; now: Date }) {
     await startBulk(tx, { kind: 'charge_balances', run, subjectIds, byPersonId: null, now })
     return ok({ orders: rows.length })
   })
+}
+
+/** When the last of those whose day comes within ten minutes is due; null when nobody's is. */
+async function lastSoon(tx: Transaction, run: Run, now: Date): Promise<Date | null> {
+  const soon = { [Op.gt]: now, [Op.lte]: new Date(now.getTime() + TOGETHER_MS) }
+  const order = await Order.findOne({
+    where: { runId: run.id, state: 'balance_due', balanceChargeAt: soon },
+    order: [['balanceChargeAt', 'DESC']],
+    transaction: tx,
+  })
+  return order?.balanceChargeAt ?? null
 }

@@ -147,7 +147,7 @@ describe('deeds about everyone’s money', () => {
   test('from a page want the words typed; a page without them changes nothing and loses nothing typed', async () => {
     const { order } = await reserved(world.run)
     const fields = { reason: 'The jacks cannot be had.' }
-    for (const typed of [{}, { typed: 'yes' }]) {
+    for (const typed of [{}, { typed: 'yes' }] as Record<string, string>[]) {
       const answer = await sendForm(callOff, 'call-off', { ...fields, ...typed })
       expect(answer.status).toBe(303)
       const back = new URL(answer.headers.get('location') ?? '', 'http://localhost:3000')

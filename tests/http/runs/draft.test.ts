@@ -45,6 +45,7 @@ describe('a run over HTTP', () => {
     expect(items.length).toBeGreaterThanOrEqual(2)
     expect(items).toContainEqual({
       id: run,
+      number: expect.any(Number),
       module: { slug: 'rowlock', name: 'Rowlock' },
       revision: 'A',
       state: 'draft',

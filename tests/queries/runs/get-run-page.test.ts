@@ -383,13 +383,9 @@ describe('who may see it', () => {
 describe('statements', () => {
   async function countStatements(): Promise<number> {
     let count = 0
-    const { logging } = sequelize.options
-    sequelize.options.logging = () => (count += 1)
-    try {
-      await pageOf()
-    } finally {
-      sequelize.options.logging = logging
-    }
+    const { options } = sequelize as unknown as { options: { logging: false | (() => void) } }
+    options.logging = () => void (count += 1)
+    await pageOf().finally(() => (options.logging = false))
     return count
   }
 

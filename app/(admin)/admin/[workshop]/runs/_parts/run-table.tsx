@@ -24,7 +24,9 @@ export function RunTable({ workshop, items, next, isFirst }: Props) {
         {
           key: 'module',
           heading: words.module,
-          cell: (row) => <a href={paths.adminRun(workshop, row.id)}>{row.module.name}</a>,
+          cell: (row) => (
+            <a href={paths.adminRun(workshop, row.id)}>{words.runTitle(row.module.name, row.number)}</a>
+          ),
         },
         { key: 'revision', heading: words.revision, cell: (row) => row.revision },
         { key: 'state', heading: words.state, cell: (row) => <RunStateMark state={row.state} /> },

@@ -7,8 +7,9 @@ import { NumberField } from '@/components/ui/text-field'
 import type { RunPage } from '@/lib/contracts/run-page'
 import { runWords as words } from '@/lib/messages/runs'
 import { paths } from '@/lib/paths'
+import type { KeptForm } from '@/lib/queries/forms/get-form-draft'
 
-type Kept = { values: Record<string, string>; errors: Record<string, string>; reason: string } | null
+type Kept = KeptForm | null
 type Props = { page: RunPage; lowered: Kept; closed: Kept }
 
 /** What the owner can do with the run as it stands; what moves money leads to a page that asks once more. */
@@ -16,6 +17,8 @@ export function DeedsSheet({ page, lowered, closed }: Props) {
   const { workshop, id, state, minimum, orders } = page
   if (state === 'closed' || state === 'called_off') return null
   const to = (deed: Parameters<typeof paths.adminRunDeed>[2]) => paths.adminRunDeed(workshop.slug, id, deed)
+  // What is in the post is not taken back; single orders still can be cancelled.
+  const canCallOff = (orders['posted'] ?? 0) === 0
   const canAsk = state === 'locked' && (orders['reserved'] ?? 0) > 0
   return (
     <Sheet title={words.deeds}>
@@ -35,7 +38,7 @@ export function DeedsSheet({ page, lowered, closed }: Props) {
             {words.ask}
           </LinkButton>
         ) : null}
-        <LinkButton href={to('call-off')}>{words.callOff}</LinkButton>
+        {canCallOff ? <LinkButton href={to('call-off')}>{words.callOff}</LinkButton> : null}
         {state === 'taking_deposits' && minimum > 1 ? (
           <LowerMinimum action={paths.api.adminRunDeed(workshop.slug, id, 'lower-minimum')} kept={lowered} />
         ) : null}

@@ -10,9 +10,10 @@ import { atTypedRows } from '@/lib/contracts/run-forms'
 import type { RunTemplate } from '@/lib/contracts/run-page'
 import { runWords as words } from '@/lib/messages/runs'
 import { paths } from '@/lib/paths'
+import type { KeptForm } from '@/lib/queries/forms/get-form-draft'
 import { OfferRow } from './offer-row'
 
-type Kept = { values: Record<string, string>; errors: Record<string, string>; reason: string } | null
+type Kept = KeptForm | null
 type Props = { workshop: string; template: RunTemplate; kept: Kept }
 
 const balances = (['at_lock', 'units_passed', 'before_packing'] as const).map((value) => ({

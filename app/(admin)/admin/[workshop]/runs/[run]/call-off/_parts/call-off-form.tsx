@@ -10,8 +10,9 @@ import { formatMoney } from '@/lib/core/money/format'
 import { decision } from '@/lib/messages/decision'
 import { runWords as words } from '@/lib/messages/runs'
 import { paths } from '@/lib/paths'
+import type { KeptForm } from '@/lib/queries/forms/get-form-draft'
 
-type Kept = { values: Record<string, string>; errors: Record<string, string>; reason: string } | null
+type Kept = KeptForm | null
 
 const ENDED = ['waiting', 'awaiting_deposit', 'reserved', 'balance_due', 'paid', 'packed']
 

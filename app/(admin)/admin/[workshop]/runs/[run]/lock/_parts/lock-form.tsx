@@ -8,8 +8,9 @@ import { atTypedRows } from '@/lib/contracts/run-forms'
 import type { RunPage } from '@/lib/contracts/run-page'
 import { runWords as words } from '@/lib/messages/runs'
 import { paths } from '@/lib/paths'
+import type { KeptForm } from '@/lib/queries/forms/get-form-draft'
 
-type Kept = { values: Record<string, string>; errors: Record<string, string>; reason: string } | null
+type Kept = KeptForm | null
 type Props = { page: RunPage; open: readonly { key: string; title: string }[]; kept: Kept }
 
 /** The go: a reason for each line let pass, one for going below the minimum, and the words typed. */

@@ -42,7 +42,7 @@ export function OrderTable({ page, list, here, state, before }: Props) {
               .filter(Boolean)
               .join(', '),
         },
-        { key: 'lines', heading: words.units, cell: (row) => row.lines },
+        { key: 'lines', heading: words.units, cell: (row) => linesOf(row) },
         {
           key: 'total',
           heading: words.total,
@@ -58,6 +58,9 @@ export function OrderTable({ page, list, here, state, before }: Props) {
     />
   )
 }
+
+const linesOf = ({ lines }: RunOrderItem) =>
+  lines.map(({ offer, quantity }) => `${quantity} × ${words.offers[offer]}`).join(', ')
 
 function StateLinks({ page, here, state }: Pick<Props, 'page' | 'here' | 'state'>) {
   const link = (to: string | undefined, label: string, count?: number) => (
