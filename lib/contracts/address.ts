@@ -18,11 +18,15 @@ export const AddressInput = z.object({
   name: line(100, 'Enter the name on the parcel.'),
   organization: optionalLine(100),
   lines: z.preprocess(
-    (typed) => (Array.isArray(typed) ? typed.filter((each) => each !== '') : typed),
+    (typed) => (Array.isArray(typed) ? typed.filter((each) => each !== '') : (typed ?? [])),
     z
       .array(line(120), { error: 'Enter the street and number.' })
-      .min(1, 'Enter the street and number.')
-      .max(3),
+      .max(3)
+      // At the first line, where it is mended.
+      .superRefine((lines, check) => {
+        if (lines.length === 0)
+          check.addIssue({ code: 'custom', path: [0], message: 'Enter the street and number.' })
+      }),
   ),
   city: optionalLine(100),
   region: optionalLine(100),
