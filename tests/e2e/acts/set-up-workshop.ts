@@ -127,7 +127,11 @@ export async function enterModule(page: Page, { slug, module }: House, today: Da
   const offer = await formTo(page, on('offers')).fill({
     ...{ priceMinor: '95.00', depositMinor: '25.00', contents: 'Everything but solder.' },
     ...{ netWeightG: '280', packedWeightG: '420', lengthMm: '200', widthMm: '140', heightMm: '60' },
-    ...{ customsDescription: 'Clock divider for audio racks, kit of parts', customsCode: '920710', customsOrigin: 'DE' },
+    ...{
+      customsDescription: 'Clock divider for audio racks, kit of parts',
+      customsCode: '920710',
+      customsOrigin: 'DE',
+    },
   })
   await offer.press(modulesAdminWords.save, SAVED)
 

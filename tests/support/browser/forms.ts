@@ -23,17 +23,17 @@ export class Form {
     const loaded = this.page.waitForEvent('load', { timeout: 30_000 })
     await Promise.all([loaded, this.itself.getByRole('button', { name: button }).first().click()]).catch(
       async (error: unknown) => {
-        const said = await this.page.locator('main').innerText()
-        throw new Error(`no page came after "${String(button)}" at ${this.page.url()}:\n${said}`, {
-          cause: error,
-        })
+        throw new Error(`no page came after "${String(button)}": ${await this.said()}`, { cause: error })
       },
     )
-    const at = this.page.url()
-    if (!leadsTo.test(at)) {
-      const said = (await this.page.locator('main').innerText()).slice(0, 3000)
-      throw new Error(`"${String(button)}" led to ${at} instead of ${leadsTo}:\n${said}`)
-    }
+    if (!leadsTo.test(this.page.url()))
+      throw new Error(`"${String(button)}" did not lead to ${leadsTo}: ${await this.said()}`)
+  }
+
+  /** Where the page is, what it is called, and every sentence about a mistake on it. */
+  private async said(): Promise<string> {
+    const sentences = await this.page.locator('h1, [id$="-error"], [role=alert]').allInnerTexts()
+    return [this.page.url(), ...sentences].join('\n')
   }
 
   private async fillOne(name: string, value: string | boolean): Promise<void> {
