@@ -22,12 +22,13 @@ const PARTS = {
     needsBrowser: true,
     run: (env) => runPart('browser', () => runPlaywright(['--grep-invert', '@full'], env)),
   },
+}
+/** The short faults are here until they were seen green from a fresh clone (issue 2). */
+const LONG_PARTS = {
   faults: {
     needsDatabase: true,
     run: (env) => runPart('faults', () => runVitest(['faults'], { ...env, FAULTS: 'short' })),
   },
-}
-const LONG_PARTS = {
   'faults-long': {
     needsDatabase: true,
     run: (env) => runPart('faults-long', () => runVitest(['faults'], { ...env, FAULTS: 'long' })),

@@ -25,7 +25,7 @@ test('every page has a screen to be looked at', () => {
 })
 
 for (const { by, half } of LOOKERS) {
-  test(`the pages of the ${by}${half === undefined ? '' : `, part ${half + 1}`}`, async ({
+  test(`the pages of the ${by}${half === undefined ? '' : `, part ${half + 1}`} @full`, async ({
     application,
     browserOf,
   }) => {

@@ -40,7 +40,7 @@ export class Machine {
         ...this.env,
         TSX_TSCONFIG_PATH: resolve('tsconfig.scripts.json'),
         ...(crashAt && { CRASH_AT: crashAt }),
-      },
+      } as unknown as NodeJS.ProcessEnv,
       stdio: ['ignore', 'pipe', 'pipe'],
     })
     this.running.set(part, child)

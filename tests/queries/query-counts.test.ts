@@ -58,7 +58,7 @@ async function addRow(): Promise<void> {
     state: 'packed',
     grams: 420,
     packedAt: NOW,
-    packedByPersonId: world.owner.id,
+    packedByPersonId: (world as unknown as { owner: Person }).owner.id,
   } as const
   await makeParcel(packed.order, packed.lines, packedParcel)
   await makeOrder({ run, lines }, { state: 'paid', disputedAt: NOW })
@@ -91,7 +91,7 @@ beforeAll(async () => {
   world = await makeWorld()
   buyer = await makePerson()
   people = {
-    owner: await actorOf(world.owner),
+    owner: await actorOf((world as unknown as { owner: Person }).owner),
     buyer: await actorOf(buyer),
     host: await actorOf(await makePerson(), { host: true }),
   }
