@@ -12,7 +12,7 @@ type Props = { orders: readonly OrderView[]; next: string | null; isFirst: boole
 /** A person's orders, newest first. */
 export function OrderTable({ orders, next, isFirst }: Props) {
   return (
-    <Sheet title={words.orders} id="orders" flush>
+    <Sheet title={words.orders} id="orders">
       <Table
         caption={words.orders}
         captionHidden

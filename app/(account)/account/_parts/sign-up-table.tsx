@@ -9,7 +9,7 @@ import { paths } from '@/lib/paths'
 /** A person's statements of interest. */
 export function SignUpTable({ signUps }: { signUps: readonly OwnSignUp[] }) {
   return (
-    <Sheet title={words.signUps} id="sign-ups" flush>
+    <Sheet title={words.signUps} id="sign-ups">
       <Table
         caption={words.signUps}
         captionHidden
@@ -29,7 +29,7 @@ export function SignUpTable({ signUps }: { signUps: readonly OwnSignUp[] }) {
           },
         ]}
       />
-      <p className="px-4 pt-3 pb-5 text-15 text-quiet sm:px-6">{words.takeBack}</p>
+      <p className="pt-3 text-15 text-quiet">{words.takeBack}</p>
     </Sheet>
   )
 }
