@@ -24,6 +24,7 @@ export function RunColumns({ page, lowered, closed }: Props) {
     <Columns>
       <Stack>
         <GaugeSheet page={page} />
+        <VerdictSheet {...page} locale={page.workshop.locale} notReady={notReady} />
         {isOpen ? (
           <Sheet title={words.readiness} id="readiness">
             <p className="max-w-words pb-3 text-15 text-quiet">{words.readinessLead}</p>
@@ -38,7 +39,6 @@ export function RunColumns({ page, lowered, closed }: Props) {
         ) : null}
       </Stack>
       <Stack>
-        <VerdictSheet {...page} locale={page.workshop.locale} notReady={notReady} />
         <DeedsSheet page={page} lowered={lowered} closed={closed} />
         <FiguresSheet page={page} />
         <BulkSheet page={page} />
