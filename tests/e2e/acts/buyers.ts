@@ -44,7 +44,7 @@ export async function order(page: Page, { slug, module }: House, name: string): 
 /** Types a test card on the sandbox's card page; where the bank asks, says yes. Ends on the order's page. */
 export async function payOnCardPage(page: Page, card: string): Promise<string> {
   if (/\/pay\//.test(page.url())) {
-    await page.getByLabel(/card number/i).fill(card)
+    await page.locator('#number').fill(card)
     await page.getByRole('button', { name: /^Pay / }).click()
   }
   await page.waitForURL(/\/account\/orders\/|\/authenticate\//)
