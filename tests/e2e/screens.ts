@@ -83,6 +83,7 @@ export const SCREENS: Readonly<Record<string, { by: Looker; at: (found: Found) =
   '/admin/[workshop]/modules/[module]/offers': { by: 'owner', at: () => [`${ROWLOCK}/offers?offer=kit`] },
   '/admin/[workshop]/modules/[module]/parts': { by: 'owner', at: () => [`${ROWLOCK}/parts`] },
   '/admin/[workshop]/modules/[module]/plan': { by: 'owner', at: () => [`${ROWLOCK}/plan`] },
+  '/admin/[workshop]/modules/[module]/preview': { by: 'owner', at: () => [`${ROWLOCK}/preview`] },
   '/admin/[workshop]/modules/[module]/revisions': { by: 'owner', at: () => [`${ROWLOCK}/revisions`] },
   '/admin/[workshop]/runs': { by: 'owner', at: () => [`${ADMIN}/runs`] },
   '/admin/[workshop]/runs/new': {

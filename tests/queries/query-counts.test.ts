@@ -21,7 +21,7 @@ import { getRunPage } from '@/lib/queries/runs/get-run-page'
 import { listRunOrders } from '@/lib/queries/runs/list-run-orders'
 import { listRuns } from '@/lib/queries/runs/list-runs'
 import { getDesk } from '@/lib/queries/workshops/get-desk'
-import { BulkItem, BulkJob, Part, Person, RevisionLine } from '@/models'
+import { BulkItem, BulkJob, Part, type Person, RevisionLine } from '@/models'
 import { NOW, serial } from '@/tests/support/worlds/base'
 import { makeModule } from '@/tests/support/worlds/module'
 import { makeAddress, makeOrder } from '@/tests/support/worlds/order'
@@ -37,7 +37,7 @@ let world: World
 let buyer: Person
 let people: Record<'owner' | 'buyer' | 'host', Actor>
 let bulk: BulkJob
-let parcelIds: string[] = []
+const parcelIds: string[] = []
 
 async function makeWorld() {
   return makeRun(undefined, { maximum: 500, minimum: 3 })
