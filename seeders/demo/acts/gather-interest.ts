@@ -28,6 +28,9 @@ export type Interested = Buyer & {
   certainty: Certainty
 }
 
+/** People come in small crowds: fewer moments to wait for make a demo that is there sooner. */
+const DAYS_AT_ONCE = 4
+
 const CERTAINTY: readonly (readonly [Certainty, number])[] = [
   ['certain', 4],
   ['likely', 4],
@@ -43,9 +46,10 @@ export async function* gatherInterest(stage: Stage, given: Interest): Story<Inte
   const chance = chanceOf(given.seed)
   const began = await stage.now()
   const confirmed: Interested[] = []
-  for (let day = 0; day < given.days; day += 1) {
-    const upTo = (passed: number) => Math.round((given.people.length * passed) / given.days)
-    const today = given.people.slice(upTo(day), upTo(day + 1)).map((buyer) => ({
+  for (let day = 0; day < given.days; day += DAYS_AT_ONCE) {
+    const upTo = (passed: number) =>
+      Math.round((given.people.length * Math.min(passed, given.days)) / given.days)
+    const these = given.people.slice(upTo(day), upTo(day + DAYS_AT_ONCE)).map((buyer) => ({
       ...buyer,
       offer: chance.weighted(given.offers),
       quantity: chance.weighted(QUANTITY),
@@ -55,18 +59,18 @@ export async function* gatherInterest(stage: Stage, given: Interest): Story<Inte
       updates: chance.next() < 0.6,
     }))
     const now = await stage.now()
-    await sideBySide(today, async ({ confirms: _, name: _name, address: _address, ...asked }) => {
+    await sideBySide(these, async ({ confirms: _, name: _name, address: _address, ...asked }) => {
       const input = SignUpInput.parse({ workshop: given.workshop, module: given.module, ...asked })
       done(await submitSignUp({ input, now }), `a sign-up for ${given.module}`)
     })
     await stage.settle()
-    const sure = today.filter(({ confirms }) => confirms)
+    const sure = these.filter(({ confirms }) => confirms)
     await sideBySide(sure, async ({ email }) => {
       const token = await stage.tokenFrom(email, '/confirm')
       done(await confirmSignUp({ token, now: await stage.now() }), 'confirming')
     })
     confirmed.push(...sure)
-    yield new Date(began.getTime() + (day + 1) * 86_400_000)
+    yield new Date(began.getTime() + Math.min(day + DAYS_AT_ONCE, given.days) * 86_400_000)
   }
   return confirmed
 }

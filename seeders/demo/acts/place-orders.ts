@@ -15,6 +15,8 @@ export const CARD = {
   disputedAsMissing: '4000 0000 0000 2685',
 } as const
 
+const DAYS_AT_ONCE = 3
+
 export type Wanted = Buyer & {
   lines: readonly { offer: 'boards' | 'kit' | 'built'; quantity: number }[]
   card?: string
@@ -32,10 +34,13 @@ export async function* placeOrders(
 ): Story<string[]> {
   const began = await stage.now()
   const orders: string[] = []
-  for (let day = 0; day < days; day += 1) {
-    const upTo = (passed: number) => Math.round((wanted.length * passed) / days)
+  for (let day = 0; day < days; day += DAYS_AT_ONCE) {
+    const upTo = (passed: number) => Math.round((wanted.length * Math.min(passed, days)) / days)
     const paying: Promise<void>[] = []
-    for (const { email, address, lines, card = CARD.pays } of wanted.slice(upTo(day), upTo(day + 1))) {
+    for (const { email, address, lines, card = CARD.pays } of wanted.slice(
+      upTo(day),
+      upTo(day + DAYS_AT_ONCE),
+    )) {
       const [actor, now] = [await stage.person(email), await stage.now()]
       const input = OrderInput.parse({ run, lines, address })
       const placed = done(await placeOrder({ actor, input, now }), `an order of ${email}`)
@@ -44,7 +49,7 @@ export async function* placeOrders(
     }
     await Promise.all(paying)
     await stage.settle()
-    yield new Date(began.getTime() + (day + 1) * 86_400_000)
+    yield new Date(began.getTime() + Math.min(day + DAYS_AT_ONCE, days) * 86_400_000)
   }
   return orders
 }
