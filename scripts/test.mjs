@@ -1,5 +1,5 @@
 import { existsSync } from 'node:fs'
-import { join, resolve } from 'node:path'
+import { resolve } from 'node:path'
 import { removeDatabase, startDatabase } from './database.mjs'
 import { runCheck } from './check.mjs'
 import { ensureBuild } from './support/build.mjs'
@@ -10,7 +10,6 @@ import { main, say, Stop } from './support/shell.mjs'
 
 // Everything that must be green, from a fresh clone: `npm test`; one part: `npm test -- --only db`. The long parts
 // run only when named.
-const has = (folder) => existsSync(join('tests', folder))
 const PARTS = {
   check: { run: () => runCheck({ isFull: true }) },
   db: { needsDatabase: true, run: (env) => runPart('db', () => runVitest(['db'], env)) },
@@ -22,13 +21,12 @@ const PARTS = {
     needsBrowser: true,
     run: (env) => runPart('browser', () => runPlaywright(['--grep-invert', '@full'], env)),
   },
-}
-/** The short faults are here until they were seen green from a fresh clone (issue 2). */
-const LONG_PARTS = {
   faults: {
     needsDatabase: true,
     run: (env) => runPart('faults', () => runVitest(['faults'], { ...env, FAULTS: 'short' })),
   },
+}
+const LONG_PARTS = {
   'faults-long': {
     needsDatabase: true,
     run: (env) => runPart('faults-long', () => runVitest(['faults'], { ...env, FAULTS: 'long' })),
@@ -77,10 +75,7 @@ main(async () => {
 function chooseParts(args) {
   const at = args.indexOf('--only')
   const all = { ...PARTS, ...LONG_PARTS }
-  const names =
-    at < 0
-      ? Object.keys(PARTS).filter((name) => name !== 'faults' || has('faults'))
-      : (args[at + 1] ?? '').split(',')
+  const names = at < 0 ? Object.keys(PARTS) : (args[at + 1] ?? '').split(',')
   const unknown = names.filter((name) => !all[name])
   if (unknown.length > 0)
     throw new Stop(`--only takes ${Object.keys(all).join(', ')}; not "${unknown.join(', ')}".`)

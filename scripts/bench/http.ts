@@ -1,0 +1,118 @@
+import { gzipSync } from 'node:zlib'
+import autocannon, { type Request } from 'autocannon'
+import { pathToFileURL } from 'node:url'
+import { run } from '../support/shell.mjs'
+import { openServers, type Servers } from './servers'
+
+type Measure = { name: string; value: number; unit: string }
+
+const CONNECTIONS = 50
+const SLICE_SECONDS = 3
+const PAIRS = 6
+const PAGE = '/w/hollow-pier/rowlock'
+let sent = 0
+
+/**
+ * Requests a second of ours against the bare one's, in slices taken in turn so that a busy machine meets both alike; the
+ * median of the pairs' ratios.
+ */
+async function ratio(ours: () => Promise<number>, bare: () => Promise<number>) {
+  await ours()
+  await bare()
+  const pairs: { ours: number; bare: number }[] = []
+  for (let pair = 0; pair < PAIRS; pair += 1) pairs.push({ ours: await ours(), bare: await bare() })
+  const median = (list: number[]) => list.sort((a, b) => a - b)[Math.floor(list.length / 2)]!
+  return {
+    ratio: median(pairs.map((each) => each.ours / each.bare)),
+    ours: median(pairs.map((each) => each.ours)),
+    bare: median(pairs.map((each) => each.bare)),
+  }
+}
+
+async function load(url: string, request: Request = {}): Promise<number> {
+  const answer = await autocannon({
+    url,
+    connections: CONNECTIONS,
+    duration: SLICE_SECONDS,
+    requests: [request],
+  })
+  if (answer.non2xx > 0 || answer.errors > 0)
+    throw new Error(`${url}: ${answer.non2xx} answers were not 2xx, ${answer.errors} failed`)
+  return answer.requests.average
+}
+
+/** A sign-up by somebody new each time, from an address of its own: limits are for one person. */
+const signUp = (body: object): Request => ({
+  method: 'POST',
+  headers: { 'content-type': 'application/json' },
+  setupRequest: (request) => {
+    sent += 1
+    return {
+      ...request,
+      headers: {
+        'content-type': 'application/json',
+        'x-forwarded-for': `10.${sent >> 16}.${(sent >> 8) & 255}.${sent & 255}`,
+      },
+      body: JSON.stringify({ ...body, email: `somebody-${sent}@bench.brimline.example` }),
+    }
+  },
+})
+
+const INTEREST = {
+  ...{ workshop: 'hollow-pier', module: 'rowlock', offer: 'kit', quantity: 1 },
+  ...{ country: 'DE', certainty: 'likely', updates: false },
+}
+
+/** What a first visit loads of JavaScript, compressed; what only old browsers load is left out. */
+async function firstLoad({ ours }: Servers): Promise<Measure[]> {
+  const html = await (await fetch(`${ours}${PAGE}`)).text()
+  const scripts = [...html.matchAll(/<script\b[^>]*\bsrc="([^"]+)"[^>]*>/g)]
+    .filter(([tag]) => !/nomodule/i.test(tag!))
+    .map(([, src]) => new URL(src!.replaceAll('&amp;', '&'), ours).href)
+  const sizes = await Promise.all(
+    [...new Set(scripts)].map(
+      async (src) => gzipSync(Buffer.from(await (await fetch(src)).arrayBuffer())).length,
+    ),
+  )
+  const total = sizes.reduce((sum, size) => sum + size, 0)
+  return [
+    {
+      name: `module page, JavaScript of a first load (${sizes.length} files, gzip)`,
+      value: total / 1024,
+      unit: 'KiB',
+    },
+    { name: 'module page, HTML (gzip)', value: gzipSync(html).length / 1024, unit: 'KiB' },
+  ]
+}
+
+/** The module page and the sign-up beside a bare page and a bare insert of the same framework. */
+export async function benchHttp(): Promise<Measure[]> {
+  const servers = await openServers(async (env) => {
+    await run(process.execPath, ['scripts/run.mjs', 'scripts/bench/prepare.ts'], { env })
+  })
+  try {
+    const { ours, bare } = servers
+    const page = await ratio(
+      () => load(`${ours}${PAGE}`),
+      () => load(`${bare}/`),
+    )
+    const post = await ratio(
+      () => load(`${ours}/api/signups`, signUp(INTEREST)),
+      () => load(`${bare}/api/rows`, signUp({})),
+    )
+    return [
+      { name: 'module page against a bare static page', value: page.ratio, unit: '×' },
+      { name: 'module page', value: page.ours, unit: 'requests/s' },
+      { name: 'sign-up against a bare insert', value: post.ratio, unit: '×' },
+      { name: 'sign-up', value: post.ours, unit: 'requests/s' },
+      ...(await firstLoad(servers)),
+    ]
+  } finally {
+    await servers.close()
+  }
+}
+
+if (process.argv[1] !== undefined && import.meta.url === pathToFileURL(process.argv[1]).href) {
+  for (const { name, value, unit } of await benchHttp())
+    console.log(`${name.padEnd(66)} ${value.toFixed(value < 10 ? 2 : 0).padStart(8)} ${unit}`)
+}
