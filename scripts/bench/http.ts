@@ -63,25 +63,38 @@ const INTEREST = {
   ...{ country: 'DE', certainty: 'likely', updates: false },
 }
 
-/** What a first visit loads of JavaScript, compressed; what only old browsers load is left out. */
-async function firstLoad({ ours }: Servers): Promise<Measure[]> {
-  const html = await (await fetch(`${ours}${PAGE}`)).text()
+/** What a first visit of a page loads of JavaScript, compressed; what only old browsers load is left out. */
+async function scriptsOf(url: string): Promise<{ files: number; bytes: number; html: number }> {
+  const html = await (await fetch(url)).text()
   const scripts = [...html.matchAll(/<script\b[^>]*\bsrc="([^"]+)"[^>]*>/g)]
     .filter(([tag]) => !/nomodule/i.test(tag!))
-    .map(([, src]) => new URL(src!.replaceAll('&amp;', '&'), ours).href)
+    .map(([, src]) => new URL(src!.replaceAll('&amp;', '&'), url).href)
   const sizes = await Promise.all(
     [...new Set(scripts)].map(
       async (src) => gzipSync(Buffer.from(await (await fetch(src)).arrayBuffer())).length,
     ),
   )
-  const total = sizes.reduce((sum, size) => sum + size, 0)
+  return {
+    files: sizes.length,
+    bytes: sizes.reduce((sum, size) => sum + size, 0),
+    html: gzipSync(html).length,
+  }
+}
+
+async function firstLoad({ ours, bare }: Servers): Promise<Measure[]> {
+  const [page, nothing] = [await scriptsOf(`${ours}${PAGE}`), await scriptsOf(`${bare}/`)]
   return [
     {
-      name: `module page, JavaScript of a first load (${sizes.length} files, gzip)`,
-      value: total / 1024,
+      name: `module page, JavaScript of a first load (${page.files} files, gzip)`,
+      value: page.bytes / 1024,
       unit: 'KiB',
     },
-    { name: 'module page, HTML (gzip)', value: gzipSync(html).length / 1024, unit: 'KiB' },
+    {
+      name: 'module page, that JavaScript against a bare page',
+      value: page.bytes / nothing.bytes,
+      unit: '×',
+    },
+    { name: 'module page, HTML (gzip)', value: page.html / 1024, unit: 'KiB' },
   ]
 }
 

@@ -18,6 +18,10 @@ export function run(command, args, { show = false, allowFailure = false, input, 
       stdio: [input === undefined ? 'ignore' : 'pipe', show ? 'inherit' : 'pipe', show ? 'inherit' : 'pipe'],
       ...options,
     })
+    // Whoever is told to stop in the middle takes the program along.
+    const end = () => child.kill()
+    process.once('exit', end)
+    child.on('close', () => process.off('exit', end))
     let output = ''
     child.stdout?.on('data', (chunk) => (output += chunk))
     child.stderr?.on('data', (chunk) => (output += chunk))
