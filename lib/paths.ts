@@ -123,7 +123,7 @@ export const paths = {
     adminRunDeed: (
       workshop: string,
       run: string,
-      deed: 'open' | 'lock' | 'call-off' | 'ask-balances' | 'lower-minimum' | 'close' | 'plan',
+      deed: 'open' | 'lock' | 'call-off' | 'ask-balances' | 'lower-minimum' | 'close' | 'plan' | 'plan/try',
     ) => `/api/admin/${part(workshop)}/runs/${part(run)}/${deed}`,
     adminBulk: (workshop: string, bulk: string) => `/api/admin/${part(workshop)}/bulk/${part(bulk)}`,
     packingQueue: (workshop: string) => `/api/packing/${part(workshop)}/queue`,

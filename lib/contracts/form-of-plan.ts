@@ -4,6 +4,9 @@ import { writeShare } from '@/lib/core/plain/share'
 import { writeUnitPrice } from '@/lib/core/plain/unit-price'
 import { writeBreaks } from './price-breaks'
 
+/** Two in a hundred come back. Our own value; common practice, no source. */
+const USUAL_FAILURES = 200
+
 type Step = {
   id: string
   name: string
@@ -39,6 +42,9 @@ export function formOfPlan(plan: CostPlan, steps: readonly Step[]) {
     refundShare: writeShare(plan.fees.refund.shareBasisPoints),
     disputeShare: writeShare(plan.fees.dispute.shareBasisPoints),
     disputeFixedMinor: plan.fees.dispute.fixed,
+    canLayOutMinor: plan.outlook?.canLayOut ?? null,
+    laterUnits: plan.outlook?.laterUnits ?? 0,
+    failurePercent: writeShare(plan.outlook?.failureBasisPoints ?? USUAL_FAILURES),
     taxes: plan.tax.rates.map(({ basisPoints, weight }) => ({ rate: writeShare(basisPoints), weight })),
     oneOff: plan.oneOff.map(asTyped),
     atRisk: plan.atRisk.map(asTyped),

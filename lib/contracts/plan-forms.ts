@@ -162,6 +162,12 @@ export const PlanInput = z
     refundShare: percent(),
     disputeShare: percent(),
     disputeFixedMinor: sum,
+    canLayOutMinor: blank(minorAmount()),
+    laterUnits: z.preprocess(
+      (each) => (each === '' || each === undefined ? 0 : each),
+      wholeNumber(0, 10_000),
+    ),
+    failurePercent: percent('2'),
     taxes: rows(z.object({ rate: percent(), weight: wholeNumber(0, 1000) }), 6),
     oneOff: rows(NamedSum, 20, ['currency']),
     atRisk: rows(NamedSum, 10, ['currency']),
@@ -171,7 +177,8 @@ export const PlanInput = z
     rates: rows(Rate, 8),
     steps: z.preprocess(numbered, rows(Step, 30, ['id'])),
   })
-  .superRefine(({ steps, rates, suppliers }, check) => {
+  .superRefine((plan, check) => {
+    const { steps, rates, suppliers } = plan
     const at = (path: (string | number)[], message: string) =>
       check.addIssue({ code: 'custom', path, message })
     const twice = (list: readonly string[]) => list.findIndex((each, i) => list.indexOf(each) !== i)
@@ -179,6 +186,9 @@ export const PlanInput = z
     if (rate >= 0) at(['rates', rate, 'currency'], 'This currency stands here twice.')
     const supplier = twice(suppliers.map((row) => row.supplier))
     if (supplier >= 0) at(['suppliers', supplier, 'supplier'], 'This supplier stands here twice.')
+    for (const { path, currency } of currenciesOf(plan))
+      if (currency !== plan.currency && !rates.some((each) => each.currency === currency))
+        at(path, `There is no exchange rate for ${currency}. Enter one under “Exchange rates”.`)
     const unknown = steps.find(({ after }) => after.some((id) => !steps.some((step) => step.id === id)))
     if (unknown)
       return at(['steps', Number(unknown.id) - 1, 'after'], 'Name steps by the number of their row.')
@@ -189,3 +199,18 @@ export const PlanInput = z
       at(['steps', 0, 'after'], 'These steps wait for one another in a circle.')
   })
 export type PlanInput = z.infer<typeof PlanInput>
+
+type Priced = Pick<PlanInput, 'oneOff' | 'atRisk' | 'boards' | 'assembly' | 'suppliers'>
+
+/** Every currency a plan is entered in, with the place it stands at. */
+function currenciesOf(plan: Priced): { path: (string | number)[]; currency: string }[] {
+  const lists = ['oneOff', 'atRisk', 'boards', 'suppliers'] as const
+  const rowsOf = lists.flatMap((list) =>
+    // A row that could not be read is undefined here; its own sentence stands at it.
+    plan[list].flatMap((row: { currency: string } | undefined, i) =>
+      row ? [{ path: [list, i, 'currency'], currency: row.currency }] : [],
+    ),
+  )
+  const assembly = plan.assembly?.currency
+  return assembly ? [...rowsOf, { path: ['assembly', 'currency'], currency: assembly }] : rowsOf
+}

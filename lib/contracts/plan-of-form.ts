@@ -86,5 +86,10 @@ export function planOfForm(form: PlanInput, setting: PlanSetting): CostPlan {
       rates: form.taxes.map(({ rate, weight }) => ({ basisPoints: rate, weight })),
     },
     payout: { delayDays: setting.payoutDelayDays, reserveBasisPoints: 0, reserveDays: 0 },
+    outlook: {
+      canLayOut: form.canLayOutMinor ?? null,
+      laterUnits: form.laterUnits,
+      failureBasisPoints: form.failurePercent,
+    },
   }
 }

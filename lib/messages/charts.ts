@@ -108,6 +108,17 @@ export const charts = {
   breakEven: 'break-even',
   stepChartCaption: 'Profit at the quantities that matter',
   noCurve: 'Profit cannot be drawn before the costs are known.',
+  noBalance: 'No money moves yet: fill in prices and costs.',
+  balanceLow: (sum: string, day: string) =>
+    `At its lowest, on ${writtenDay(day)}, the run has taken ${sum} of your own money.`,
+  balanceNeverLow: 'The run never takes money of your own: deposits and balances come before the bills.',
+  balanceBeyond: (over: string, limit: string) => `That is ${over} more than the ${limit} you can lay out.`,
+  balanceWithin: (limit: string) => `That is within the ${limit} you can lay out.`,
+  balanceCaption: 'Money in the bank at the end of each day that moves some',
+  balance: 'In the bank',
+  day: 'Day',
+  limit: 'what you can lay out',
+  lowest: 'lowest',
   axisUnits: 'units',
   loss: 'loss',
 }

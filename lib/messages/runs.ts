@@ -64,6 +64,7 @@ export const runWords = {
   runTitle: (module: string, number: number) => `${module}, run ${number}`,
   pages: 'Pages of this run',
   decision: 'Decision',
+  costsTitle: 'Costs',
   publicPage: 'The public page',
   gauge: 'Deposits',
   readiness: 'Readiness list',

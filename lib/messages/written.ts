@@ -26,6 +26,16 @@ export function writtenDay(
 }
 
 /**
+ * The month of a day, short, for the axis of a drawing.
+ * @example writtenMonth('2027-03-03')  // → 'Mar'
+ */
+export function writtenMonth(day: string, { locale = LOCALE }: Place = {}): string {
+  return new Intl.DateTimeFormat(locale, { month: 'short', timeZone: 'UTC' }).format(
+    new Date(`${day}T12:00:00Z`),
+  )
+}
+
+/**
  * An instant with the zone it is told in.
  * @example writtenInstant('2027-03-03T13:05:00Z', { zone: 'Europe/Berlin' })  // → '3 March 2027, 14:05 CET'
  */

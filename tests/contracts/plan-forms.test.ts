@@ -121,6 +121,10 @@ test.each<[string, Record<string, string>, string]>([
   ['a step after one that is not there', { 'steps.1.after': '7' }, 'steps.1.after'],
   ['likely before soonest', { 'steps.0.likely': '3' }, 'steps.0.likely'],
   ['a name left out in the second row', { 'oneOff.1.amount': '5' }, 'oneOff.1.name'],
+  ['a currency without a rate', { 'oneOff.0.currency': 'GBP' }, 'oneOff.0.currency'],
+  ['a yield above everything', { yieldPercent: '101' }, 'yieldPercent'],
+  ['a yield below nothing', { yieldPercent: '-1' }, 'yieldPercent'],
+  ['sold in multiples of nothing', { 'boards.0.multiple': '0' }, 'boards.0.multiple'],
   ['a rate of nothing', { 'rates.0.rate': '0' }, 'rates.0.rate'],
   ['minutes in scientific form', { onceMinutes: '1e3' }, 'onceMinutes'],
 ])('%s is refused at its field', (_, change, field) => {

@@ -98,6 +98,10 @@ export const SCREENS: Readonly<Record<string, { by: Looker; at: (found: Found) =
     by: 'owner',
     at: ({ fairlead }) => [`${ADMIN}/runs/${fairlead}/orders`],
   },
+  '/admin/[workshop]/runs/[run]/costs': {
+    by: 'owner',
+    at: ({ rowlock, fairlead }) => [`${ADMIN}/runs/${rowlock}/costs`, `${ADMIN}/runs/${fairlead}/costs`],
+  },
   '/admin/[workshop]/runs/[run]/open': {
     by: 'owner',
     at: ({ rowlock }) => [`${ADMIN}/runs/${rowlock}/open`],

@@ -17,6 +17,7 @@ import { listStoppedOrders } from '@/lib/queries/packing/list-stopped-orders'
 import { getModulePage } from '@/lib/queries/public/get-module-page'
 import { getSiteFront } from '@/lib/queries/public/get-site-front'
 import { getWorkshopFront } from '@/lib/queries/public/get-workshop-front'
+import { getCostDesk } from '@/lib/queries/runs/get-cost-desk'
 import { getRunPage } from '@/lib/queries/runs/get-run-page'
 import { listRunOrders } from '@/lib/queries/runs/list-run-orders'
 import { listRuns } from '@/lib/queries/runs/list-runs'
@@ -137,6 +138,10 @@ const LISTS: Readonly<
   'page of a run': {
     ask: () => getRunPage({ ...asked(), runId: world.run.id, balanceMinor: 0 }),
     rows: ({ orders }: { orders: Record<string, number> }) => orders['reserved'] ?? 0,
+  },
+  'costs of a run': {
+    ask: () => getCostDesk({ ...asked(), runId: world.run.id }),
+    rows: () => 5,
   },
   'modules of a workshop': { ask: () => listModules(asked()) },
   'parts list': { ask: () => getPartsDesk({ ...asked(), module: world.module.slug }) },

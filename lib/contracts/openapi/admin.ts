@@ -1,5 +1,6 @@
 import type { z } from 'zod'
 import type { Deed } from '@/lib/core/policy/deeds'
+import { CostTrial } from '../cost-desk'
 import * as forms from '../module-forms'
 import { PlanInput } from '../plan-forms'
 import { CallOffInput, LockInput, LowerMinimumInput, RunInput } from '../runs'
@@ -104,6 +105,10 @@ export const RUN_OPERATIONS: readonly Operation[] = [
   }),
   post(`${run}/ask-balances`, 'Announce the balances', 'run:ask_balances', undefined, { answer: '{bulk}' }),
   post(`${run}/lower-minimum`, 'Lower the minimum', 'run:lower_minimum', LowerMinimumInput),
+  post(`${run}/plan`, 'Save the cost plan of a run', 'cost:write', PlanInput),
+  post(`${run}/plan/try`, 'Figures of a plan, nothing saved', 'cost:read', CostTrial, {
+    answer: 'CostFigures',
+  }),
   post(`${run}/close`, 'Close a run whose orders are all at an end', 'run:close'),
   get('/bulk/{bulk}', 'How far a bulk job is', 'bulk:read', '{total, done, failed}'),
 ]

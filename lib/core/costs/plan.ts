@@ -41,6 +41,18 @@ export type CostPlan = {
   readonly payout: PlanPayout
   /** Sums spent or bound before the lock (parts bought at risk): already in the lines above, lost when the run is called off. */
   readonly atRisk: readonly PlanSum[]
+  /** What the maker expects around the run; none of it is a cost of the run. Left out while nobody has said. */
+  readonly outlook?: PlanOutlook
+}
+
+/** What is asked beside the costs of a run. */
+export type PlanOutlook = {
+  /** What the maker can lay out before money comes in, in the selling currency; null while not said. */
+  readonly canLayOut: number | null
+  /** Units expected to be wanted after the run, on top of its orders. */
+  readonly laterUnits: number
+  /** Share of posted units expected to need repair, for the spares to keep. */
+  readonly failureBasisPoints: number
 }
 
 /**

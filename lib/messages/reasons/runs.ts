@@ -39,5 +39,6 @@ export const runs: Record<string, string> = {
   order_short_of_end: 'Some orders are not posted yet. Close the run when the last one is.',
   problem_open: 'A buyer’s problem is still open. Answer and close it first.',
   refund_pending: 'A refund is still on its way. Close the run when it has arrived.',
+  run_ended: 'This run has ended; its plan is kept as it was.',
   conversions_missing: 'What became of the sign-ups could not be stored. Try again.',
 }

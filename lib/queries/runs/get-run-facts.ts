@@ -49,6 +49,7 @@ export async function getRunFacts(cmd: {
       maximum: run.maximum,
       decideByOn: run.decideByOn,
       lockedOn: run.lockedAt && dayIn(run.lockedAt, zone),
+      balanceWhen: run.balanceWhen,
       currency: run.currency,
     },
     revision: run.revision.letter,

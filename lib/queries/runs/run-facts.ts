@@ -71,6 +71,8 @@ export type RunFacts = {
     maximum: number
     decideByOn: Day
     lockedOn: Day | null
+    /** When balances fall due. */
+    balanceWhen: 'at_lock' | 'units_passed' | 'before_packing'
     currency: string
   }
   revision: string

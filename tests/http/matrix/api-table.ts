@@ -43,6 +43,8 @@ export const API_TABLE: Readonly<Record<string, Row>> = {
   'POST /api/admin/[workshop]/runs/[run]/close': '401 404 409 404 404 404 404',
   'POST /api/admin/[workshop]/runs/[run]/lock': '401 404 409 404 404 404 404',
   'POST /api/admin/[workshop]/runs/[run]/lower-minimum': '401 404 422 404 404 404 404',
+  'POST /api/admin/[workshop]/runs/[run]/plan': '401 404 422 404 404 404 404',
+  'POST /api/admin/[workshop]/runs/[run]/plan/try': '401 404 422 404 404 404 404',
   'POST /api/admin/[workshop]/runs/[run]/open': '401 404 409 404 404 404 404',
   'GET /api/auth/[...nextauth]': '405 405 405 405 405 405 405',
   'POST /api/auth/[...nextauth]': '404 404 404 404 404 404 404',

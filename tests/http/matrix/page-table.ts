@@ -54,6 +54,7 @@ export const PAGE_TABLE: Readonly<Record<string, Row>> = {
   'PAGE /admin/[workshop]/runs/[run]': '307 404 200 404 404 404 404',
   'PAGE /admin/[workshop]/runs/[run]/ask-balances': '307 404 200 404 404 404 404',
   'PAGE /admin/[workshop]/runs/[run]/call-off': '307 404 200 404 404 404 404',
+  'PAGE /admin/[workshop]/runs/[run]/costs': '307 404 200 404 404 404 404',
   'PAGE /admin/[workshop]/runs/[run]/lock': '307 404 200 404 404 404 404',
   'PAGE /admin/[workshop]/runs/[run]/open': '307 404 200 404 404 404 404',
   'PAGE /admin/[workshop]/runs/[run]/orders': '307 404 200 404 404 404 404',

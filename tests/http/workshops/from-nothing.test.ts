@@ -5,7 +5,7 @@ import { FirstUnitForm } from '@/app/(admin)/admin/[workshop]/modules/[module]/_
 import { OfferForm } from '@/app/(admin)/admin/[workshop]/modules/[module]/_parts/offer-form'
 import { offerForm } from '@/app/(admin)/admin/[workshop]/modules/[module]/_parts/offer-values'
 import { PartsForm } from '@/app/(admin)/admin/[workshop]/modules/[module]/_parts/parts-form'
-import { PlanForm } from '@/app/(admin)/admin/[workshop]/modules/[module]/_parts/plan-form'
+import { PlanForm } from '@/components/plan/plan-form'
 import { RevisionForm } from '@/app/(admin)/admin/[workshop]/modules/[module]/_parts/revision-form'
 import { DetailsForm } from '@/app/(admin)/admin/[workshop]/settings/_parts/details-form'
 import { ZoneForm } from '@/app/(admin)/admin/[workshop]/settings/postage/_parts/zone-form'
@@ -23,8 +23,10 @@ import { POST as postPostage } from '@/app/api/admin/[workshop]/settings/postage
 import { POST as postTerms } from '@/app/api/admin/[workshop]/settings/terms/route'
 import { POST as postWorkshop } from '@/app/api/workshops/route'
 import { keptForm } from '@/components/forms/kept-form'
+import type { PlanDesk } from '@/lib/contracts/module-desk'
 import { formValues } from '@/lib/contracts/form-values'
 import { settingsWords } from '@/lib/messages/settings'
+import { paths } from '@/lib/paths'
 import { getFormDraft } from '@/lib/queries/forms/get-form-draft'
 import { getModuleDesk } from '@/lib/queries/modules-admin/get-module-desk'
 import { getPartsDesk } from '@/lib/queries/modules-admin/get-parts-desk'
@@ -194,12 +196,17 @@ test('a revision with its parts list and first good unit', async () => {
   expect({ ...(await parts()), lines: [] }).toEqual({ ...before, lines: [] })
 })
 
+const planForm = ({ currency, offers, values }: PlanDesk) => ({
+  action: paths.api.adminModulePart(slug, 'kedge', 'plan'),
+  ...{ currency, offers, form: { values } },
+})
+
 test('the plan as it begins can be saved, and shows itself as it was saved', async () => {
   const plan = async () =>
     (await getPlanDesk({ actor: await actor(), workshopId, module: 'kedge', now: NOW }))!
   const begun = await plan()
   expect(begun).toMatchObject({ isSaved: false, offers: ['kit'], parts: 0 })
-  const first = typedForm(createElement(PlanForm, { ...own, plan: begun, form: { values: begun.values } }))
+  const first = typedForm(createElement(PlanForm, planForm(begun)))
   expect((await send(postPlan, mara, first, at)).to).toBe(`/admin/${slug}/modules/kedge/plan?saved=1`)
   const stored = await Plan.findOne({ where: { workshopId }, rejectOnEmpty: true })
   // Germany's standard rate (check-values.md) is what the beginning proposes.
@@ -210,7 +217,7 @@ test('the plan as it begins can be saved, and shows itself as it was saved', asy
   expect(shown).toMatchObject({ isSaved: true, missing: [], parts: 1 })
   // Two resistors at 1.25 c and ten minutes unpaid: twenty kits cost 50 c of parts.
   expect(shown.trial[0]).toEqual({ units: 20, costMinor: 50, unpriced: [] })
-  const again = typedForm(createElement(PlanForm, { ...own, plan: shown, form: { values: shown.values } }))
+  const again = typedForm(createElement(PlanForm, planForm(shown)))
   expect((await send(postPlan, mara, again, at)).to).toContain('saved=1')
   const after = await Plan.findOne({ where: { workshopId }, rejectOnEmpty: true })
   expect([after.plan, after.steps]).toEqual([stored.plan, stored.steps])

@@ -177,6 +177,7 @@ test('a plan in another currency, of a stranger or without offers is refused', a
     foreignShare: '0',
     refundShare: '0',
     disputeShare: '0',
+    failurePercent: '0',
     steps: [],
     offers: [],
   })

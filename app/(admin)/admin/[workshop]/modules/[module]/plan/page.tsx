@@ -1,6 +1,7 @@
 import type { Metadata } from 'next'
 import { notFound } from 'next/navigation'
 import { OutcomeNotice } from '@/app/(admin)/_parts/outcome-notice'
+import { PlanForm } from '@/components/plan/plan-form'
 import { keptForm } from '@/components/forms/kept-form'
 import { LinkButton } from '@/components/ui/button'
 import { Stack } from '@/components/ui/columns'
@@ -12,7 +13,6 @@ import { getFormDraft } from '@/lib/queries/forms/get-form-draft'
 import { getPlanDesk } from '@/lib/queries/modules-admin/get-plan-desk'
 import { loadModule, type ModulePageProps } from '../_parts/load-module'
 import { ModuleHead } from '../_parts/module-head'
-import { PlanForm } from '../_parts/plan-form'
 import { PlanTrial } from '../_parts/plan-trial'
 
 export const metadata: Metadata = { title: words.title }
@@ -35,7 +35,12 @@ export default async function PlanPage({ params, searchParams }: ModulePageProps
         <Stack>
           <OutcomeNotice form="module-deed" saved={saved} />
           <PlanTrial plan={plan} />
-          <PlanForm {...at} plan={plan} form={form} />
+          <PlanForm
+            action={paths.api.adminModulePart(at.slug, at.module, 'plan')}
+            currency={plan.currency}
+            offers={plan.offers}
+            form={form}
+          />
         </Stack>
       )}
     </>

@@ -2,7 +2,7 @@ import { Tabs } from '@/components/ui/tabs'
 import { runWords as words } from '@/lib/messages/runs'
 import { paths } from '@/lib/paths'
 
-type Props = { workshop: string; run: string; current: 'run' | 'orders' }
+type Props = { workshop: string; run: string; current: 'run' | 'costs' | 'orders' }
 
 /** The pages of a run, side by side. */
 export function RunTabs({ workshop, run, current }: Props) {
@@ -11,6 +11,11 @@ export function RunTabs({ workshop, run, current }: Props) {
       label={words.pages}
       tabs={[
         { href: paths.adminRun(workshop, run), label: words.decision, current: current === 'run' },
+        {
+          href: paths.adminRunPage(workshop, run, 'costs'),
+          label: words.costsTitle,
+          current: current === 'costs',
+        },
         {
           href: paths.adminRunPage(workshop, run, 'orders'),
           label: words.ordersTitle,

@@ -22,18 +22,26 @@ export function PlanWork({ offers, currency, form }: Props) {
         {offers.map((offer, at) => (
           <OfferWork key={offer} offer={offer} at={at} currency={currency} form={form} />
         ))}
-        <div className="flex flex-wrap gap-4">
+        <div className="flex flex-wrap items-end gap-4">
           <MoneyField
             name="labourPerHourMinor"
             label={words.labourPerHour}
+            hint={words.hints.labourPerHour}
             currency={currency}
             form={form}
             optional
           />
-          <NumberField name="onceMinutes" label={words.onceMinutes} unit={words.minutes} form={form} />
+          <NumberField
+            name="onceMinutes"
+            label={words.onceMinutes}
+            hint={words.hints.onceMinutes}
+            unit={words.minutes}
+            form={form}
+          />
           <NumberField
             name="yieldPercent"
             label={words.yieldPercent}
+            hint={words.hints.yieldPercent}
             unit={words.percent}
             decimal
             form={form}
@@ -41,6 +49,7 @@ export function PlanWork({ offers, currency, form }: Props) {
           <NumberField
             name="confidencePercent"
             label={words.confidencePercent}
+            hint={words.hints.confidencePercent}
             unit={words.percent}
             decimal
             form={form}
@@ -79,18 +88,26 @@ function OfferWork({ offer, at, currency, form }: Work) {
       <legend className="text-17 font-semibold">{offerWords[offer]}</legend>
       <input type="hidden" name={name('offer')} value={offer} />
       <CheckField name={name('isAssembled')} label={words.isAssembled} form={form} optional />
-      <div className="flex flex-wrap gap-4">
+      <div className="flex flex-wrap items-end gap-4">
         {(['minutesPerUnit', 'minutesPerStart'] as const).map((field) => (
           <NumberField
             key={field}
             name={name(field)}
             label={words[field]}
+            hint={words.hints[field]}
             unit={words.minutes}
             form={form}
             defaultValue={typedText(form, name(field)) ?? '0'}
           />
         ))}
-        <NumberField name={name('packaging')} label={words.packaging} unit={currency} decimal form={form} />
+        <NumberField
+          name={name('packaging')}
+          label={words.packaging}
+          hint={words.hints.packaging}
+          unit={currency}
+          decimal
+          form={form}
+        />
       </div>
     </fieldset>
   )

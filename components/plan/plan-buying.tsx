@@ -1,4 +1,6 @@
 import { RowsField, type RowColumn } from '@/components/forms/rows-field'
+import { Disclosure } from '@/components/ui/disclosure'
+import { Facts } from '@/components/ui/facts'
 import type { FormState } from '@/components/ui/form-state'
 import { Sheet } from '@/components/ui/sheet'
 import { NumberField, TextField } from '@/components/ui/text-field'
@@ -44,15 +46,28 @@ export function PlanBuying({ currency, form }: Props) {
           spare={1}
           most={8}
         />
+        <Disclosure summary={words.boardWords}>
+          <Facts facts={words.boardWordsList.map(([name, value]) => ({ name, value }))} />
+        </Disclosure>
         <fieldset className="flex min-w-0 flex-col gap-3">
           <legend className="text-17 font-semibold">{words.assembly}</legend>
           <p className="text-13 text-quiet">{words.assemblyHint}</p>
-          <div className="flex flex-wrap gap-4">
+          <div className="flex flex-wrap items-end gap-4">
             <TextField label={words.supplier} {...assembly('supplier')} />
             <TextField label={words.currency} width="short" {...assembly('currency')} />
-            <NumberField label={words.setup} decimal {...assembly('setup')} />
-            <NumberField label={words.perDistinctPart} decimal {...assembly('perDistinctPart')} />
-            <NumberField label={words.perStart} decimal {...assembly('perStart')} />
+            <NumberField label={words.setup} hint={words.hints.setup} decimal {...assembly('setup')} />
+            <NumberField
+              label={words.perDistinctPart}
+              hint={words.hints.perDistinctPart}
+              decimal
+              {...assembly('perDistinctPart')}
+            />
+            <NumberField
+              label={words.perStart}
+              hint={words.hints.perStart}
+              decimal
+              {...assembly('perStart')}
+            />
           </div>
         </fieldset>
         <RowsField

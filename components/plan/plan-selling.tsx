@@ -5,34 +5,43 @@ import { MoneyField, NumberField } from '@/components/ui/text-field'
 import { planAdminWords as words } from '@/lib/messages/plan-admin'
 
 const AMOUNTS = [
-  ['postageChargedMinor', words.postageCharged],
-  ['postagePaidMinor', words.postagePaid],
-  ['feeFixedMinor', words.feeFixed],
-  ['disputeFixedMinor', words.disputeFixed],
+  ['postageChargedMinor', 'postageCharged'],
+  ['postagePaidMinor', 'postagePaid'],
+  ['feeFixedMinor', 'feeFixed'],
+  ['disputeFixedMinor', 'disputeFixed'],
 ] as const
-const SHARES = [
-  ['fee', words.fee],
-  ['foreignFee', words.foreignFee],
-  ['foreignShare', words.foreignShare],
-  ['refundShare', words.refundShare],
-  ['disputeShare', words.disputeShare],
-] as const
+const SHARES = ['fee', 'foreignFee', 'foreignShare', 'refundShare', 'disputeShare'] as const
 
 /** What buyers pay beside the price, what the provider keeps, and the tax within. */
 export function PlanSelling({ currency, form }: { currency: string; form: FormState }) {
   return (
     <Sheet title={words.selling}>
       <div className="flex flex-col gap-5">
-        <div className="flex flex-wrap gap-4">
-          <NumberField name="unitsPerOrder" label={words.unitsPerOrder} decimal form={form} />
-          {AMOUNTS.map(([name, label]) => (
-            <MoneyField key={name} name={name} label={label} currency={currency} form={form} optional />
+        <div className="flex flex-wrap items-end gap-4">
+          <NumberField
+            name="unitsPerOrder"
+            label={words.unitsPerOrder}
+            hint={words.hints.unitsPerOrder}
+            decimal
+            form={form}
+          />
+          {AMOUNTS.map(([name, key]) => (
+            <MoneyField
+              key={name}
+              name={name}
+              label={words[key]}
+              hint={words.hints[key]}
+              currency={currency}
+              form={form}
+              optional
+            />
           ))}
-          {SHARES.map(([name, label]) => (
+          {SHARES.map((name) => (
             <NumberField
               key={name}
               name={name}
-              label={label}
+              label={words[name]}
+              hint={words.hints[name]}
               unit={words.percent}
               decimal
               form={form}
