@@ -51,6 +51,7 @@ export const paths = {
     run: string,
     page: 'demand' | 'costs' | 'orders' | 'buying' | 'bench' | 'packing' | 'money' | 'messages',
   ) => `/admin/${part(workshop)}/runs/${part(run)}/${page}`,
+  adminRunUnits: (workshop: string, run: string) => `/admin/${part(workshop)}/runs/${part(run)}/units`,
   adminRunDeed: (workshop: string, run: string, deed: 'open' | 'lock' | 'call-off' | 'ask-balances') =>
     `/admin/${part(workshop)}/runs/${part(run)}/${deed}`,
   adminBulk: (workshop: string, bulk: string) => `/admin/${part(workshop)}/bulk/${part(bulk)}`,
@@ -61,6 +62,7 @@ export const paths = {
   bench: (workshop: string) => `/bench/${part(workshop)}`,
   packing: (workshop: string) => `/packing/${part(workshop)}`,
   packingParcel: (workshop: string, parcel: string) => `/packing/${part(workshop)}/parcels/${part(parcel)}`,
+  packingBatch: (workshop: string, batch: string) => `/packing/${part(workshop)}/batches/${part(batch)}`,
   packingPapers: (workshop: string, paper: 'list' | 'slips') => `/packing/${part(workshop)}/papers/${paper}`,
   packingSlip: (workshop: string, parcel: string) =>
     `/packing/${part(workshop)}/parcels/${part(parcel)}/slip`,
@@ -127,8 +129,15 @@ export const paths = {
     ) => `/api/admin/${part(workshop)}/runs/${part(run)}/${deed}`,
     adminBulk: (workshop: string, bulk: string) => `/api/admin/${part(workshop)}/bulk/${part(bulk)}`,
     packingQueue: (workshop: string) => `/api/packing/${part(workshop)}/queue`,
-    packingParcel: (workshop: string, parcel: string, deed: 'pack' | 'hand-over' | 'reopen') =>
-      `/api/packing/${part(workshop)}/parcels/${part(parcel)}/${deed}`,
+    packingParcel: (
+      workshop: string,
+      parcel: string,
+      deed: 'pack' | 'hand-over' | 'reopen' | 'hold' | 'release',
+    ) => `/api/packing/${part(workshop)}/parcels/${part(parcel)}/${deed}`,
+    packingBatches: (workshop: string) => `/api/packing/${part(workshop)}/batches`,
+    packingBatchReturn: (workshop: string, batch: string) =>
+      `/api/packing/${part(workshop)}/batches/${part(batch)}/return`,
+    adminRunUnits: (workshop: string, run: string) => `/api/admin/${part(workshop)}/runs/${part(run)}/units`,
     packingFill: (workshop: string) => `/api/packing/${part(workshop)}/fill`,
     packingList: (workshop: string) => `/api/packing/${part(workshop)}/list.pdf`,
     packingSlips: (workshop: string) => `/api/packing/${part(workshop)}/slips.pdf`,

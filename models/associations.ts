@@ -114,6 +114,7 @@ const MANY: Pair[] = [
   [Run, 'parcels', Parcel, 'runId', 'run'],
   [PostageService, null, Parcel, 'serviceId', 'service'],
   [PackBatch, 'parcels', Parcel, 'batchId', 'batch'],
+  [Person, null, PackBatch, 'packerPersonId', 'packer'],
   [Unit, 'parcelLines', ParcelLine, 'unitId', 'unit'],
   [OrderLine, 'units', Unit, 'orderLineId', 'orderLine'],
   [Revision, 'units', Unit, 'revisionId', 'revision'],

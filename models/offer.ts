@@ -51,6 +51,8 @@ export class Offer extends Model<InferAttributes<Offer>, InferCreationAttributes
   declare customsCode: CreationOptional<string>
   /** Country of origin; null until known. */
   declare customsOrigin: string | null
+  /** Where finished ones stand on the shelf, as pick lists name it; empty if nowhere. */
+  declare storagePlace: CreationOptional<string>
   /** Cautions of this form (burns, lead, reversed power headers, no mains inside). */
   declare cautions: CreationOptional<string>
   /** Youngest age it is meant for, years. */
@@ -105,6 +107,7 @@ Offer.init(
     customsDescription: preset(text(), ''),
     customsCode: preset(text(), ''),
     customsOrigin: optional(text()),
+    storagePlace: preset(text(), ''),
     cautions: preset(text(), ''),
     ageFrom: preset(whole(), 14),
     position: preset(whole(), 0),

@@ -8,6 +8,7 @@ import {
 import { sequelize } from '@/lib/db/sequelize'
 import { key, moment, optional, ref, table, text } from './columns'
 import type { Parcel } from './parcel'
+import type { Person } from './person'
 
 /** Parcels one packer works through, so that two packers never pack the same order. */
 export class PackBatch extends Model<InferAttributes<PackBatch>, InferCreationAttributes<PackBatch>> {
@@ -15,8 +16,8 @@ export class PackBatch extends Model<InferAttributes<PackBatch>, InferCreationAt
   declare id: CreationOptional<string>
   /** The workshop that owns the row. */
   declare workshopId: string
-  /** The run. */
-  declare runId: string
+  /** The run; null where it goes across runs. */
+  declare runId: string | null
   /** Name on its papers. */
   declare name: string
   /** Who packs it. */
@@ -27,13 +28,14 @@ export class PackBatch extends Model<InferAttributes<PackBatch>, InferCreationAt
   declare closedAt: Date | null
 
   declare parcels?: NonAttribute<Parcel[]>
+  declare packer?: NonAttribute<Person>
 }
 
 PackBatch.init(
   {
     id: key(),
     workshopId: ref(),
-    runId: ref(),
+    runId: optional(ref()),
     name: text(),
     packerPersonId: ref(),
     createdAt: moment(),

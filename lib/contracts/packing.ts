@@ -28,6 +28,13 @@ const unlessEmpty = <T extends z.ZodType>(field: T) =>
 export const QueueQuery = z.object({
   offer: unlessEmpty(offerKind),
   country: unlessEmpty(countryCode),
+  /** An answer as given: `Front panel finish: sand`. */
+  choice: unlessEmpty(line(200)),
+  /** The service that was quoted. */
+  service: unlessEmpty(line(80)),
+  /** Orders of the same contents, as the list of them names them. */
+  group: unlessEmpty(z.string().regex(/^[0-9a-f]{32}$/, 'Choose the contents from the list.')),
+  batch: unlessEmpty(uuid),
   after: unlessEmpty(
     z.string().regex(/^\d{4}-\d\d-\d\d_\d{1,9}_[0-9a-f-]{36}$/, 'Start again from the first page.'),
   ),
@@ -70,9 +77,43 @@ export type PackSummary = {
   toPack: number
   packed: number
   countries: string[]
+  /** Answers given in the queue, and services quoted. */
+  choices: string[]
+  services: string[]
   /** Orders of each run under way, and how many of them are posted. */
   progress: { run: string; module: string; number: number; posted: number; total: number }[]
 }
+
+/** Orders of the same contents that wait in the queue. */
+export type PackGroup = { group: string; count: number; lines: PackLine[] }
+
+/** A batch on the queue's page: who packs it and how far it is. */
+export type BatchRow = {
+  batch: string
+  name: string
+  packer: string
+  isMine: boolean
+  total: number
+  packed: number
+  posted: number
+  closedAt: string | null
+}
+
+/** What a packer takes from the queue at once; the filter of the queue goes along. */
+export const TakeBatchInput = QueueQuery.pick({
+  offer: true,
+  country: true,
+  choice: true,
+  service: true,
+  group: true,
+}).extend({
+  most: wholeNumber(1, 200, 'Enter how many orders, from 1 to 200.'),
+  /** Who packs it; whoever takes it unless said. */
+  packer: unlessEmpty(uuid),
+})
+export type TakeBatchInput = z.infer<typeof TakeBatchInput>
+
+export const HoldInput = z.object({ reason: line(300, 'Say why it waits, for whoever packs next.') })
 
 export type StopReason = 'order_disputed' | 'destination_paused' | 'on_hold' | 'no_address' | 'not_yet'
 
@@ -122,6 +163,9 @@ export type ParcelPage = {
   trackingKind: 's10' | 'other' | null
   handedOverAt: string | null
   timeZone: string
+  /** Who else packs it, in an open batch of their own; null when anybody, or the reader, may. */
+  otherPacker: string | null
+  batch: { id: string; name: string } | null
 }
 
 /** Which papers are wanted; sizes as in the printer. */

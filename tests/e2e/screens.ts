@@ -120,6 +120,10 @@ export const SCREENS: Readonly<Record<string, { by: Looker; at: (found: Found) =
   },
   '/admin/[workshop]/bulk/[bulk]': { by: 'owner', at: ({ bulk }) => [`${ADMIN}/bulk/${bulk}`] },
 
+  '/admin/[workshop]/runs/[run]/units': {
+    by: 'owner',
+    at: ({ fairlead }) => [`${ADMIN}/runs/${fairlead}/units`],
+  },
   '/packing/[workshop]': {
     by: 'packer',
     at: () => [

@@ -9,6 +9,9 @@ import { getPartsDesk } from '@/lib/queries/modules-admin/get-parts-desk'
 import { listModules } from '@/lib/queries/modules-admin/list-modules'
 import { listOwnOrders } from '@/lib/queries/orders/list-own-orders'
 import { getFulfilmentOrders } from '@/lib/queries/packing/get-fulfilment-orders'
+import { listBatches } from '@/lib/queries/packing/list-batches'
+import { listPackGroups } from '@/lib/queries/packing/list-pack-groups'
+import { listRunUnits } from '@/lib/queries/units/list-run-units'
 import { getPackSummary } from '@/lib/queries/packing/get-pack-summary'
 import { getPackingSlips } from '@/lib/queries/packing/get-packing-slips'
 import { listPackQueue } from '@/lib/queries/packing/list-pack-queue'
@@ -22,11 +25,11 @@ import { getRunPage } from '@/lib/queries/runs/get-run-page'
 import { listRunOrders } from '@/lib/queries/runs/list-run-orders'
 import { listRuns } from '@/lib/queries/runs/list-runs'
 import { getDesk } from '@/lib/queries/workshops/get-desk'
-import { BulkItem, BulkJob, Part, type Person, RevisionLine } from '@/models'
+import { BulkItem, BulkJob, PackBatch, Part, type Person, RevisionLine } from '@/models'
 import { NOW, serial } from '@/tests/support/worlds/base'
 import { makeModule } from '@/tests/support/worlds/module'
 import { makeAddress, makeOrder } from '@/tests/support/worlds/order'
-import { makeParcel } from '@/tests/support/worlds/parcel'
+import { makeParcel, makeUnit } from '@/tests/support/worlds/parcel'
 import { actorOf, makePerson, makeUser } from '@/tests/support/worlds/person'
 import { makeRun } from '@/tests/support/worlds/run'
 import { makeSignUp } from '@/tests/support/worlds/sign-up'
@@ -85,6 +88,11 @@ async function addRow(): Promise<void> {
     ...{ workshopId, revisionId: revision.id, partId: part.id, position: serial(), perUnit: 1 },
     placedBy: { kit: 'buyer' },
   })
+  await PackBatch.create({
+    ...{ workshopId, runId: null, name: 'Batch', createdAt: NOW, closedAt: NOW },
+    packerPersonId: (world as unknown as { owner: Person }).owner.id,
+  })
+  await makeUnit(run)
   await module.reload()
 }
 
@@ -156,6 +164,9 @@ const LISTS: Readonly<
   },
   'workshops of the host': { ask: () => listWorkshops({ actor: people.host }) },
   'pack queue': { ask: () => listPackQueue(asked()) },
+  'contents in the queue': { ask: () => listPackGroups(asked()), rows: () => 5 },
+  batches: { ask: () => listBatches(asked()), most: 20 },
+  'units of a run': { ask: () => listRunUnits({ ...asked(), runId: world.run.id }) },
   'packed parcels': { ask: () => listPackedParcels({ ...asked(), show: 'packed' }) },
   'stopped orders': { ask: () => listStoppedOrders(asked()) },
   'summary of packing': {

@@ -10,6 +10,11 @@ export const post: Record<string, string> = {
   on_hold: 'This parcel is on hold. Its page says why; take the next one.',
   label_void:
     'The address has changed since the slip was printed. Throw the slip and its label away and print them again, then pack.',
+  in_other_batch:
+    'Somebody else is packing this order: it is in their batch. Take the next one, or ask the owner to give the batch back.',
+  nothing_to_pack:
+    'Nothing in the queue is like this and free to take. Show everything again, or look who has it.',
+  batch_done: 'This batch is done already.',
   already_packed: 'This parcel is packed already. Open its page to hand it over, or to unpack it.',
   already_handed_over: 'This parcel has been handed over and cannot be changed any more.',
   parcel_discarded: 'This parcel was taken apart. Look in the queue for the order’s new one.',

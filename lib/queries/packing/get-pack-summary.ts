@@ -13,9 +13,17 @@ export async function getPackSummary(cmd: { actor: Actor; workshopId: string }):
   const { actor, workshopId } = cmd
   if (!can(actor, 'packing:read', { workshopId })) return null
   const bind = { workshopId }
-  const [counts] = await sequelize.query<Pick<PackSummary, 'toPack' | 'packed' | 'countries'>>(
+  const [counts] = await sequelize.query<
+    Pick<PackSummary, 'toPack' | 'packed' | 'countries' | 'choices' | 'services'>
+  >(
     `select count(distinct p.id)::int as "toPack",
             coalesce(array_agg(distinct a.country order by a.country), '{}') as countries,
+            coalesce(array_agg(distinct o.postage_quote ->> 'serviceName')
+                     filter (where o.postage_quote is not null), '{}') as services,
+            coalesce((select array_agg(distinct concat(c ->> 'question', ': ', c ->> 'label'))
+                      from parcels p2 join parcel_lines pl2 on pl2.parcel_id = p2.id
+                      join order_lines ol2 on ol2.id = pl2.order_line_id, jsonb_array_elements(ol2.choices) c
+                      where p2.workshop_id = $workshopId and p2.state = 'open'), '{}') as choices,
             (select count(*)::int from parcels where workshop_id = $workshopId and state = 'packed') as packed
      from ${QUEUE_FROM}`,
     { bind, type: QueryTypes.SELECT },

@@ -7,7 +7,17 @@ import { mayGoOut } from '@/lib/core/states/parcel-guards'
 import { contentsOf, findParcels } from '@/lib/queries/packing/find-parcels'
 import { writtenChoice } from '@/lib/queries/packing/list-pack-queue'
 import { listSiblingParcels } from '@/lib/queries/packing/list-sibling-parcels'
-import { Destination, type Order, type Parcel, PostageService, PostageZone, Unit, Workshop } from '@/models'
+import {
+  Destination,
+  type Order,
+  PackBatch,
+  type Parcel,
+  Person,
+  PostageService,
+  PostageZone,
+  Unit,
+  Workshop,
+} from '@/models'
 
 /**
  * One parcel for its packer: the address, the lines, what the scale should say, the services to its country. Null when
@@ -31,6 +41,14 @@ export async function getParcelPage(cmd: {
     attributes: ['offerKind'],
     group: ['offerKind'],
   })
+  const batch =
+    parcel.batchId === null
+      ? null
+      : await PackBatch.findOne({
+          where: { id: parcel.batchId, closedAt: null },
+          include: [{ model: Person, as: 'packer', attributes: ['name'] }],
+        })
+  const isMine = actor.kind === 'person' && batch?.packerPersonId === actor.personId
   const to = formatAddress(parcel.address.facts(), { script: 'latin', from: workshop.country })
   const own = formatAddress(parcel.address.facts(), { script: 'own', from: workshop.country })
   return {
@@ -40,7 +58,9 @@ export async function getParcelPage(cmd: {
     order: order.id,
     orderNumber: String(order.number),
     ...((await listSiblingParcels([parcel.id])).get(parcel.id) ?? { nth: 1, of: 1 }),
-    stop: await stopOf(parcel, order, contents),
+    stop: await stopOf(parcel, order, contents, batch !== null && !isMine),
+    otherPacker: batch !== null && !isMine ? (batch.packer?.name ?? '') : null,
+    batch: batch && { id: batch.id, name: batch.name },
     onHoldReason: parcel.onHoldReason,
     country: parcel.address.country,
     to,
@@ -73,7 +93,12 @@ export async function getParcelPage(cmd: {
 type Contents = ReturnType<typeof contentsOf>
 
 /** Only what still can go out may be stopped. */
-async function stopOf(parcel: Parcel, order: Order, contents: Contents): Promise<string | null> {
+async function stopOf(
+  parcel: Parcel,
+  order: Order,
+  contents: Contents,
+  inOtherBatch: boolean,
+): Promise<string | null> {
   if (parcel.handedOverAt !== null) return null
   if (parcel.state === 'discarded') return 'parcel_discarded'
   const offerId = contents.map(({ line }) => line.runOffer!.offerId)
@@ -84,6 +109,8 @@ async function stopOf(parcel: Parcel, order: Order, contents: Contents): Promise
     destinationPaused: paused > 0,
     onHold: parcel.onHoldReason !== null,
     labelVoid: parcel.labelVoidAt !== null,
+    inOtherBatch,
+    isReplacement: parcel.problemId !== null,
   })
   return may.ok ? null : may.reason
 }

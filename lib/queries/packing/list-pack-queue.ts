@@ -3,7 +3,15 @@ import { QueryTypes } from 'sequelize'
 import type { PackLine, QueueItem, QueueQuery } from '@/lib/contracts/packing'
 import { can, type Actor } from '@/lib/core/policy/can'
 import { sequelize } from '@/lib/db/sequelize'
-import { ADDRESSEE, PROMISE, QUEUE_FROM } from '@/lib/queries/packing/in-queue'
+import {
+  ADDRESSEE,
+  LINES,
+  PROMISE,
+  QUEUE_FROM,
+  QUEUE_HAVING,
+  QUEUE_WHERE,
+  queueBind,
+} from '@/lib/queries/packing/in-queue'
 import type { ChosenAnswer } from '@/models/json'
 
 const PER_PAGE = 50
@@ -18,7 +26,8 @@ type Row = Omit<QueueItem, 'number' | 'lines'> & {
 export type QueuedParcel = QueueItem & { run: string }
 
 /**
- * What can be packed now, oldest promise first: paid, not disputed, not on hold, its destination not paused. `next` goes on
+ * What can be packed now, oldest promise first: paid, not disputed, not on hold, its destination not paused, and not in
+ * another packer's batch unless that batch is asked for. `next` goes on
  * after the last item; null on the last page. Nobody but who may read the queue gets anything. One statement.
  */
 export async function listPackQueue(cmd: {
@@ -33,18 +42,18 @@ export async function listPackQueue(cmd: {
   const [day, number, parcel] = query.after?.split('_') ?? []
   const rows = await sequelize.query<Row>(
     `select p.id as parcel, o.id as "order", o.number, a.country, ${ADDRESSEE} as name, r.id as run, ${PROMISE}::text as "postedBy",
-            json_agg(json_build_object('line', ol.id, 'module', m.name, 'offer', ol.offer_kind,
-                                       'quantity', pl.quantity, 'choices', ol.choices) order by ol.position) as lines
-     from ${QUEUE_FROM} and ($country::text is null or a.country = $country)
+            ${LINES} as lines
+     from ${QUEUE_FROM} and ${QUEUE_WHERE}
+       and ($batch::uuid is not null or b.id is null or b.packer_person_id = $mine)
      group by p.id, o.id, a.id, r.id
-     having ($offer::text is null or bool_or(ol.offer_kind = $offer))
+     having ${QUEUE_HAVING}
        and ($day::date is null or (${PROMISE}, o.number, p.id) > ($day::date, $number::int, $parcel::uuid))
      order by ${PROMISE}, o.number, p.id limit $limit`,
     {
       bind: {
         workshopId,
-        country: query.country ?? null,
-        offer: query.offer ?? null,
+        ...queueBind(query),
+        mine: actor.kind === 'person' ? actor.personId : null,
         day: day ?? null,
         number: number ?? null,
         parcel: parcel ?? null,
@@ -63,9 +72,18 @@ function asItem({ number, lines, ...row }: Row): QueuedParcel {
   return {
     ...row,
     number: String(number),
-    lines: lines.map(({ choices, ...line }) => ({ ...line, choices: choices.map(writtenChoice) })),
+    lines: lines.map(writtenLine),
   }
 }
+
+/** A line as the database gives it, its answers in words. */
+export const writtenLine = ({
+  choices,
+  ...line
+}: Omit<PackLine, 'choices'> & { choices: ChosenAnswer[] }): PackLine => ({
+  ...line,
+  choices: choices.map(writtenChoice),
+})
 
 /** An answer as papers and screens name it. */
 export const writtenChoice = ({ question, label }: ChosenAnswer) => `${question}: ${label}`

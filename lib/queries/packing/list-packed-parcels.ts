@@ -16,8 +16,10 @@ export async function listPackedParcels(cmd: {
   workshopId: string
   show: 'packed' | 'handed_over'
   after?: number
+  /** Only those of this batch. */
+  batch?: string
 }): Promise<{ items: PackedParcel[]; next: number | null }> {
-  const { actor, workshopId, show, after } = cmd
+  const { actor, workshopId, show, after, batch } = cmd
   if (!can(actor, 'packing:read', { workshopId })) return { items: [], next: null }
   const isPacked = show === 'packed'
   const rows = await sequelize.query<
@@ -28,9 +30,13 @@ export async function listPackedParcels(cmd: {
      from parcels p join addresses a on a.id = p.address_id join parcel_lines pl on pl.parcel_id = p.id
      join order_lines ol on ol.id = pl.order_line_id join orders o on o.id = ol.order_id
      where p.workshop_id = $workshopId and ${isPacked ? "p.state = 'packed'" : 'p.handed_over_at is not null'}
+       and ($batch::uuid is null or p.batch_id = $batch)
        and ($after::int is null or p.number ${isPacked ? '>' : '<'} $after)
      group by p.id, a.id order by p.number ${isPacked ? 'asc' : 'desc'} limit $limit`,
-    { bind: { workshopId, after: after ?? null, limit: PER_PAGE + 1 }, type: QueryTypes.SELECT },
+    {
+      bind: { workshopId, batch: batch ?? null, after: after ?? null, limit: PER_PAGE + 1 },
+      type: QueryTypes.SELECT,
+    },
   )
   const items = rows
     .slice(0, PER_PAGE)

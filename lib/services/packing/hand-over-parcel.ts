@@ -18,6 +18,7 @@ import { moveUnit } from '@/lib/services/_steps/move-unit'
 import { parcelMayGoOut } from '@/lib/services/_steps/parcel-may-go-out'
 import { Parcel, Workshop } from '@/models'
 import { chooseService } from '@/lib/services/_steps/choose-service'
+import { closeBatchIfDone } from '@/lib/services/_steps/close-batch-if-done'
 import { mailHandOver } from '@/lib/services/_steps/mail-hand-over'
 import { unitsLeft } from '@/lib/services/_steps/units-left'
 
@@ -33,7 +34,7 @@ type Command = {
  * Hands a packed parcel to the post: the buyer's mail goes out, and with the order's last parcel the order is posted and
  * its money becomes sales.
  * Refuses: not_found · forbidden · not_packed · already_handed_over · parcel_discarded · order_cancelled · order_not_paid ·
- * order_disputed · destination_paused · on_hold · label_void · invalid, at `service` (it takes no such parcel, or does not go there)
+ * order_disputed · destination_paused · on_hold · label_void · in_other_batch · invalid, at `service` (it takes no such parcel, or does not go there)
  * or `tracking` (mistyped, or on another parcel).
  * Locks: run, order, parcel. Writes: parcel, units, order, ledger, mail, audit; the module's page is made anew. Repeat:
  * refused as already_handed_over.
@@ -55,7 +56,7 @@ async function handOver(tx: Transaction, { actor, workshopId, parcelId, input, n
   if (!locked) return refuse('not_found')
   const { order, parcel } = locked
   if (parcel.handedOverAt !== null) return refuse('already_handed_over')
-  const may = await parcelMayGoOut(tx, locked)
+  const may = await parcelMayGoOut(tx, locked, actor.personId)
   if (!may.ok) return may
   if (parcel.state !== 'packed') return refuse(parcel.state === 'open' ? 'not_packed' : 'parcel_discarded')
 
@@ -85,8 +86,9 @@ async function handOver(tx: Transaction, { actor, workshopId, parcelId, input, n
   })
   if (!gone.ok) return gone
   await postUnits(tx, locked, by)
-  const more = (await unitsLeft(tx, order.id, 'handed_over')) > 0
-  if (!more) {
+  await closeBatchIfDone(tx, parcel.batchId, now)
+  const more = parcel.problemId === null && (await unitsLeft(tx, order.id, 'handed_over')) > 0
+  if (!more && parcel.problemId === null) {
     const posted = await moveOrder(tx, order, 'hand_over', by)
     if (!posted.ok) return posted
     await countRevenue(tx, order, now)

@@ -20,7 +20,7 @@ import { unitsLeft } from '@/lib/services/_steps/units-left'
 /**
  * Packs a parcel: its own lines, each once and whole, weighed. The order is packed when all of it is in packed parcels.
  * Refuses: not_found · forbidden · already_packed · already_handed_over · parcel_discarded · order_cancelled ·
- * order_not_paid · order_disputed · destination_paused · on_hold · label_void · invalid, with a sentence per field ·
+ * order_not_paid · order_disputed · destination_paused · on_hold · label_void · in_other_batch · invalid, with a sentence per field ·
  * weight_surprise, when the scale differs by more than the tolerance and nobody confirmed it.
  * Locks: run, order, parcel, the run's units where serial numbers are given. Writes: parcel, its lines, units, order,
  * audit. Repeat: refused as already_packed.
@@ -39,7 +39,7 @@ export function packParcel(cmd: {
     if (!locked) return refuse('not_found')
     const { order, parcel, lines } = locked
     if (parcel.handedOverAt !== null) return refuse('already_handed_over')
-    const may = await parcelMayGoOut(tx, locked)
+    const may = await parcelMayGoOut(tx, locked, actor.personId)
     if (!may.ok) return may
     if (parcel.state !== 'open')
       return refuse(parcel.state === 'packed' ? 'already_packed' : 'parcel_discarded')
@@ -70,7 +70,10 @@ export function packParcel(cmd: {
     })
     if (!packed.ok) return packed
     const unitsUnpacked = await unitsLeft(tx, order.id, 'packed')
-    if (mayPack({ disputed: false, destinationPaused: false, unitsUnpacked }).ok) {
+    if (
+      parcel.problemId === null &&
+      mayPack({ disputed: false, destinationPaused: false, unitsUnpacked }).ok
+    ) {
       const whole = await moveOrder(tx, order, 'pack', by)
       if (!whole.ok) return whole
     }

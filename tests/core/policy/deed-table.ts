@@ -183,6 +183,8 @@ batch:assign            ....KO.
 paper:print             ....KO.
 parcel:read             ....KO.
 parcel:open             ....KO.
+parcel:hold             ....KO.
+parcel:split            ....KO.
 parcel:pack             ....KO.
 parcel:reopen           ....KO.
 parcel:discard          ....KO.

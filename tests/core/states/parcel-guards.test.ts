@@ -38,3 +38,15 @@ test('a dispute, a paused destination, a hold and a void label stop it, the grav
   expect(mayGoOut({ ...fine, destinationPaused: true, disputed: true })).toEqual(refuse('order_disputed'))
   expect(mayGoOut({ ...fine, disputed: true, order: 'cancelled' })).toEqual(refuse('order_cancelled'))
 })
+
+test('what another packer has taken stops last of all', () => {
+  expect(mayGoOut({ ...fine, inOtherBatch: true })).toEqual(refuse('in_other_batch'))
+  expect(mayGoOut({ ...fine, inOtherBatch: true, labelVoid: true })).toEqual(refuse('label_void'))
+})
+
+test('a replacement goes out for a posted order only', () => {
+  const replaced = { ...fine, isReplacement: true }
+  expect(mayGoOut({ ...replaced, order: 'posted' })).toEqual(ok(true))
+  expect(mayGoOut({ ...replaced, order: 'paid' })).toEqual(refuse('order_not_paid'))
+  expect(mayGoOut({ ...replaced, order: 'withdrawn' })).toEqual(refuse('order_cancelled'))
+})

@@ -45,6 +45,8 @@ export const API_TABLE: Readonly<Record<string, Row>> = {
   'POST /api/admin/[workshop]/runs/[run]/lower-minimum': '401 404 422 404 404 404 404',
   'POST /api/admin/[workshop]/runs/[run]/plan': '401 404 422 404 404 404 404',
   'POST /api/admin/[workshop]/runs/[run]/plan/try': '401 404 422 404 404 404 404',
+  'GET /api/admin/[workshop]/runs/[run]/units': '401 404 200 200 404 404 404',
+  'POST /api/admin/[workshop]/runs/[run]/units': '401 404 422 422 404 404 404',
   'POST /api/admin/[workshop]/runs/[run]/open': '401 404 409 404 404 404 404',
   'GET /api/auth/[...nextauth]': '405 405 405 405 405 405 405',
   'POST /api/auth/[...nextauth]': '404 404 404 404 404 404 404',
@@ -69,6 +71,11 @@ export const API_TABLE: Readonly<Record<string, Row>> = {
   'GET /api/packing/[workshop]/queue': '401 404 200 404 200 404 404',
   // Nothing is in the queue: there is nothing to print.
   'GET /api/packing/[workshop]/slips.pdf': '401 404 404 404 404 404 404',
+  'POST /api/packing/[workshop]/batches': '401 404 422 404 422 404 404',
+  // No batch was taken.
+  'POST /api/packing/[workshop]/batches/[batch]/return': '401 404 404 404 404 404 404',
+  'POST /api/packing/[workshop]/parcels/[parcel]/hold': '401 404 422 404 422 404 404',
+  'POST /api/packing/[workshop]/parcels/[parcel]/release': '401 404 200 404 200 404 404',
   'POST /api/packing/[workshop]/fill': '401 404 200 404 200 404 404',
   'POST /api/packing/[workshop]/parcels/[parcel]/hand-over': '401 404 422 404 422 404 404',
   'POST /api/packing/[workshop]/parcels/[parcel]/pack': '401 404 422 404 422 404 404',

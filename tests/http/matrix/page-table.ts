@@ -61,7 +61,10 @@ export const PAGE_TABLE: Readonly<Record<string, Row>> = {
   'PAGE /host': '307 404 404 404 404 200 404',
   // A link nobody was sent: said so, to whoever is signed in.
   'PAGE /join/[token]': '307 200 200 200 200 200 200',
+  'PAGE /admin/[workshop]/runs/[run]/units': '307 404 200 404 404 404 404',
   'PAGE /packing/[workshop]': '307 404 200 404 200 404 404',
+  // No batch was taken.
+  'PAGE /packing/[workshop]/batches/[batch]': '307 404 404 404 404 404 404',
   'PAGE /packing/[workshop]/papers/list': '307 404 200 404 200 404 404',
   'PAGE /packing/[workshop]/papers/slips': '307 404 200 404 200 404 404',
   'PAGE /packing/[workshop]/parcels/[parcel]': '307 404 200 404 200 404 404',

@@ -1,3 +1,4 @@
+import { randomUUID } from 'node:crypto'
 import { hashToken, makeToken } from '@/lib/config/secrets'
 import { BulkJob, Membership, Session, User, type Person } from '@/models'
 import { pier } from '@/tests/support/worlds/pier'
@@ -38,6 +39,7 @@ export async function matrixWorld() {
     run: world.run.id,
     order: world.order.id,
     parcel: parcel.id,
+    batch: randomUUID(),
     bulk: bulk.id,
     revision: world.revision.letter,
     move: 'open',

@@ -1,5 +1,6 @@
 import type { Metadata } from 'next'
-import { redirect } from 'next/navigation'
+import { notFound, redirect } from 'next/navigation'
+import { OutcomeNotice } from '@/app/(admin)/_parts/outcome-notice'
 import { PageHead } from '@/components/ui/page-head'
 import { Stack } from '@/components/ui/columns'
 import { Tabs } from '@/components/ui/tabs'
@@ -16,30 +17,32 @@ import { ScanForm } from './_parts/scan-form'
 
 export const metadata: Metadata = { title: words.title }
 
-type Search = { show?: string; number?: string; offer?: string; country?: string; after?: string }
+type Search = Record<string, string | undefined>
 type Props = { params: Promise<{ workshop: string }>; searchParams: Promise<Search> }
 
 export default async function PackingPage({ params, searchParams }: Props) {
   const { workshop: slug } = await params
-  const { show, number, ...search } = await searchParams
+  const { show, number, draft, ...search } = await searchParams
   const { actor, workshop } = await packingDesk(slug)
   const asked = { actor, workshopId: workshop.id }
   const scanned = number ? await getParcelOfOrder({ ...asked, number }) : null
   if (scanned) redirect(paths.packingParcel(slug, scanned))
   const tab = show === 'packed' || show === 'handed_over' ? show : 'queue'
   const summary = await getPackSummary(asked)
+  if (!summary) notFound()
   const tabs = (['queue', 'packed', 'handed_over'] as const).map((name) => ({
     href: name === 'queue' ? paths.packing(slug) : `${paths.packing(slug)}?show=${name}`,
     label: words.tab[name],
     current: name === tab,
-    count: { queue: summary?.toPack, packed: summary?.packed, handed_over: undefined }[name],
+    count: { queue: summary.toPack, packed: summary.packed, handed_over: undefined }[name],
   }))
   return (
     <>
-      <PageHead title={words.title} lead={words.queueLead(summary?.toPack ?? 0)} />
+      <PageHead title={words.title} lead={words.queueLead(summary.toPack)} />
       <Stack>
+        <OutcomeNotice form="batch" draft={draft} saved={undefined} />
         <ScanForm slug={slug} unknown={number} />
-        <ProgressSheet progress={summary?.progress ?? []} />
+        <ProgressSheet progress={summary.progress} />
         <div>
           <Tabs label={words.tabs} tabs={tabs} />
           {tab === 'queue' ? (
@@ -47,7 +50,7 @@ export default async function PackingPage({ params, searchParams }: Props) {
               {...asked}
               slug={slug}
               query={QueueQuery.safeParse(search).data ?? {}}
-              countries={summary?.countries ?? []}
+              summary={summary}
             />
           ) : (
             <PackedSheet {...asked} slug={slug} show={tab} after={search.after} zone={workshop.timeZone} />

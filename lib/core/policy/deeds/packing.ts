@@ -8,6 +8,8 @@ export const PACKING_DEEDS = {
   'paper:print': { for: ['owner', 'packer'] },
   'parcel:read': { for: ['owner', 'packer'] },
   'parcel:open': { for: ['owner', 'packer'] },
+  'parcel:hold': { for: ['owner', 'packer'] },
+  'parcel:split': { for: ['owner', 'packer'] },
   'parcel:pack': { for: ['owner', 'packer'] },
   'parcel:reopen': { for: ['owner', 'packer'] },
   'parcel:discard': { for: ['owner', 'packer'] },

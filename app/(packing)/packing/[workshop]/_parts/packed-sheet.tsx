@@ -15,13 +15,15 @@ type Props = {
   slug: string
   show: 'packed' | 'handed_over'
   after?: string
+  /** Only those of this batch. */
+  batch?: string
   zone: string
 }
 
 /** Parcels that wait to be handed over, or that were. */
-export async function PackedSheet({ actor, workshopId, slug, show, after, zone }: Props) {
+export async function PackedSheet({ actor, workshopId, slug, show, after, batch, zone }: Props) {
   const from = /^\d{1,9}$/.test(after ?? '') ? Number(after) : undefined
-  const { items, next } = await listPackedParcels({ actor, workshopId, show, after: from })
+  const { items, next } = await listPackedParcels({ actor, workshopId, show, after: from, batch })
   const here = (mark: string | null) => withParams(paths.packing(slug), { show }, { after: mark })
   const isPacked = show === 'packed'
   return (

@@ -1,41 +1,45 @@
 import { Button, LinkButton } from '@/components/ui/button'
 import { SelectField } from '@/components/ui/select-field'
 import { offerKind } from '@/lib/contracts/fields'
-import type { QueueQuery } from '@/lib/contracts/packing'
+import type { PackSummary, QueueQuery } from '@/lib/contracts/packing'
 import { countryName } from '@/lib/core/data/country'
 import { packingWords as words } from '@/lib/messages/packing'
 import { papers } from '@/lib/messages/papers'
 import { paths } from '@/lib/paths'
 
 const offers = offerKind.options.map((value) => ({ value, label: papers.offers[value] }))
+const asThemselves = (values: readonly string[]) => values.map((value) => ({ value, label: value }))
 
-/** Narrows the queue by what is packed and where it goes; the choice stands in the address of the page. */
-export function QueueFilter(props: { slug: string; query: QueueQuery; countries: readonly string[] }) {
-  const { slug, query, countries } = props
-  const places = countries.map((value) => ({ value, label: countryName(value) }))
-  const form = { values: query }
+type Props = { slug: string; query: QueueQuery; summary: PackSummary }
+
+/** Narrows the queue by what is packed, where it goes and how; the choice stands in the address of the page. */
+export function QueueFilter({ slug, query, summary }: Props) {
+  const fields = [
+    { name: 'offer', options: offers },
+    { name: 'choice', options: asThemselves(summary.choices) },
+    {
+      name: 'country',
+      options: summary.countries.map((value) => ({ value, label: countryName(value) })),
+    },
+    { name: 'service', options: asThemselves(summary.services) },
+  ] as const
+  const isNarrowed = Boolean(query.group) || fields.some(({ name }) => query[name])
   return (
     <form action={paths.packing(slug)} className="flex flex-wrap items-end gap-3">
-      <SelectField
-        name="offer"
-        label={words.filter.offer}
-        options={offers}
-        empty={words.filter.all}
-        form={form}
-        width="short"
-        required={false}
-      />
-      <SelectField
-        name="country"
-        label={words.filter.country}
-        options={places}
-        empty={words.filter.all}
-        form={form}
-        width="short"
-        required={false}
-      />
+      {fields.map(({ name, options }) => (
+        <SelectField
+          key={name}
+          name={name}
+          label={words.filter[name]}
+          options={options}
+          empty={words.filter.all}
+          form={{ values: query }}
+          width="short"
+          required={false}
+        />
+      ))}
       <Button kind="secondary">{words.filter.apply}</Button>
-      {query.offer || query.country ? (
+      {isNarrowed ? (
         <LinkButton kind="plain" href={paths.packing(slug)}>
           {words.filter.clear}
         </LinkButton>

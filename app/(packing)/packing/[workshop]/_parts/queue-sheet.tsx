@@ -1,47 +1,54 @@
-import { Contents } from '@/components/parcel/contents'
-import { DayText } from '@/components/format/day-text'
 import { Stack } from '@/components/ui/columns'
-import { Table } from '@/components/ui/table'
+import { Notice } from '@/components/ui/notice'
 import { withParams } from '@/components/ui/with-params'
-import type { QueueQuery } from '@/lib/contracts/packing'
-import { countryName } from '@/lib/core/data/country'
+import type { PackSummary, QueueQuery } from '@/lib/contracts/packing'
 import type { Actor } from '@/lib/core/policy/can'
 import { packingWords as words } from '@/lib/messages/packing'
 import { paths } from '@/lib/paths'
+import { listBatches } from '@/lib/queries/packing/list-batches'
+import { listPackGroups } from '@/lib/queries/packing/list-pack-groups'
 import { listPackQueue } from '@/lib/queries/packing/list-pack-queue'
+import { listPackers } from '@/lib/queries/packing/list-packers'
 import { listStoppedOrders } from '@/lib/queries/packing/list-stopped-orders'
+import { BatchesTable } from './batches-table'
+import { GroupsTable } from './groups-table'
 import { QueueFilter } from './queue-filter'
+import { QueueTable } from './queue-table'
 import { StoppedSheet } from './stopped-sheet'
+import { TakeForm } from './take-form'
 
-type Props = { actor: Actor; workshopId: string; slug: string; query: QueueQuery; countries: string[] }
+type Props = { actor: Actor; workshopId: string; slug: string; query: QueueQuery; summary: PackSummary }
 
-/** What can be packed now, and what cannot with the reason. */
-export async function QueueSheet({ actor, workshopId, slug, query, countries }: Props) {
-  const { items, next } = await listPackQueue({ actor, workshopId, query })
-  const stopped = await listStoppedOrders({ actor, workshopId })
-  const isFiltered = Boolean(query.offer ?? query.country)
+/** What can be packed now, what is taken already, and what cannot be packed with the reason. */
+export async function QueueSheet({ actor, workshopId, slug, query, summary }: Props) {
+  const asked = { actor, workshopId }
+  const { items, next } = await listPackQueue({ ...asked, query })
+  const groups = await listPackGroups({ ...asked, query })
+  const batches = await listBatches(asked)
+  const stopped = await listStoppedOrders(asked)
   const here = (changes: Record<string, string | null>) => withParams(paths.packing(slug), query, changes)
+  const isAllPosted = summary.toPack === 0 && summary.packed === 0 && stopped.length === 0
+  if (isAllPosted && summary.progress.length > 0)
+    return (
+      <Stack>
+        <Notice kind="done" title={words.allPosted}>
+          {words.allPostedWords}
+        </Notice>
+        <BatchesTable slug={slug} batches={batches} />
+      </Stack>
+    )
   return (
     <Stack>
-      <Table
-        caption={words.table.queue}
-        rows={items}
-        rowKey={(row) => row.parcel}
-        filter={<QueueFilter slug={slug} query={query} countries={countries} />}
-        empty={isFiltered ? words.empty.filtered : words.empty.queue}
+      <TakeForm slug={slug} query={query} packers={await listPackers(asked)} actor={actor} />
+      <BatchesTable slug={slug} batches={batches} />
+      <GroupsTable slug={slug} query={query} groups={groups} />
+      <QueueTable
+        slug={slug}
+        items={items}
+        filter={<QueueFilter slug={slug} query={query} summary={summary} />}
+        empty={Object.values(query).some(Boolean) ? words.empty.filtered : words.empty.queue}
         firstHref={query.after ? here({ after: null }) : undefined}
         nextHref={next ? here({ after: next }) : undefined}
-        columns={[
-          {
-            key: 'order',
-            heading: words.order,
-            cell: (row) => <a href={paths.packingParcel(slug, row.parcel)}>{row.number}</a>,
-          },
-          { key: 'to', heading: words.to, cell: (row) => `${row.name}, ${countryName(row.country)}` },
-          { key: 'contents', heading: words.contents, cell: (row) => <Contents lines={row.lines} /> },
-          { key: 'postedBy', heading: words.postedBy, cell: (row) => <DayText day={row.postedBy} /> },
-        ]}
-        actions={(row) => <a href={paths.packingParcel(slug, row.parcel)}>{words.pack}</a>}
       />
       <StoppedSheet slug={slug} orders={stopped} />
     </Stack>

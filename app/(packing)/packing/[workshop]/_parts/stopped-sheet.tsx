@@ -3,6 +3,7 @@ import { DeedForm } from '@/components/ui/form'
 import { Sheet } from '@/components/ui/sheet'
 import { StateMark } from '@/components/ui/state-mark'
 import { Table } from '@/components/ui/table'
+import { withParams } from '@/components/ui/with-params'
 import type { StoppedOrder } from '@/lib/contracts/packing'
 import { countryName } from '@/lib/core/data/country'
 import { packingWords as words } from '@/lib/messages/packing'
@@ -20,7 +21,13 @@ export function StoppedSheet({ slug, orders }: { slug: string; orders: readonly 
         rowKey={(row) => row.order}
         empty={null}
         columns={[
-          { key: 'order', heading: words.order, cell: (row) => row.number },
+          {
+            key: 'order',
+            heading: words.order,
+            cell: (row) => (
+              <a href={withParams(paths.packing(slug), { number: row.number }, {})}>{row.number}</a>
+            ),
+          },
           { key: 'to', heading: words.to, cell: (row) => countryName(row.country) },
           {
             key: 'why',

@@ -14,6 +14,7 @@ import { paths } from '@/lib/paths'
 import { getFormDraft } from '@/lib/queries/forms/get-form-draft'
 import { getParcelPage } from '@/lib/queries/packing/get-parcel-page'
 import { packingDesk } from '../../_parts/packing-desk'
+import { HoldForm } from './_parts/hold-form'
 import { HandOverForm } from './_parts/hand-over-form'
 import { LeftSheet } from './_parts/left-sheet'
 import { PackForm } from './_parts/pack-form'
@@ -59,6 +60,9 @@ export default async function ParcelRoute({ params, searchParams }: Props) {
         {parcel.stop === null ? null : (
           <Notice kind="stopped" title={words.stop} live>
             {reasonWords(parcel.stop)} {parcel.onHoldReason}
+            {parcel.otherPacker === null
+              ? null
+              : words.otherPacker(parcel.otherPacker || words.batch.somebody)}
           </Notice>
         )}
         <Columns>
@@ -77,7 +81,19 @@ export default async function ParcelRoute({ params, searchParams }: Props) {
               <HandOverForm slug={slug} parcel={parcel} form={handing} />
             ) : null}
             {parcel.state === 'packed' ? <UnpackForm slug={slug} parcel={parcel.parcel} /> : null}
-            {parcel.handedOverAt === null ? null : <a href={paths.packing(slug)}>{words.next}</a>}
+            {parcel.handedOverAt === null && parcel.state !== 'discarded' ? (
+              <HoldForm
+                slug={slug}
+                parcel={parcel.parcel}
+                isOnHold={parcel.onHoldReason !== null}
+                form={keptForm(await getFormDraft(draft, 'hold'))}
+              />
+            ) : null}
+            {parcel.state === 'open' ? null : (
+              <a href={parcel.batch ? paths.packingBatch(slug, parcel.batch.id) : paths.packing(slug)}>
+                {words.next}
+              </a>
+            )}
           </Stack>
           <div>
             <Sheet title={words.address} id="address">

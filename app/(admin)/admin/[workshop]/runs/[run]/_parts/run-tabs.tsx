@@ -1,8 +1,9 @@
 import { Tabs } from '@/components/ui/tabs'
 import { runWords as words } from '@/lib/messages/runs'
+import { unitWords } from '@/lib/messages/units'
 import { paths } from '@/lib/paths'
 
-type Props = { workshop: string; run: string; current: 'run' | 'costs' | 'orders' }
+type Props = { workshop: string; run: string; current: 'run' | 'costs' | 'orders' | 'units' }
 
 /** The pages of a run, side by side. */
 export function RunTabs({ workshop, run, current }: Props) {
@@ -20,6 +21,11 @@ export function RunTabs({ workshop, run, current }: Props) {
           href: paths.adminRunPage(workshop, run, 'orders'),
           label: words.ordersTitle,
           current: current === 'orders',
+        },
+        {
+          href: paths.adminRunUnits(workshop, run),
+          label: unitWords.title,
+          current: current === 'units',
         },
       ]}
     />
