@@ -33,6 +33,8 @@ export type ModulePlan = {
   firstUnit: string
   parts: readonly PartLine[]
   costs: Record<string, unknown>
+  /** What a unit of another currency costs in the workshop's own. */
+  rates: readonly { currency: string; rate: string }[]
 }
 
 /** A module with everything its page and its figures need, published. */
@@ -63,7 +65,7 @@ export async function designModule(stage: Stage, house: Founded, plan: ModulePla
   await keepParts(stage, house, { module, revision, lines: plan.parts })
   const rated = {
     ...plan.costs,
-    rates: [{ currency: 'USD', rate: '0.92', on: dayAfter(now, -2), margin: '3' }],
+    rates: plan.rates.map((rate) => ({ ...rate, on: dayAfter(now, -2), margin: '3' })),
   }
   done(await savePlan({ ...on, input: PlanInput.parse(rated) }), `${module}: plan`)
   done(await publishModule(on), `${module}: publishing`)

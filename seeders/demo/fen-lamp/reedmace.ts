@@ -39,6 +39,10 @@ export const REEDMACE: ModulePlan = {
   revisions: [{ letter: 'A', note: 'Third board, first lettered one.' }],
   firstUnit: 'Tuned and left ringing for a night.',
   parts: usualParts({ jacks: 6, pots: 9, chips: 7, controller: false }),
+  rates: [
+    { currency: 'USD', rate: '0.79' },
+    { currency: 'EUR', rate: '0.86' },
+  ],
   costs: shortPlan({
     ...{ onceMinutes: 1800, currency: 'GBP', labour: '2600', oneOff: '1850' },
     boards: '6: 6.80; 30: 4.90; 60: 3.70',

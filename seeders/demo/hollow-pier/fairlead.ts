@@ -43,6 +43,7 @@ export const FAIRLEAD: ModulePlan = {
   revisions: [{ letter: 'A', note: 'Worked at once; kept.' }],
   firstUnit: 'Every step of the test plan; noise measured in a closed tin.',
   parts: usualParts({ jacks: 6, pots: 4, chips: 4, controller: false }),
+  rates: [{ currency: 'USD', rate: '0.92' }],
   costs: shortPlan({
     ...{ onceMinutes: 420, currency: 'EUR', labour: '2300', oneOff: '290' },
     boards: '6: 4.30; 30: 2.70; 60: 2.05',

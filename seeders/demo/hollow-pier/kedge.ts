@@ -53,6 +53,7 @@ export const KEDGE: ModulePlan = {
   ],
   firstUnit: 'Every step of the test plan; slopes measured at 1 ms, 1 s and 10 s.',
   parts: usualParts({ jacks: 4, pots: 4, chips: 2, controller: false }),
+  rates: [{ currency: 'USD', rate: '0.92' }],
   costs: shortPlan({
     ...{ onceMinutes: 240, currency: 'EUR', labour: '2200', oneOff: '180' },
     boards: '6: 3.60; 30: 2.10; 60: 1.60',

@@ -61,6 +61,7 @@ export const ROWLOCK: ModulePlan = {
   ],
   firstUnit: 'Every step of the test plan, and a week in the rehearsal room.',
   parts: usualParts({ jacks: 6, pots: 4, chips: 3, controller: true }),
+  rates: [{ currency: 'USD', rate: '0.92' }],
   costs: shortPlan({
     ...{ onceMinutes: 900, currency: 'EUR', labour: '2400', oneOff: '640' },
     boards: '6: 4.10; 30: 2.60; 60: 1.95; 120: 1.60',
