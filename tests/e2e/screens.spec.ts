@@ -29,7 +29,7 @@ for (const { by, half } of LOOKERS) {
     application,
     browserOf,
   }) => {
-    test.setTimeout(300_000)
+    test.setTimeout(600_000)
     const page = await (await browserOf(await emailOf(by, application))).newPage()
     for (const address of addressesOf(by, half, await locate(application))) {
       await test.step(address, async () => {
@@ -46,7 +46,7 @@ for (const { by, half } of LOOKERS) {
     application,
     browserOf,
   }) => {
-    test.setTimeout(300_000)
+    test.setTimeout(600_000)
     const page = await (await browserOf(await emailOf(by, application))).newPage()
     await page.emulateMedia({ colorScheme: 'dark' })
     for (const address of addressesOf(by, half, await locate(application))) {

@@ -63,7 +63,8 @@ export async function expectKeyboard(page: Page): Promise<void> {
   })
   const met: number[] = []
   const unseen: string[] = []
-  for (let step = 0; step < wanted + 3; step += 1) {
+  // A date takes a stop for each of its parts; the page ends where nothing has the focus.
+  for (let step = 0; step < wanted * 5 + 3; step += 1) {
     await page.keyboard.press('Tab')
     const focus = await page.evaluate(() => {
       const element = document.activeElement
