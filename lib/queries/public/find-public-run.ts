@@ -17,7 +17,7 @@ export function findPublicRun(moduleId: string): Promise<Run | null> {
   return Run.findOne({
     where: { moduleId, state: ['taking_deposits', 'locked'] },
     include: [
-      { model: RunOffer, as: 'offers', separate: true, order: [['kind', 'ASC']] },
+      { model: RunOffer, as: 'offers', separate: true, order: [['priceMinor', 'ASC']] },
       { model: Revision, as: 'revision', attributes: ['letter'] },
     ],
     order: [['number', 'DESC']],

@@ -35,7 +35,7 @@ export async function getCostDesk(cmd: {
   })
   const own = plans.find((plan) => plan.runId === run.id)
   const shown = own ?? plans[0]
-  const offers = await RunOffer.findAll({ where: { runId }, order: [['kind', 'ASC']] })
+  const offers = await RunOffer.findAll({ where: { runId }, order: [['priceMinor', 'ASC']] })
   const kinds = offers.map(({ kind }) => kind)
   const body = shown
     ? formOfPlan(shown.plan as unknown as CostPlan, shown.steps)

@@ -42,7 +42,7 @@ export async function inviteSignUp(
   const module = await Module.findByPk(run.moduleId, { transaction: tx, rejectOnEmpty: true })
   const offers = await RunOffer.findAll({
     where: { runId: run.id },
-    order: [['kind', 'ASC']],
+    order: [['priceMinor', 'ASC']],
     transaction: tx,
   })
   const base = env().BASE_URL

@@ -23,7 +23,7 @@ export function GaugeSheet({ page }: { page: RunPage }) {
         minimum={minimum}
         maximum={maximum}
         {...(isOpen && { forecast: { mean: fits(mean), low: fits(low), high: fits(high) } })}
-        {...(isOpen && { daysLeft: Math.max(0, daysBetween(today, decideBy) + 1), decideBy })}
+        {...(isOpen && { daysLeft: Math.max(0, daysBetween(today, decideBy)), decideBy })}
       />
     </Sheet>
   )
