@@ -14,7 +14,7 @@ export function CautionsSheet({ page: { module, offers } }: { page: ModulePage }
     <Sheet title={words.cautionsTitle} id="cautions">
       <div className="flex flex-col gap-3">
         {module.cautions ? <PlainText text={module.cautions} /> : null}
-        {cautionsOf(offers).map(([cautions, names]) => (
+        {cautionsOf(offers, module.cautions).map(([cautions, names]) => (
           <div key={names}>
             <h3 className="text-17">{words.cautionsOffer(names)}</h3>
             <PlainText text={cautions} />
@@ -27,9 +27,11 @@ export function CautionsSheet({ page: { module, offers } }: { page: ModulePage }
   )
 }
 
-/** Forms that are cautioned alike share a paragraph. */
-function cautionsOf(offers: ModulePage['offers']): [cautions: string, names: string][] {
-  const texts = [...new Set(offers.map(({ cautions }) => cautions))].filter((text) => text !== '')
+/** Forms that are cautioned alike share a paragraph; what the module says already is not said again. */
+function cautionsOf(offers: ModulePage['offers'], said: string): [cautions: string, names: string][] {
+  const texts = [...new Set(offers.map(({ cautions }) => cautions))].filter(
+    (text) => text !== '' && text !== said,
+  )
   return texts.map((text) => {
     const same = offers.filter(({ cautions }) => cautions === text)
     return [text, same.map(({ offer }) => offerNames[offer]).join(', ')]
