@@ -32,6 +32,8 @@ export const paths = {
   accountOrder: (order: string) => `/account/orders/${part(order)}`,
   accountOrderAddress: (order: string) => `/account/orders/${part(order)}/address`,
   accountOrderCancel: (order: string) => `/account/orders/${part(order)}/cancel`,
+  accountOrderChange: (order: string) => `/account/orders/${part(order)}/change`,
+  accountOrderChangeCheck: (order: string) => `/account/orders/${part(order)}/change/check`,
   accountData: '/account/data',
 
   admin: (workshop: string) => `/admin/${part(workshop)}`,
@@ -56,6 +58,7 @@ export const paths = {
     `/admin/${part(workshop)}/runs/${part(run)}/${deed}`,
   adminBulk: (workshop: string, bulk: string) => `/admin/${part(workshop)}/bulk/${part(bulk)}`,
   adminPaymentAccount: (workshop: string) => `/admin/${part(workshop)}/payment-account`,
+  adminMoney: (workshop: string, page: 'invoices' | 'tax') => `/admin/${part(workshop)}/money/${page}`,
   adminSettings: (workshop: string) => `/admin/${part(workshop)}/settings`,
   adminSettingsPage: (workshop: string, page: 'postage' | 'terms' | 'members' | 'destinations') =>
     `/admin/${part(workshop)}/settings/${page}`,
@@ -91,6 +94,9 @@ export const paths = {
     orderPay: (order: string) => `/api/orders/${part(order)}/pay`,
     orderCancel: (order: string) => `/api/orders/${part(order)}/cancel`,
     orderAddress: (order: string) => `/api/orders/${part(order)}/address`,
+    orderChange: (order: string) => `/api/orders/${part(order)}/change`,
+    orderChangeDraft: (order: string) => `/api/orders/${part(order)}/change/draft`,
+    invoice: (invoice: string) => `/api/invoices/${part(invoice)}/paper.pdf`,
     accountOrders: '/api/account/orders',
     workshops: '/api/workshops',
     hostWorkshop: (workshop: string, deed: 'open' | 'suspend' | 'reopen') =>
@@ -101,6 +107,7 @@ export const paths = {
       `/api/admin/${part(workshop)}/settings/${what}`,
     adminSettingsDeed: (workshop: string, deed: 'postage/remove' | 'members/remove' | 'members/withdraw') =>
       `/api/admin/${part(workshop)}/settings/${deed}`,
+    adminTax: (workshop: string, year: string) => `/api/admin/${part(workshop)}/tax.csv?year=${part(year)}`,
     join: '/api/workshops/join',
     adminModules: (workshop: string) => `/api/admin/${part(workshop)}/modules`,
     adminModule: (workshop: string, module: string) => `/api/admin/${part(workshop)}/modules/${part(module)}`,

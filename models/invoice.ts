@@ -7,8 +7,8 @@ import {
 } from 'sequelize'
 import type { Day, Minor } from '@/lib/core/brand'
 import { sequelize } from '@/lib/db/sequelize'
-import { day, json, key, moment, money, optional, ref, table, text, whole } from './columns'
-import type { InvoiceLine } from './json'
+import { day, json, key, moment, money, optional, preset, ref, table, text, whole } from './columns'
+import type { InvoiceLine, InvoiceSeller } from './json'
 import type { Order } from './order'
 import type { InvoiceKind, InvoiceSeries } from './words'
 
@@ -36,16 +36,18 @@ export class Invoice extends Model<InferAttributes<Invoice>, InferCreationAttrib
   declare addressId: string | null
   /** Currency of the sums. */
   declare currency: string
-  /** Sum without tax. */
+  /** Sum without tax, before earlier papers are set off. */
   declare netMinor: Minor
-  /** Tax. */
+  /** Tax, before earlier papers are set off. */
   declare taxMinor: Minor
-  /** Sum with tax. */
+  /** Sum with tax, before earlier papers are set off. */
   declare grossMinor: Minor
   /** Country whose tax it is. */
   declare taxCountry: string
   /** What is charged, line by line, with rate and tax. */
   declare lines: InvoiceLine[]
+  /** Who sold, as it was on the day of issue. */
+  declare seller: CreationOptional<Partial<InvoiceSeller>>
   /** Day of issue in the workshop's zone. */
   declare issuedOn: Day
   /** When it was issued (business time). */
@@ -72,6 +74,7 @@ Invoice.init(
     grossMinor: money(),
     taxCountry: text(),
     lines: json(),
+    seller: preset(json(), {}),
     issuedOn: day(),
     issuedAt: moment(),
   },

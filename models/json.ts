@@ -1,5 +1,5 @@
 import type { Minor } from '@/lib/core/brand'
-import type { OfferKind } from './words'
+import type { OfferKind, TaxClass } from './words'
 
 export type { FrontPanelControl, SpecificationLine } from '@/lib/contracts/front-panel'
 
@@ -25,9 +25,41 @@ export type ChosenAnswer = {
   isDefault: boolean
 }
 
-/** Lines and sums of an order, as a change found or left them. */
+/** What a line of a changed order is agreed at. */
+export type AgreedLine = {
+  offerKind: OfferKind
+  unitPriceMinor: Minor
+  unitSurchargeMinor: Minor
+  unitDepositMinor: Minor
+  taxClass: TaxClass
+  taxBasisPoints: number
+  taxMinor: Minor
+  postedByOn: string
+}
+
+/** All sums of an order, as they are fixed together. */
+export type OrderSums = {
+  goodsMinor: Minor
+  postageMinor: Minor
+  postageQuote: PostageQuote
+  postageTaxBasisPoints: number
+  postageTaxMinor: Minor
+  taxMinor: Minor
+  totalMinor: Minor
+  depositMinor: Minor
+  balanceMinor: Minor
+}
+
+/** Lines and sums of an order, as a change found or left them; `agreed` and `sums` are there for what is to come. */
 export type OrderTerms = {
-  lines: { runOfferId: string; quantity: number; totalMinor: Minor; choices: ChosenAnswer[] }[]
+  lines: {
+    runOfferId: string
+    quantity: number
+    totalMinor: Minor
+    choices: ChosenAnswer[]
+    agreed?: AgreedLine
+  }[]
+  sums?: OrderSums
   addressId: string | null
   postageMinor: Minor
   taxMinor: Minor
@@ -43,8 +75,22 @@ export type ReconciliationDifference = {
   theirs: { amount: number; currency: string } | null
 }
 
-/** A line of an invoice; `unitMinor` and `grossMinor` with tax. */
+/** Who sold, as printed on the day of issue. */
+export type InvoiceSeller = {
+  name: string
+  lines: string[]
+  taxNumber: string | null
+  /** The sentence the law wants where no tax is charged. */
+  taxNote: string | null
+}
+
+/**
+ * A line of an invoice; `unitMinor` and `grossMinor` with tax. `setsOff`: it takes an earlier paper off again, with
+ * negative sums. `isTaxedLater`: its tax falls due at the posting, so this paper counts in no tax report.
+ */
 export type InvoiceLine = {
+  setsOff?: boolean
+  isTaxedLater?: boolean
   text: string
   quantity: number
   unitMinor: Minor

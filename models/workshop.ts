@@ -38,6 +38,8 @@ export class Workshop extends Model<InferAttributes<Workshop>, InferCreationAttr
   declare taxMode: CreationOptional<TaxMode>
   /** True: entered prices contain the tax. False: it is added. */
   declare pricesIncludeTax: CreationOptional<boolean>
+  /** True: tax falls due when a payment arrives. False: when the order is posted. */
+  declare depositsTaxed: CreationOptional<boolean>
   /** Sentence the law wants where no tax is charged; printed on papers. */
   declare taxNote: string | null
   /** Its tax or VAT number as text; null if it has none. */
@@ -123,6 +125,7 @@ Workshop.init(
     locale: preset(text(), 'en'),
     taxMode: preset(text(), 'not_registered'),
     pricesIncludeTax: preset(flag(), true),
+    depositsTaxed: preset(flag(), false),
     taxNote: optional(text()),
     taxNumber: optional(text()),
     legalName: optional(text()),

@@ -1,3 +1,4 @@
+import type { InvoiceView } from './papers'
 import type { OrderView } from './orders'
 
 /** A repayment as the buyer sees it. */
@@ -25,6 +26,10 @@ export type OrderPageView = OrderView & {
   decideBy: string
   balanceWhen: 'at_lock' | 'units_passed' | 'before_packing'
   lapseOn: string | null
+  /** Whose order it is. */
+  personId: string
+  /** What is still to be paid before a change of the order holds; 0 without one. */
+  changeToPayMinor: number
   isDisputed: boolean
   cancelCause: string | null
   cancelReason: string | null
@@ -32,5 +37,6 @@ export type OrderPageView = OrderView & {
   /** none: nothing begun · open: a card page is open · bank_asks: the bank wants the buyer · unknown: nobody knows yet. */
   payment: 'none' | 'open' | 'bank_asks' | 'unknown'
   refunds: RefundView[]
+  invoices: InvoiceView[]
   terms: { number: number; body: string } | null
 }

@@ -64,3 +64,26 @@ export type OrderFormView = {
   offers: OrderFormOffer[]
   countries: string[]
 }
+
+/** What an order would become by a change, beside what it is. */
+export type ChangeQuoteView = {
+  order: string
+  number: number
+  currency: string
+  lines: {
+    offer: OfferKind
+    quantity: number
+    totalMinor: number
+    choices: { question: string; answer: string }[]
+    postedBy: string
+  }[]
+  before: { totalMinor: number; depositMinor: number; balanceMinor: number }
+  after: {
+    goodsMinor: number
+    postageMinor: number
+    taxMinor: number
+    totalMinor: number
+    depositMinor: number
+    balanceMinor: number
+  }
+}

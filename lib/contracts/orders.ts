@@ -20,6 +20,10 @@ export const OrderInput = z.object({
 })
 export type OrderInput = z.infer<typeof OrderInput>
 
+/** Other lines for an order under deposit. */
+export const OrderChangeInput = OrderInput.pick({ lines: true })
+export type OrderChangeInput = z.infer<typeof OrderChangeInput>
+
 /** An order form's rows that were left at zero or empty are no lines of the order. */
 export function readOrderForm(body: Record<string, unknown>): Record<string, unknown> {
   if (!Array.isArray(body.lines)) return body
@@ -51,7 +55,7 @@ export type CheckAnswer = { state: string }
 export type CancelAnswer = { state: string; refundMinor: number }
 
 /** What the order's person may do with it now. */
-export type OrderDeed = 'pay' | 'cancel' | 'address' | 'leave'
+export type OrderDeed = 'pay' | 'cancel' | 'address' | 'leave' | 'change' | 'withdraw'
 
 export type OrderView = {
   id: string

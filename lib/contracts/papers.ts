@@ -61,3 +61,44 @@ export type PackingSlips = PaperIssue & {
   from: readonly string[]
   slips: readonly PackingSlip[]
 }
+
+/** A line of an invoice; sums with tax in minor units. Papers set off have negative ones. */
+export type InvoicePaperLine = {
+  text: string
+  quantity: number
+  unitMinor: number
+  grossMinor: number
+  taxMinor: number
+  taxBasisPoints: number
+  setsOff: boolean
+}
+
+/** An invoice or credit note as printed. */
+export type InvoicePaper = Omit<PaperIssue, 'printedBy' | 'printedOn'> & {
+  kind: 'prepayment' | 'final' | 'credit_note'
+  number: number
+  orderNumber: number
+  issuedOn: Day
+  /** The paper a credit note takes back. */
+  corrects: { number: number; issuedOn: Day } | null
+  seller: { name: string; lines: readonly string[]; taxNumber: string | null; taxNote: string | null }
+  buyer: readonly string[]
+  buyerVatNumber: string | null
+  currency: string
+  locale: string
+  taxCountry: string
+  /** Tax falls due with the posting: said on the paper. */
+  isTaxedLater: boolean
+  lines: readonly InvoicePaperLine[]
+}
+
+/** An invoice or credit note as a page lists it. */
+export type InvoiceView = {
+  id: string
+  kind: InvoicePaper['kind']
+  number: number
+  issuedOn: Day
+  grossMinor: number
+  taxMinor: number
+  currency: string
+}

@@ -30,6 +30,7 @@ export const DetailsInput = z.object({
   about: paragraphs(5000),
   taxMode,
   pricesIncludeTax: tick,
+  depositsTaxed: tick,
   taxNumber: optionalLine(40),
   taxNote: optionalLine(500),
   headStartHours: wholeNumber(0, 336),

@@ -1,12 +1,15 @@
 import { stringify } from 'csv-stringify/sync'
 
+/** A number below zero is a number, a text that begins with a minus is made harmless. */
+type Cell = string | number
+
 /**
  * A table as a CSV file. A cell that a spreadsheet would read as a formula gets an apostrophe in front, so that an address
  * somebody typed is text wherever it is opened.
  */
 export function csv(
   columns: readonly string[],
-  rows: readonly (readonly string[])[],
+  rows: readonly (readonly Cell[])[],
   name: string,
 ): Response {
   return new Response(csvText(columns, rows), {
@@ -19,5 +22,5 @@ export function csv(
 }
 
 /** The same as text, with the mark by which spreadsheets know UTF-8. */
-export const csvText = (columns: readonly string[], rows: readonly (readonly string[])[]): string =>
+export const csvText = (columns: readonly string[], rows: readonly (readonly Cell[])[]): string =>
   stringify([[...columns], ...rows.map((row) => [...row])], { bom: true, escape_formulas: true })

@@ -5,6 +5,7 @@ export const deskWords = {
   today: 'Today',
   modules: 'Modules',
   runs: 'Runs',
+  money: 'Money',
   settings: 'Settings',
   packing: 'Packing',
   titleOf: (workshop: string) => `${workshop}: today`,

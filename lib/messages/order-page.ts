@@ -53,6 +53,7 @@ export const orderWords = {
     deposit: (sum: string) => `Pay the deposit of ${sum}`,
     balance: (sum: string) => `Pay the balance of ${sum}`,
     confirm: (sum: string) => `Confirm the payment of ${sum} with your bank`,
+    change: (sum: string) => `Pay the difference of ${sum}`,
     otherCard: 'Pay with another card instead',
   },
   checking: {
@@ -64,6 +65,27 @@ export const orderWords = {
   cancel: 'Cancel this order',
   leave: 'Leave the waiting list',
   changeAddress: 'Change the address',
+  change: 'Change what you ordered',
+  changeTitle: (number: string) => `Change order ${number}`,
+  changeLead:
+    'Until the run is locked. You see what it means once more before anything is changed. The address has a page of its own.',
+  changeNext: 'Go on: see every sum',
+  changeCheck: 'Check the change',
+  changeCheckLead: 'Nothing is changed until you press the button at the foot.',
+  changeBefore: 'Total before',
+  changeAfter: 'Total after',
+  changeDeposit: 'Deposit before and after',
+  changeFromTo: (from: string, to: string) => `${from}, then ${to}`,
+  changePay: (sum: string) =>
+    `The deposit rises by ${sum}. The change holds as soon as that is paid, if the places are still free then; if not, it is paid back at once and the order stays as it is.`,
+  changeBack: (sum: string) =>
+    `The deposit falls by ${sum}. The change holds at once, and ${sum} goes back to the card you paid with.`,
+  changeSame: 'The deposit stays as it is. The change holds at once.',
+  changeButton: (sum: string | null) =>
+    sum === null ? 'Change the order' : `Change the order with obligation to pay ${sum} now`,
+  changeOpen: (sum: string) =>
+    `You asked for a change of this order. It holds when its difference of ${sum} is paid; until then the order stays as it is.`,
+  cannotChange: 'What is ordered can be changed only while the run takes deposits and yours has arrived.',
   story: 'What happened',
   events: {
     place: 'You placed the order; a place was held for you.',
@@ -83,6 +105,7 @@ export const orderWords = {
     cancel_with_right: 'The order was cancelled.',
     run_called_off: 'The run was called off.',
     run_closed: 'The run closed before a place became free.',
+    changed: 'What is ordered was changed.',
     address_changed: 'The address was changed.',
     pack: 'Your parcel was packed.',
     unpack: 'Your parcel was opened again.',
@@ -124,6 +147,13 @@ export const orderWords = {
     arrived: 'sent back to your card; banks take up to 10 days to show it',
     failed: 'did not go through; the workshop has been told',
   },
+  invoices: 'Invoices',
+  invoiceKinds: {
+    prepayment: (number: number) => `Invoice ${number}, for a payment`,
+    final: (number: number) => `Invoice ${number}, for the whole order`,
+    credit_note: (number: number) => `Credit note ${number}`,
+  },
+  invoiceOf: (sum: string, day: string) => `${sum}, ${writtenDay(day)} (PDF)`,
   terms: (number: number) => `Terms of this order (version ${number})`,
 
   cancelTitle: (number: string) => `Cancel order ${number}`,

@@ -42,6 +42,9 @@ export const settingsWords = {
     export_without_tax: 'Everything is exported without tax',
   },
   pricesIncludeTax: 'My prices include the tax',
+  depositsTaxed: 'Tax falls due when a payment arrives',
+  depositsTaxedHint:
+    'So it is in most of the European Union, for deposits too. Left off, it falls due when an order is posted. Papers and the tax report follow it from now on.',
   taxNumber: 'Tax or VAT number',
   taxNote: 'Sentence the law wants where no tax is charged',
   homeRate: (percent: string, day: string, source: string) =>

@@ -66,6 +66,12 @@ export const SCREENS: Readonly<Record<string, { by: Looker; at: (found: Found) =
   '/account/orders/[order]': { by: 'buyer', at: ({ order }) => [`/account/orders/${order}`] },
   '/account/orders/[order]/address': { by: 'buyer', at: ({ order }) => [`/account/orders/${order}/address`] },
   '/account/orders/[order]/cancel': { by: 'buyer', at: ({ order }) => [`/account/orders/${order}/cancel`] },
+  '/account/orders/[order]/change': { by: 'buyer', at: ({ order }) => [`/account/orders/${order}/change`] },
+  // Leads back to the form; what it shows is looked at in the journeys.
+  '/account/orders/[order]/change/check': {
+    by: 'buyer',
+    at: ({ order }) => [`/account/orders/${order}/change/check`],
+  },
   '/start': { by: 'buyer', at: () => ['/start'] },
   '/join/[token]': { by: 'buyer', at: () => [`/join/${TOKEN}`] },
 
@@ -76,6 +82,8 @@ export const SCREENS: Readonly<Record<string, { by: Looker; at: (found: Found) =
   '/admin/[workshop]/settings/members': { by: 'owner', at: () => [`${ADMIN}/settings/members`] },
   '/admin/[workshop]/settings/postage': { by: 'owner', at: () => [`${ADMIN}/settings/postage`] },
   '/admin/[workshop]/settings/terms': { by: 'owner', at: () => [`${ADMIN}/settings/terms`] },
+  '/admin/[workshop]/money/invoices': { by: 'owner', at: () => [`${ADMIN}/money/invoices`] },
+  '/admin/[workshop]/money/tax': { by: 'owner', at: () => [`${ADMIN}/money/tax`] },
   '/admin/[workshop]/modules': { by: 'owner', at: () => [`${ADMIN}/modules`] },
   '/admin/[workshop]/modules/new': { by: 'owner', at: () => [`${ADMIN}/modules/new`] },
   '/admin/[workshop]/modules/[module]': { by: 'owner', at: () => [ROWLOCK] },

@@ -74,7 +74,7 @@ const movement = (kind: Movement['kind'], id: string | null, { amount, currency 
 })
 
 function kindOf({ kind }: Booked): Movement['kind'] {
-  if (kind === 'deposit_paid' || kind === 'balance_paid') return 'charge'
+  if (kind === 'deposit_paid' || kind === 'balance_paid' || kind === 'change_paid') return 'charge'
   if (kind.startsWith('refund')) return 'refund'
   return kind.startsWith('dispute') ? 'dispute' : 'fee'
 }

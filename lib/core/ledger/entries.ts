@@ -4,6 +4,7 @@ import { assertPart, assertPositive, postings } from '@/lib/core/ledger/postings
 export { balanceOf, isBalanced, type Entry } from '@/lib/core/ledger/balance'
 export { disputed, disputeLost, disputeWon, type Dispute } from '@/lib/core/ledger/disputes'
 export { reconcile, type Difference, type Movement } from '@/lib/core/ledger/reconcile'
+export { taxDue, taxDueBack } from '@/lib/core/ledger/tax-entries'
 export { refunded, refundFailed, reversed, type Refund } from '@/lib/core/ledger/refunds'
 
 /** A sum of money in minor units of a currency. */

@@ -45,6 +45,16 @@ export function taxRateFor(sale: {
 }
 
 /**
+ * The country whose tax a sale bears: the destination's where its rate is charged within the tax area, else the own.
+ * @example taxCountryOf({ mode: 'destination_rate', home: 'DE', destination: 'FR' })  // → 'FR'
+ * @example taxCountryOf({ mode: 'destination_rate', home: 'DE', destination: 'US' })  // → 'DE'
+ */
+export function taxCountryOf(sale: { mode: TaxMode; home: string; destination: string }): string {
+  const isThere = sale.mode === 'destination_rate' && isSameTaxArea(sale.home, sale.destination)
+  return isThere ? sale.destination : sale.home
+}
+
+/**
  * Whether goods between two countries stay within one tax area.
  * @example isSameTaxArea('DE', 'FR')  // → true
  * @example isSameTaxArea('GB', 'FR')  // → false

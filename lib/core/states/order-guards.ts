@@ -174,3 +174,33 @@ export function mayRefund(facts: {
   if (facts.disputed) return refuse('disputed')
   return facts.refundedMinor + facts.amountMinor <= facts.capturedMinor ? ok(true) : refuse('more_than_paid')
 }
+
+/**
+ * Whether a buyer may change what is ordered: until the lock, within the limit per person, and only as far as places are
+ * free that nobody waits for.
+ * Refuses: 'run_locked', 'limit_reached', 'no_place'.
+ * Domain:  units whole ≥ 1 → otherwise RangeError.
+ * Source:  own rule, from product.md: nobody overtakes, two people never get the last place.
+ * @example mayChangeOrder({ run: 'taking_deposits', units: 2, unitsNow: 1, unitsElsewhere: 0, limit: 2, free: 1, waiting: 0 })  // → ok(true)
+ * @example mayChangeOrder({ run: 'taking_deposits', units: 2, unitsNow: 1, unitsElsewhere: 0, limit: 2, free: 1, waiting: 1 })  // → refuse('no_place')
+ */
+export function mayChangeOrder(facts: {
+  readonly run: RunState
+  /** Units the order would have, and has. */
+  readonly units: number
+  readonly unitsNow: number
+  /** Units of the person's other live orders in the run. */
+  readonly unitsElsewhere: number
+  readonly limit: number
+  /** Units of the maximum neither taken nor held, for what grows. */
+  readonly free: number
+  readonly waiting: number
+}): Result<true, 'run_locked' | 'limit_reached' | 'no_place'> {
+  const { units, unitsNow } = facts
+  if (!Number.isSafeInteger(units) || units < 1)
+    throw new RangeError(`mayChangeOrder: units must be a whole number ≥ 1, got ${units}`)
+  if (facts.run !== 'taking_deposits') return refuse('run_locked')
+  if (units > unitsNow && facts.unitsElsewhere + units > facts.limit) return refuse('limit_reached')
+  if (facts.free < units - unitsNow) return refuse('no_place')
+  return units > unitsNow && facts.waiting > 0 ? refuse('no_place') : ok(true)
+}

@@ -28,4 +28,7 @@ export const money: Record<string, string> = {
     'The order is packed, so its address can no longer be changed here. Write to the workshop at once.',
   country_is_settled:
     'The order is paid in full, so its postage and tax are settled. Choose an address in the same country, or write to the workshop.',
+  no_place:
+    'There are not enough free places for more units, or others wait for them already. Order fewer, or wait until a place is free.',
+  nothing_changed: 'Nothing would be different: the order is like this already.',
 }

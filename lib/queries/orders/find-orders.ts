@@ -3,8 +3,10 @@ import type { WhereOptions } from 'sequelize'
 import {
   Address,
   AuditEntry,
+  Invoice,
   Module,
   Order,
+  OrderChange,
   OrderLine,
   Parcel,
   ParcelLine,
@@ -43,7 +45,10 @@ export async function findOrders(where: WhereOptions, limit: number): Promise<Fo
       { model: Run, as: 'run', required: true, include: [{ model: Module, as: 'module', required: true }] },
       { model: OrderLine, as: 'lines', separate: true, order: [['position', 'ASC']] },
       { model: PaymentAttempt, as: 'attempts', separate: true, order: [['requestedAt', 'ASC']] },
+      // Changes whose difference is not paid yet.
+      { model: OrderChange, as: 'changes', separate: true, where: { appliedAt: null, droppedAt: null } },
       { model: Refund, as: 'refunds', separate: true, order: [['requestedAt', 'ASC']] },
+      { model: Invoice, as: 'invoices', separate: true, order: [['issuedAt', 'ASC']] },
     ],
   })
   const ids = orders.map(({ id }) => id)

@@ -5,7 +5,7 @@ import { addDays } from '@/lib/core/time/day'
 import { dayIn } from '@/lib/core/time/zone'
 import { findOrders, type FoundOrder } from '@/lib/queries/orders/find-orders'
 import { toOrderView } from '@/lib/queries/orders/to-order-view'
-import { ProviderCustomer, type Refund, TermsVersion } from '@/models'
+import { type Invoice, ProviderCustomer, type Refund, TermsVersion } from '@/models'
 
 /**
  * An order for its own page; null when the actor may not see it (to them it does not exist). Bounded: a statement per
@@ -38,6 +38,8 @@ export async function getOrder(asked: {
     decideBy: run.decideByOn,
     balanceWhen: run.balanceWhen,
     lapseOn: lapseOnOf(found),
+    personId,
+    changeToPayMinor: view.can.includes('change') ? (order.changes?.[0]?.differenceMinor ?? 0) : 0,
     isDisputed: order.disputedAt !== null,
     cancelCause: order.cancelCause,
     cancelReason: order.cancelReason,
@@ -46,6 +48,7 @@ export async function getOrder(asked: {
     ),
     payment: paymentOf(found),
     refunds: (order.refunds ?? []).filter((each) => !isRepeated(each, order.refunds ?? [])).map(toRefundView),
+    invoices: (order.invoices ?? []).map(toInvoiceView),
     terms: terms && { number: terms.number, body: terms.body },
   }
 }
@@ -56,7 +59,8 @@ function lapseOnOf({ order, workshop }: FoundOrder): string | null {
 }
 
 function paymentOf({ order }: FoundOrder): OrderPageView['payment'] {
-  const purpose = order.state === 'balance_due' ? 'balance' : 'deposit'
+  const [change] = order.changes ?? []
+  const purpose = order.state === 'balance_due' ? 'balance' : change ? `change-${change.number}` : 'deposit'
   const last = (order.attempts ?? []).filter((attempt) => attempt.purpose === purpose).at(-1)
   switch (last?.state) {
     case 'sent':
@@ -93,3 +97,13 @@ function toRefundView(refund: Refund): RefundView {
     settledAt: (refund.failedAt ?? refund.succeededAt)?.toISOString() ?? null,
   }
 }
+
+const toInvoiceView = ({ id, kind, number, issuedOn, grossMinor, taxMinor, currency }: Invoice) => ({
+  id,
+  kind,
+  number,
+  issuedOn,
+  grossMinor,
+  taxMinor,
+  currency,
+})

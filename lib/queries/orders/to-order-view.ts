@@ -88,10 +88,13 @@ function deedsOf({ order, run, workshop }: FoundOrder): OrderDeed[] {
   const isDue = order.state === 'awaiting_deposit' || order.state === 'balance_due'
   const isCancellable =
     order.state === 'awaiting_deposit' || (order.state === 'reserved' && mayCancelFreely(run.state).ok)
+  const isOpen = order.state === 'reserved' && order.kind === 'paid' && run.state === 'taking_deposits'
+  const isChangeDue = isOpen && (order.changes ?? []).length > 0
   return [
-    ...(isDue && workshop.state === 'open' ? (['pay'] as const) : []),
+    ...((isDue || isChangeDue) && workshop.state === 'open' ? (['pay'] as const) : []),
     ...(isCancellable && order.disputedAt === null ? (['cancel'] as const) : []),
     ...(order.state === 'waiting' ? (['leave'] as const) : []),
+    ...(isOpen && order.disputedAt === null ? (['change'] as const) : []),
     ...(UNTIL_PACKING.includes(order.state) ? (['address'] as const) : []),
   ]
 }

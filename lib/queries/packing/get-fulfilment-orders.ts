@@ -21,7 +21,7 @@ export type FulfilmentPaper = {
   isCut: boolean
 }
 
-const LETTER_COUNTRIES = ['US', 'CA', 'MX', 'PH', 'CL', 'CO', 'VE']
+export const LETTER_COUNTRIES = ['US', 'CA', 'MX', 'PH', 'CL', 'CO', 'VE']
 
 /** What every paper names of workshop and maker. Two statements. */
 export async function getPaperIssue(cmd: {

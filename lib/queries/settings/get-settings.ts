@@ -46,10 +46,19 @@ const CLOSED = `
 
 function detailsOf(workshop: Workshop): SettingsView['details'] {
   const { name, legalName, replyTo, phone, about, taxMode, pricesIncludeTax, taxNumber, taxNote } = workshop
-  const { headStartHours, limitPerPerson, lapseAfterDays, postalAddress } = workshop
+  const { depositsTaxed, headStartHours, limitPerPerson, lapseAfterDays, postalAddress } = workshop
   return {
     ...{ name, legalName: legalName ?? '', replyTo: replyTo ?? '', phone, about },
-    ...{ taxMode, pricesIncludeTax, taxNumber, taxNote, headStartHours, limitPerPerson, lapseAfterDays },
+    ...{
+      taxMode,
+      pricesIncludeTax,
+      depositsTaxed,
+      taxNumber,
+      taxNote,
+      headStartHours,
+      limitPerPerson,
+      lapseAfterDays,
+    },
     postalAddress: postalAddress && { ...postalAddress, lines: [...postalAddress.lines], latin: undefined },
   }
 }

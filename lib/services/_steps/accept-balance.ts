@@ -1,6 +1,8 @@
 import 'server-only'
 import type { Transaction } from 'sequelize'
+import { env } from '@/lib/config/env'
 import type { PaymentFacts } from '@/lib/gateways/payments/types'
+import { paths } from '@/lib/paths'
 import { dropBalanceDues } from '@/lib/services/_steps/balance-dues'
 import { moveOrder } from '@/lib/services/_steps/move-order'
 import { openParcelForOrder } from '@/lib/services/_steps/open-parcel-for-order'
@@ -8,6 +10,7 @@ import { orderMailFacts } from '@/lib/services/_steps/order-mail-facts'
 import { promisesOf } from '@/lib/services/_steps/promises-of'
 import { queueMail } from '@/lib/services/_steps/queue-mail'
 import type { LockedPayment } from '@/lib/services/_steps/locked-payment'
+import type { Invoice } from '@/models'
 
 /**
  * A balance counts: the order is paid and its parcel enters the pack queue; nothing reminds the buyer any more.
@@ -17,8 +20,7 @@ import type { LockedPayment } from '@/lib/services/_steps/locked-payment'
 export async function acceptBalance(
   tx: Transaction,
   { order, attempt }: LockedPayment,
-  payment: PaymentFacts,
-  now: Date,
+  { payment, invoice, now }: { payment: PaymentFacts; invoice: Invoice; now: Date },
 ): Promise<void> {
   const moved = await moveOrder(tx, order, 'balance_captured', { now })
   if (!moved.ok) throw new Error(`order ${order.id} cannot take a balance from ${order.state}`)
@@ -36,7 +38,7 @@ export async function acceptBalance(
       amountMinor: attempt.amountMinor,
       paidTotalMinor: order.totalMinor,
       cardEnding: payment.card?.last4 || null,
-      invoiceUrl: null,
+      invoiceUrl: `${env().BASE_URL}${paths.api.invoice(invoice.id)}`,
       promises: await promisesOf(tx, order),
     },
     now,

@@ -1,15 +1,17 @@
 import 'server-only'
 import type { Transaction } from 'sequelize'
-import { balancePaid, depositPaid } from '@/lib/core/ledger/entries'
+import { balancePaid, changePaid, depositPaid } from '@/lib/core/ledger/entries'
 import { freeUnits } from '@/lib/core/orders/free'
 import { mayAccept, mayReserveLate } from '@/lib/core/states/order-guards'
 import type { PaymentFacts } from '@/lib/gateways/payments/types'
 import { acceptBalance } from '@/lib/services/_steps/accept-balance'
+import { acceptChange, changeFits, changeOf } from '@/lib/services/_steps/accept-change'
 import { acceptDeposit } from '@/lib/services/_steps/accept-deposit'
 import { applyFee } from '@/lib/services/_steps/apply-fee'
 import { moveAttempt } from '@/lib/services/_steps/move-attempt'
 import { noteEffect } from '@/lib/services/_steps/note-effect'
 import { postLedger } from '@/lib/services/_steps/post-ledger'
+import { issuePrepayment } from '@/lib/services/_steps/prepayment-invoice'
 import { requestRefund } from '@/lib/services/_steps/request-refund'
 import type { LockedPayment } from '@/lib/services/_steps/locked-payment'
 import { OrderLine, RunOffer } from '@/models'
@@ -19,7 +21,7 @@ import type { RefundCause } from '@/models/words'
  * Money arrived. It counts for its order when order, currency and sum are those asked for and the order still waits for
  * it (or had expired and its place is free); in every other case all of it goes back at once, and the row then tells
  * what really came instead of what was asked for (that stays in its parameters).
- * Run, order and attempt are locked by the caller. Writes: attempt, order, ledger, mail, or a refund. Repeat: safe, the
+ * Run, order and attempt are locked by the caller. Writes: attempt, order, ledger, invoice, mail, or a refund. Repeat: safe, the
  * effect is claimed once per payment.
  */
 export async function applyCapture(
@@ -53,21 +55,26 @@ export async function applyCapture(
   if (!moved.ok) throw new Error(`attempt ${attempt.id} cannot be captured from ${attempt.state}`)
   const sum = { amount: payment.capturedAmount, currency: payment.currency }
   const isDeposit = attempt.purpose === 'deposit'
+  const isBalance = attempt.purpose === 'balance'
   await postLedger(tx, {
     workshopId: order.workshopId,
     source: 'payment_attempt',
     sourceId: attempt.id,
-    kind: isDeposit ? 'deposit_paid' : 'balance_paid',
+    kind: isDeposit ? 'deposit_paid' : isBalance ? 'balance_paid' : 'change_paid',
     orderId: order.id,
     runId: order.runId,
     at: now,
-    entries: isDeposit ? depositPaid(sum) : balancePaid(sum),
+    entries: isDeposit ? depositPaid(sum) : isBalance ? balancePaid(sum) : changePaid(sum),
   })
   await applyFee(tx, locked, payment, now)
   if (backFor !== null)
     await requestRefund(tx, { attempt, amountMinor: payment.capturedAmount, why: backFor, now })
-  else if (isDeposit) await acceptDeposit(tx, locked, payment, now)
-  else await acceptBalance(tx, locked, payment, now)
+  else if (!isDeposit && !isBalance) await acceptChange(tx, locked, now)
+  else {
+    const invoice = await issuePrepayment(tx, { order, attempt, now })
+    if (isDeposit) await acceptDeposit(tx, locked, payment, now)
+    else await acceptBalance(tx, locked, { payment, invoice, now })
+  }
 }
 
 /** Why the money goes back at once; null when it counts. */
@@ -87,7 +94,10 @@ async function whyBack(
     if (order.state === 'balance_due') return null
     return order.state === 'cancelled' || order.state === 'lapsed' ? 'late_capture' : 'surplus'
   }
-  if (attempt.purpose !== 'deposit') return 'surplus'
+  if (attempt.purpose !== 'deposit') {
+    const change = await changeOf(tx, attempt)
+    return change && (await changeFits(tx, { order, run, change })) ? null : 'order_change'
+  }
   if (order.state === 'awaiting_deposit') return null
   if (order.state === 'cancelled' || order.state === 'lapsed') return 'late_capture'
   if (order.state !== 'expired') return 'surplus'

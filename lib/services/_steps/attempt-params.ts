@@ -1,13 +1,14 @@
 import 'server-only'
 import { createHash } from 'node:crypto'
 import { z } from 'zod'
+import type { Purpose } from '@/lib/gateways/payments/types'
 
 const shared = {
   account: z.string(),
   customer: z.string(),
   orderId: z.uuid(),
   attemptId: z.uuid(),
-  purpose: z.enum(['deposit', 'balance']),
+  purpose: z.custom<Purpose>((text) => /^(deposit|balance|change-[1-9][0-9]*)$/.test(String(text))),
   amount: z.int().positive(),
   currency: z.string(),
   description: z.string(),

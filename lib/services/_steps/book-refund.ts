@@ -3,6 +3,7 @@ import type { Transaction } from 'sequelize'
 import { Op } from 'sequelize'
 import { refunded, reversed } from '@/lib/core/ledger/entries'
 import { roundHalfUp } from '@/lib/core/money/round'
+import { creditRefund } from '@/lib/services/_steps/credit-note'
 import { postLedger } from '@/lib/services/_steps/post-ledger'
 import { LedgerEntry, LedgerTransfer, type Order, type PaymentAttempt, Refund } from '@/models'
 
@@ -12,8 +13,9 @@ export function feeShare(fee: number, repaid: number, charged: number): number {
 }
 
 /**
- * Books money that is on its way back to a buyer, with the part of the provider's fee that is lost by it.
- * Locks: nothing. Writes: one transfer. Repeat: safe, booked once.
+ * Books money that is on its way back to a buyer, with the part of the provider's fee that is lost by it, and issues the
+ * credit note, which moves the tax. A refund that fails later leaves it standing: the money is still owed.
+ * The caller has locked the order. Writes: up to two transfers, one credit note. Repeat: safe, booked once.
  */
 export async function bookRefund(
   tx: Transaction,
@@ -30,7 +32,6 @@ export async function bookRefund(
   const feeLost =
     feeShare(fee, before + refund.amountMinor, attempt.amountMinor) -
     feeShare(fee, before, attempt.amountMinor)
-  const isPosted = order.postedAt !== null
   await postLedger(tx, {
     ...sourceOf(refund, order),
     kind: 'refunded',
@@ -38,11 +39,11 @@ export async function bookRefund(
     entries: refunded({
       amount: refund.amountMinor,
       currency: refund.currency,
-      posted: isPosted,
-      tax: isPosted ? taxWithin(order, refund.amountMinor) : 0,
+      posted: order.postedAt !== null,
       feeLost,
     }),
   })
+  await creditRefund(tx, { order, refund, now })
 }
 
 /**
@@ -74,8 +75,3 @@ const sourceOf = (refund: Refund, order: Order) => ({
   orderId: order.id,
   runId: order.runId,
 })
-
-/** After posting the tax in what went back is no longer owed, by its share of the whole. */
-function taxWithin(order: Order, amount: number): number {
-  return order.totalMinor === 0 ? 0 : Math.min(amount, roundHalfUp(order.taxMinor * amount, order.totalMinor))
-}

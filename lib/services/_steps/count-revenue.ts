@@ -1,22 +1,20 @@
 import 'server-only'
 import { QueryTypes, type Transaction } from 'sequelize'
 import { orderPosted } from '@/lib/core/ledger/entries'
-import { roundHalfUp } from '@/lib/core/money/round'
 import { sequelize } from '@/lib/db/sequelize'
+import { issueFinal } from '@/lib/services/_steps/final-invoice'
 import { postLedger } from '@/lib/services/_steps/post-ledger'
 import type { Order } from '@/models'
 
 /**
  * Books a posted order: what the ledger still holds of the buyer's money for it becomes sales and tax. An order nobody
- * paid for books nothing. Tax falls by its share where part of the money went back before.
- * The caller has locked the order. Writes: one transfer. Repeat: safe, booked once.
+ * paid for books nothing. Tax is that of its final invoice.
+ * The caller has locked the order. Writes: one invoice, one transfer. Repeat: safe, booked once.
  */
 export async function countRevenue(tx: Transaction, order: Order, now: Date): Promise<void> {
   const { gross, taxBooked } = await heldFor(tx, order)
   if (gross <= 0) return
-  const share =
-    order.totalMinor === 0 ? 0 : roundHalfUp(BigInt(order.taxMinor) * BigInt(gross), BigInt(order.totalMinor))
-  const tax = Math.max(taxBooked, Math.min(gross, share))
+  const { taxMinor: tax } = await issueFinal(tx, { order, heldMinor: gross, now })
   await postLedger(tx, {
     workshopId: order.workshopId,
     source: 'order',

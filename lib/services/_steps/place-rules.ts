@@ -8,7 +8,15 @@ import { dayIn } from '@/lib/core/time/zone'
 import type { OrderQuote } from '@/lib/queries/orders/quote-order'
 import { Invitation, Order, type Run, RunOffer, type Workshop } from '@/models'
 
-const LIVE: OrderState[] = ['waiting', 'awaiting_deposit', 'reserved', 'balance_due', 'paid', 'packed']
+/** States in which an order of a person counts towards the limit. */
+export const LIVE_ORDERS: OrderState[] = [
+  'waiting',
+  'awaiting_deposit',
+  'reserved',
+  'balance_due',
+  'paid',
+  'packed',
+]
 
 /**
  * Whether a person may place this order in a run that is locked, and whether it takes a place or queues.
@@ -33,7 +41,7 @@ export async function placeOrQueue(
 > {
   const { run, workshop, personId, quote, now } = asked
   const mine = await Order.findAll({
-    where: { runId: run.id, personId, kind: 'paid', state: LIVE },
+    where: { runId: run.id, personId, kind: 'paid', state: LIVE_ORDERS },
     attributes: ['unitCount', 'addressFingerprint'],
     transaction: tx,
   })

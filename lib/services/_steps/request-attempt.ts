@@ -1,6 +1,8 @@
 import 'server-only'
 import { randomUUID } from 'node:crypto'
 import type { Transaction } from 'sequelize'
+import type { Minor } from '@/lib/core/brand'
+import type { Purpose } from '@/lib/gateways/payments/types'
 import { setDue } from '@/lib/jobs/set-due'
 import { hashOfParams, type CheckoutParams, type SavedCardParams } from '@/lib/services/_steps/attempt-params'
 import { nextLookUp } from '@/lib/services/_steps/next-look-up'
@@ -10,7 +12,8 @@ import type { AttemptMethod } from '@/models/words'
 
 type Asked = {
   order: Order
-  purpose: 'deposit' | 'balance'
+  purpose: Purpose
+  amountMinor: Minor
   method: AttemptMethod
   account: string
   now: Date
@@ -39,7 +42,7 @@ export async function requestAttempt(tx: Transaction, asked: Asked): Promise<Pay
       purpose,
       sequence,
       method,
-      amountMinor: purpose === 'deposit' ? order.depositMinor : order.balanceMinor,
+      amountMinor: asked.amountMinor,
       currency: order.currency,
       idempotencyKey: `${purpose}:${order.id}:${sequence}`,
       paramsHash: hashOfParams(params),

@@ -4,6 +4,7 @@ import { env } from '@/lib/config/env'
 import { paymentDescription } from '@/lib/messages/payments'
 import { paths } from '@/lib/paths'
 import { requestAttempt } from '@/lib/services/_steps/request-attempt'
+import { isChange, type Due } from '@/lib/services/_steps/due-of'
 import type { Module, Order, PaymentAttempt, Workshop } from '@/models'
 
 /** The least the provider allows is 30 minutes; a minute more, so that a slow request is not too late. */
@@ -21,20 +22,22 @@ export async function requestCardSession(
   tx: Transaction,
   asked: {
     order: Order
-    purpose: 'deposit' | 'balance'
+    due: Due
     workshop: Workshop
     module: Module
     customer: string
     now: Date
   },
 ): Promise<PaymentAttempt> {
-  const { order, purpose, workshop, module, customer, now } = asked
+  const { order, due, workshop, module, customer, now } = asked
   const account = workshop.providerAccountId
   if (account === null) throw new Error(`workshop ${workshop.id} has no payment account`)
+  const { purpose, amountMinor } = due
   const page = `${env().BASE_URL}${paths.accountOrder(order.id)}`
   return requestAttempt(tx, {
     order,
     purpose,
+    amountMinor,
     method: 'checkout',
     account,
     now,
@@ -44,9 +47,9 @@ export async function requestCardSession(
       orderId: order.id,
       attemptId,
       purpose,
-      amount: purpose === 'deposit' ? order.depositMinor : order.balanceMinor,
+      amount: amountMinor,
       currency: order.currency,
-      description: paymentDescription[purpose](module.name, order.number),
+      description: paymentDescription[isChange(purpose) ? 'change' : purpose](module.name, order.number),
       saveCard: purpose === 'deposit',
       successUrl: `${page}?paid=1`,
       cancelUrl: page,

@@ -2,6 +2,7 @@ import 'server-only'
 import { QueryTypes, type Transaction } from 'sequelize'
 import { depositKept } from '@/lib/core/ledger/entries'
 import { sequelize } from '@/lib/db/sequelize'
+import { creditStanding } from '@/lib/services/_steps/credit-note'
 import { depositThen } from '@/lib/services/_steps/deposit-then'
 import { postLedger } from '@/lib/services/_steps/post-ledger'
 import { refundOrder, repaidOf } from '@/lib/services/_steps/refund-order'
@@ -39,6 +40,7 @@ export async function settleLapsedDeposit(
     at: now,
     entries: depositKept({ amount, currency: order.currency, taxBooked: await taxBookedOn(tx, order) }),
   })
+  await creditStanding(tx, order, now)
   return then
 }
 

@@ -30,7 +30,7 @@ export async function cancelOrder(cmd: Cmd) {
   const seen = await Order.findByPk(orderId)
   if (!seen || actor.kind !== 'person' || !can(actor, 'order:cancel', { personId: seen.personId }))
     return refuse('not_found')
-  if (seen.state === 'awaiting_deposit') {
+  if (seen.state === 'awaiting_deposit' || seen.state === 'reserved') {
     const ended = await endOpenPayments(orderId, now)
     if (!ended.ok) return ended
   }

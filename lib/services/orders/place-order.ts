@@ -89,7 +89,7 @@ async function place(tx: Transaction, cmd: Cmd, by: { personId: string; customer
   const module = await Module.findByPk(run.moduleId, { transaction: tx, rejectOnEmpty: true })
   const attempt: PaymentAttempt | null = await requestCardSession(tx, {
     order,
-    purpose: 'deposit',
+    due: { purpose: 'deposit', amountMinor: order.depositMinor },
     workshop,
     module,
     customer: by.customer,

@@ -10,6 +10,7 @@ import { addressErrors } from '@/lib/queries/orders/address-errors'
 import { addAddress } from '@/lib/services/_steps/add-address'
 import { addressFingerprint } from '@/lib/services/_steps/address-fingerprint'
 import { lockOrder } from '@/lib/services/_steps/lock-order'
+import { reissuePrepayments } from '@/lib/services/_steps/prepayment-invoice'
 import { recordMove } from '@/lib/services/_steps/record-move'
 import { requoteOrder } from '@/lib/services/_steps/requote-order'
 import { type Address, Order, OrderLine, Parcel, ParcelLine, type Run } from '@/models'
@@ -28,7 +29,7 @@ const LIVE: OrderState[] = ['waiting', 'awaiting_deposit', 'reserved', 'balance_
  * the balance, as long as that has not been paid and no payment of it is under way.
  * Refuses: not_found · packed_already · already_ordered (another live order goes there) · payment_in_flight and
  * country_is_settled (another country, but the balance is being paid or paid) · field mistakes · weights_missing.
- * Locks: run, order. Writes: a new address, the order, its lines, its open parcel, audit. Repeat: safe; the same address
+ * Locks: run, order. Writes: a new address, the order, its lines, its open parcel, papers of another country's tax, audit. Repeat: safe; the same address
  * again changes nothing that is paid.
  */
 export async function setAddress(cmd: {
@@ -69,6 +70,7 @@ async function change(
     { addressId: written.id, addressFingerprint: fingerprint, country: address.country },
     { transaction: tx },
   )
+  await reissuePrepayments(tx, order, now)
   await redirectParcel(tx, order, written, now)
   await recordMove(tx, {
     workshopId,

@@ -76,6 +76,7 @@ async function begin(
   const attempt = await requestAttempt(tx, {
     order,
     purpose: 'balance',
+    amountMinor: order.balanceMinor,
     method: 'saved_card',
     account,
     now,

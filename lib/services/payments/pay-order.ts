@@ -7,6 +7,7 @@ import { ok, refuse, type Result } from '@/lib/core/result'
 import { inTransaction } from '@/lib/db/in-transaction'
 import { payments } from '@/lib/gateways/payments'
 import { paths } from '@/lib/paths'
+import { type Due, dueOf } from '@/lib/services/_steps/due-of'
 import { ensureCustomer } from '@/lib/services/_steps/ensure-customer'
 import { truthOfPayment } from '@/lib/services/_steps/look-up-attempt'
 import { lockOrder } from '@/lib/services/_steps/lock-order'
@@ -17,7 +18,7 @@ import { recordTruth, settle } from '@/lib/services/_steps/settle-attempt'
 import { Module, Order, PaymentAttempt, Person, Workshop } from '@/models'
 
 type Cmd = { actor: Actor; orderId: string; otherCard?: boolean; now: Date }
-type Due = { order: Order; workshop: Workshop; purpose: 'deposit' | 'balance'; now: Date }
+type Asked = { order: Order; workshop: Workshop; due: Due; now: Date }
 type Reason =
   | 'not_found'
   | 'nothing_to_pay'
@@ -40,31 +41,27 @@ export async function payOrder(cmd: Cmd): Promise<Result<PayAnswer, Reason>> {
   const order = await Order.findByPk(cmd.orderId)
   if (!order || actor.kind !== 'person' || !can(actor, 'order:pay', { personId: order.personId }))
     return refuse('not_found')
-  const purpose = purposeOf(order)
-  if (purpose === null) return refuse('nothing_to_pay')
+  const due = await dueOf(order)
+  if (due === null) return refuse('nothing_to_pay')
   const workshop = await Workshop.findByPk(order.workshopId, { rejectOnEmpty: true })
   if (workshop.state !== 'open') return refuse('workshop_suspended')
-  const due = { order, workshop, purpose, now }
+  const { purpose } = due
+  const asked = { order, workshop, due, now }
   const live = await PaymentAttempt.findOne({ where: { orderId: order.id, purpose, state: [...LIVE] } })
   if (live) {
-    const again = await continueAttempt(live, due, cmd.otherCard ?? false)
+    const again = await continueAttempt(live, asked, cmd.otherCard ?? false)
     if (again !== 'over') return again
   }
-  return startAttempt(due)
-}
-
-function purposeOf(order: Order): Due['purpose'] | null {
-  if (order.state === 'awaiting_deposit') return 'deposit'
-  return order.state === 'balance_due' ? 'balance' : null
+  return startAttempt(asked)
 }
 
 /** What a payment that was begun leads to; 'over' when it can never be finished and a new one may begin. */
 async function continueAttempt(
   live: PaymentAttempt,
-  due: Due,
+  asked: Asked,
   otherCard: boolean,
 ): Promise<Result<PayAnswer, Reason> | 'over'> {
-  const { now } = due
+  const { now } = asked
   const settled = await settle(live.id, { now })
   // The provider does not answer; the link it gave before is still good.
   if (!settled.ok) return live.payUrl ? ok({ payUrl: live.payUrl }) : refuse('provider_unreachable')
@@ -72,14 +69,14 @@ async function continueAttempt(
   if (attempt.state === 'captured') return refuse('nothing_to_pay')
   if (attempt.state === 'failed' || attempt.state === 'abandoned') return 'over'
   if (truth.state === 'open' && truth.url !== null) return ok({ payUrl: truth.url })
-  if (attempt.state === 'needs_customer') return finish(attempt, due, otherCard)
+  if (attempt.state === 'needs_customer') return finish(attempt, asked, otherCard)
   if (attempt.method === 'checkout' && truth.state === 'never_had_it') return open(attempt.id, now)
   return refuse('payment_in_flight')
 }
 
 async function finish(
   attempt: PaymentAttempt,
-  { order, now }: Due,
+  { order, now }: Asked,
   otherCard: boolean,
 ): Promise<Result<PayAnswer, Reason> | 'over'> {
   const account = attempt.providerAccountId
@@ -100,22 +97,24 @@ async function finish(
   return done.value.state === 'failed' ? 'over' : refuse('payment_in_flight')
 }
 
-async function startAttempt(due: Due): Promise<Result<PayAnswer, Reason>> {
-  const { workshop, purpose, now } = due
-  const person = await Person.findByPk(due.order.personId, { rejectOnEmpty: true })
+async function startAttempt(asked: Asked): Promise<Result<PayAnswer, Reason>> {
+  const { workshop, now } = asked
+  const { purpose } = asked.due
+  const person = await Person.findByPk(asked.order.personId, { rejectOnEmpty: true })
   const customer = await ensureCustomer(workshop, person, now)
   if (!customer.ok) return customer
   const requested = await inTransaction(async (tx) => {
-    const locked = await lockOrder(tx, due.order.id)
-    if (!locked || purposeOf(locked.order) !== purpose) return refuse('nothing_to_pay')
-    const where = { orderId: due.order.id, purpose, state: [...LIVE] }
+    const locked = await lockOrder(tx, asked.order.id)
+    const due = locked && (await dueOf(locked.order, tx))
+    if (!locked || due?.purpose !== purpose) return refuse('nothing_to_pay')
+    const where = { orderId: asked.order.id, purpose, state: [...LIVE] }
     // Two presses at once: the second shares the first one's session.
     const other = await PaymentAttempt.findOne({ where, transaction: tx })
     if (other) return ok({ attemptId: other.id })
     const module = await Module.findByPk(locked.run.moduleId, { transaction: tx, rejectOnEmpty: true })
     const attempt = await requestCardSession(tx, {
       order: locked.order,
-      purpose,
+      due,
       workshop,
       module,
       customer: customer.value,

@@ -41,6 +41,7 @@ export const HOLLOW_PIER: WorkshopPlan = {
       'Two benches above a boat shed. We make small runs of modules we wanted ourselves, and mend what we sold.',
     taxMode: 'home_rate',
     pricesIncludeTax: 'on',
+    depositsTaxed: 'on',
     headStartHours: 48,
     limitPerPerson: 4,
     lapseAfterDays: 14,

@@ -34,6 +34,8 @@ export const API_TABLE: Readonly<Record<string, Row>> = {
   'POST /api/admin/[workshop]/settings/terms': '401 404 422 404 404 404 404',
   // The account of the small world is not in the provider's books: the owner gets as far as the provider.
   'POST /api/admin/[workshop]/payment-account': '401 404 409 404 404 404 404',
+  'GET /api/admin/[workshop]/tax.csv': '401 404 200 404 404 404 404',
+  'GET /api/invoices/[invoice]/paper.pdf': '401 200 200 404 404 404 404',
   'GET /api/admin/[workshop]/bulk/[bulk]': '401 404 200 404 404 404 404',
   'GET /api/admin/[workshop]/runs': '401 404 200 404 404 404 404',
   'POST /api/admin/[workshop]/runs': '401 404 422 404 404 404 404',
@@ -57,6 +59,9 @@ export const API_TABLE: Readonly<Record<string, Row>> = {
   'POST /api/orders/[order]/address': '401 422 422 422 422 422 422',
   'PUT /api/orders/[order]/address': '401 422 422 422 422 422 422',
   'POST /api/orders/[order]/cancel': '401 200 404 404 404 404 404',
+  // The body is read first here too.
+  'POST /api/orders/[order]/change': '401 422 422 422 422 422 422',
+  'POST /api/orders/[order]/change/draft': '401 422 422 422 422 422 422',
   'POST /api/orders/[order]/check': '401 200 404 404 404 404 404',
   // By then the customer has cancelled it.
   'POST /api/orders/[order]/pay': '401 409 404 404 404 404 404',

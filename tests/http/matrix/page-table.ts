@@ -25,6 +25,9 @@ export const PAGE_TABLE: Readonly<Record<string, Row>> = {
   'PAGE /account/orders/[order]': '307 200 200 404 404 404 404',
   'PAGE /account/orders/[order]/address': '307 200 200 404 404 404 404',
   'PAGE /account/orders/[order]/cancel': '307 200 200 404 404 404 404',
+  'PAGE /account/orders/[order]/change': '307 200 404 404 404 404 404',
+  // Nothing was typed before: back to the form.
+  'PAGE /account/orders/[order]/change/check': '307 307 307 307 307 307 307',
   'PAGE /sandbox': '200 200 200 200 200 200 200',
   'PAGE /sandbox/mail': '200 200 200 200 200 200 200',
   'GET /sandbox/mail.json': '200 200 200 200 200 200 200',
@@ -42,6 +45,8 @@ export const PAGE_TABLE: Readonly<Record<string, Row>> = {
   'PAGE /admin/[workshop]/modules/[module]/plan': '307 404 200 404 404 404 404',
   'PAGE /admin/[workshop]/modules/[module]/preview': '307 404 200 200 404 404 404',
   'PAGE /admin/[workshop]/modules/[module]/revisions': '307 404 200 404 404 404 404',
+  'PAGE /admin/[workshop]/money/invoices': '307 404 200 404 404 404 404',
+  'PAGE /admin/[workshop]/money/tax': '307 404 200 404 404 404 404',
   'PAGE /admin/[workshop]/payment-account': '307 404 200 404 404 404 404',
   'PAGE /admin/[workshop]/settings': '307 404 200 404 404 404 404',
   'PAGE /admin/[workshop]/settings/destinations': '307 404 200 404 404 404 404',

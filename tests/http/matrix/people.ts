@@ -3,6 +3,7 @@ import { hashToken, makeToken } from '@/lib/config/secrets'
 import { BulkJob, Membership, Session, User, type Person } from '@/models'
 import { pier } from '@/tests/support/worlds/pier'
 import { makeParcel } from '@/tests/support/worlds/parcel'
+import { makeInvoice } from '@/tests/support/worlds/payment'
 import { makePerson, makeUser } from '@/tests/support/worlds/person'
 import { NOW } from '@/tests/support/worlds/base'
 import type { MatrixRole } from './roles'
@@ -41,6 +42,7 @@ export async function matrixWorld() {
     parcel: parcel.id,
     batch: randomUUID(),
     bulk: bulk.id,
+    invoice: (await makeInvoice(world.order)).id,
     revision: world.revision.letter,
     move: 'open',
     token: makeToken(),

@@ -1,6 +1,7 @@
+import { minor } from '@/lib/core/brand'
 import type { CreationAttributes } from 'sequelize'
 import type { AttemptState } from '@/lib/core/states/attempt'
-import { type Order, PaymentAttempt, Refund, Workshop } from '@/models'
+import { Invoice, type Order, PaymentAttempt, Refund, Workshop } from '@/models'
 import { hoursAfter, NOW, serial } from './base'
 import { hashOf } from './sign-up'
 
@@ -53,6 +54,38 @@ export async function makeRefund(attempt: PaymentAttempt, over: Partial<Creation
     cause: 'cancelled',
     idempotencyKey: `refund:${attempt.id}:${sequence}`,
     requestedAt: NOW,
+    ...over,
+  })
+}
+
+/** The numbered paper of a deposit. */
+export function makeInvoice(order: Order, over: Partial<CreationAttributes<Invoice>> = {}) {
+  const { workshopId, id: orderId, addressId, currency, depositMinor } = order
+  const taxMinor = minor(0)
+  return Invoice.create({
+    workshopId,
+    orderId,
+    addressId,
+    currency,
+    kind: 'prepayment',
+    series: 'invoice',
+    number: serial(),
+    netMinor: depositMinor,
+    taxMinor,
+    grossMinor: depositMinor,
+    taxCountry: 'DE',
+    lines: [
+      {
+        text: 'Deposit',
+        quantity: 1,
+        unitMinor: depositMinor,
+        grossMinor: depositMinor,
+        taxMinor,
+        taxBasisPoints: 0,
+      },
+    ],
+    issuedOn: '2027-03-01',
+    issuedAt: NOW,
     ...over,
   })
 }

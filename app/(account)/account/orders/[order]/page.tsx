@@ -11,6 +11,7 @@ import { accountWords } from '@/lib/messages/account'
 import { orderWords as words } from '@/lib/messages/order-page'
 import { paths } from '@/lib/paths'
 import { getOrder } from '@/lib/queries/orders/get-order'
+import { InvoiceSheet } from './_parts/invoice-sheet'
 import { NextSheet } from './_parts/next-sheet'
 import { OrderSheet } from './_parts/order-sheet'
 import { ParcelSheet } from './_parts/parcel-sheet'
@@ -43,6 +44,7 @@ export default async function OrderPage({ params, searchParams }: Props) {
         <NextSheet order={order} hasReturned={paid !== undefined} refusal={await refusalOf(draft)} />
         <ParcelSheet order={order} />
         <RefundSheet order={order} />
+        <InvoiceSheet order={order} />
         <StorySheet order={order} />
         <OrderSheet order={order} />
       </Stack>

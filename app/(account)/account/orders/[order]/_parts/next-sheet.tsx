@@ -5,8 +5,10 @@ import { Notice } from '@/components/ui/notice'
 import { PlainText } from '@/components/ui/plain-text'
 import { Sheet } from '@/components/ui/sheet'
 import type { OrderPageView } from '@/lib/contracts/order-page'
+import { formatMoney } from '@/lib/core/money/format'
 import { orderWords as words } from '@/lib/messages/order-page'
 import { refusedTitle } from '@/lib/messages/reasons/general'
+import { LOCALE } from '@/lib/messages/ui'
 import { paths } from '@/lib/paths'
 import { NextWords } from './next-words'
 import { PayButtons } from './pay-buttons'
@@ -45,6 +47,9 @@ export function NextSheet({ order, hasReturned, refusal }: Props) {
           </Notice>
         ) : null}
         <NextWords order={order} />
+        {order.changeToPayMinor > 0 ? (
+          <p>{words.changeOpen(formatMoney(order.changeToPayMinor, order.currency, LOCALE))}</p>
+        ) : null}
         {order.runReason && order.runState === 'called_off' ? (
           <div>
             <p className="text-15 text-quiet">{words.reason}</p>
@@ -53,6 +58,9 @@ export function NextSheet({ order, hasReturned, refusal }: Props) {
         ) : null}
         <ButtonRow>
           {can('pay') ? <PayButtons order={order} /> : null}
+          {can('change') ? (
+            <LinkButton href={paths.accountOrderChange(order.id)}>{words.change}</LinkButton>
+          ) : null}
           {can('address') ? (
             <LinkButton href={paths.accountOrderAddress(order.id)}>{words.changeAddress}</LinkButton>
           ) : null}

@@ -9,13 +9,17 @@ import { paths } from '@/lib/paths'
 /** Leads to the card page, or to the bank that wants the buyer, with another card as the way round it. */
 export function PayButtons({ order }: { order: OrderPageView }) {
   const isDeposit = order.state === 'awaiting_deposit'
-  const sum = formatMoney(isDeposit ? order.depositMinor : order.balanceMinor, order.currency, LOCALE)
+  const isChange = order.state === 'reserved'
+  const due = isChange ? order.changeToPayMinor : isDeposit ? order.depositMinor : order.balanceMinor
+  const sum = formatMoney(due, order.currency, LOCALE)
   const action = paths.api.orderPay(order.id)
-  const label = isDeposit
-    ? words.pay.deposit(sum)
-    : order.payment === 'bank_asks'
-      ? words.pay.confirm(sum)
-      : words.pay.balance(sum)
+  const label = isChange
+    ? words.pay.change(sum)
+    : isDeposit
+      ? words.pay.deposit(sum)
+      : order.payment === 'bank_asks'
+        ? words.pay.confirm(sum)
+        : words.pay.balance(sum)
   return (
     <>
       <DeedForm action={action}>

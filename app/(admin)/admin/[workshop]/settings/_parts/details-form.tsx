@@ -53,6 +53,13 @@ export function DetailsForm({ slug, form, homeRate }: Props) {
               : words.noHomeRate}
           </p>
           <CheckField name="pricesIncludeTax" label={words.pricesIncludeTax} form={form} optional />
+          <CheckField
+            name="depositsTaxed"
+            label={words.depositsTaxed}
+            hint={words.depositsTaxedHint}
+            form={form}
+            optional
+          />
           <TextField name="taxNumber" label={words.taxNumber} form={form} optional />
           <TextField name="taxNote" label={words.taxNote} form={form} optional width="full" />
         </div>

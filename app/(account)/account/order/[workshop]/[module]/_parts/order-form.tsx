@@ -6,7 +6,7 @@ import { Sheet } from '@/components/ui/sheet'
 import type { OrderFormView } from '@/lib/contracts/order-quote'
 import { orderFormWords as words } from '@/lib/messages/orders'
 import { paths } from '@/lib/paths'
-import { OfferRow } from './offer-row'
+import { OfferRow } from '@/components/order/offer-row'
 
 /** What is wanted and where it goes; every sum is shown on the next page. */
 export function OrderForm({ run, form }: { run: OrderFormView; form?: FormState }) {
