@@ -32,6 +32,7 @@ export const paths = {
   accountOrder: (order: string) => `/account/orders/${part(order)}`,
   accountOrderAddress: (order: string) => `/account/orders/${part(order)}/address`,
   accountOrderCancel: (order: string) => `/account/orders/${part(order)}/cancel`,
+  accountOrderWithdraw: (order: string) => `/account/orders/${part(order)}/withdraw`,
   accountOrderChange: (order: string) => `/account/orders/${part(order)}/change`,
   accountOrderChangeCheck: (order: string) => `/account/orders/${part(order)}/change/check`,
   accountData: '/account/data',
@@ -58,7 +59,10 @@ export const paths = {
     `/admin/${part(workshop)}/runs/${part(run)}/${deed}`,
   adminBulk: (workshop: string, bulk: string) => `/admin/${part(workshop)}/bulk/${part(bulk)}`,
   adminPaymentAccount: (workshop: string) => `/admin/${part(workshop)}/payment-account`,
-  adminMoney: (workshop: string, page: 'invoices' | 'tax') => `/admin/${part(workshop)}/money/${page}`,
+  adminOrder: (workshop: string, order: string) => `/admin/${part(workshop)}/orders/${part(order)}`,
+  adminOrderNew: (workshop: string, run: string) => `/admin/${part(workshop)}/runs/${part(run)}/orders/new`,
+  adminMoney: (workshop: string, page: 'books' | 'invoices' | 'tax') =>
+    `/admin/${part(workshop)}/money/${page}`,
   adminSettings: (workshop: string) => `/admin/${part(workshop)}/settings`,
   adminSettingsPage: (workshop: string, page: 'postage' | 'terms' | 'members' | 'destinations') =>
     `/admin/${part(workshop)}/settings/${page}`,
@@ -94,6 +98,7 @@ export const paths = {
     orderPay: (order: string) => `/api/orders/${part(order)}/pay`,
     orderCancel: (order: string) => `/api/orders/${part(order)}/cancel`,
     orderAddress: (order: string) => `/api/orders/${part(order)}/address`,
+    orderWithdraw: (order: string) => `/api/orders/${part(order)}/withdraw`,
     orderChange: (order: string) => `/api/orders/${part(order)}/change`,
     orderChangeDraft: (order: string) => `/api/orders/${part(order)}/change/draft`,
     invoice: (invoice: string) => `/api/invoices/${part(invoice)}/paper.pdf`,
@@ -107,6 +112,13 @@ export const paths = {
       `/api/admin/${part(workshop)}/settings/${what}`,
     adminSettingsDeed: (workshop: string, deed: 'postage/remove' | 'members/remove' | 'members/withdraw') =>
       `/api/admin/${part(workshop)}/settings/${deed}`,
+    adminOrderDeed: (workshop: string, order: string, deed: 'return' | 'cancel' | 'reinstate') =>
+      `/api/admin/${part(workshop)}/orders/${part(order)}/${deed}`,
+    adminRunOrders: (workshop: string, run: string) =>
+      `/api/admin/${part(workshop)}/runs/${part(run)}/orders`,
+    adminMoneyDeed: (workshop: string, deed: 'compare' | 'resolve') =>
+      `/api/admin/${part(workshop)}/money/${deed}`,
+    adminLedger: (workshop: string) => `/api/admin/${part(workshop)}/ledger.csv`,
     adminTax: (workshop: string, year: string) => `/api/admin/${part(workshop)}/tax.csv?year=${part(year)}`,
     join: '/api/workshops/join',
     adminModules: (workshop: string) => `/api/admin/${part(workshop)}/modules`,

@@ -70,7 +70,10 @@ export type OrderTerms = {
 /** One difference between the ledger and the provider's list; ids and sums only. */
 export type ReconciliationDifference = {
   kind: 'missing_here' | 'missing_there' | 'amount' | 'currency'
+  /** The provider's id of the payment, repayment or payout. */
   id: string
+  /** It is the fee of that payment (a dispute's sum with it), not the payment itself. */
+  isFee: boolean
   ours: { amount: number; currency: string } | null
   theirs: { amount: number; currency: string } | null
 }

@@ -28,6 +28,12 @@ export type OrderPageView = OrderView & {
   lapseOn: string | null
   /** Whose order it is. */
   personId: string
+  /** Withdrawing after the lock; `endsOn` null while the last piece has not arrived. */
+  withdrawal: { hasRight: boolean; endsOn: string | null }
+  /** Where goods withdrawn from are sent back to. */
+  returnTo: string[]
+  /** Why the owner entered it; null for orders placed here. Only its workshop sees it. */
+  manualReason: string | null
   /** What is still to be paid before a change of the order holds; 0 without one. */
   changeToPayMinor: number
   isDisputed: boolean

@@ -1,6 +1,6 @@
 import { z } from 'zod'
 import { AddressInput } from './address'
-import { offerKind, tick, uuid, wholeNumber } from './fields'
+import { email, minorAmount, offerKind, paragraphs, slug, tick, uuid, wholeNumber } from './fields'
 
 export const OrderLineInput = z.object({
   offer: offerKind,
@@ -23,6 +23,23 @@ export type OrderInput = z.infer<typeof OrderInput>
 /** Other lines for an order under deposit. */
 export const OrderChangeInput = OrderInput.pick({ lines: true })
 export type OrderChangeInput = z.infer<typeof OrderChangeInput>
+
+/** An order the owner enters: paid elsewhere at the price named, or free. */
+export const EnterOrderInput = z.object({
+  email,
+  lines: z
+    .array(z.object({ offer: offerKind, quantity: wholeNumber(1, 100), priceMinor: minorAmount() }), {
+      error: 'Choose at least one offer.',
+    })
+    .min(1, 'Choose at least one offer.')
+    .max(3),
+  address: AddressInput,
+  reason: paragraphs(500, 3, 'Say why it is entered by hand.'),
+})
+export type EnterOrderInput = z.infer<typeof EnterOrderInput>
+
+export const CancelForBuyerInput = z.object({ reason: paragraphs(1000, 3, 'Say why; the buyer reads it.') })
+export const OrderParams = z.object({ workshop: slug, order: uuid })
 
 /** An order form's rows that were left at zero or empty are no lines of the order. */
 export function readOrderForm(body: Record<string, unknown>): Record<string, unknown> {

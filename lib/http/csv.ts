@@ -7,11 +7,7 @@ type Cell = string | number
  * A table as a CSV file. A cell that a spreadsheet would read as a formula gets an apostrophe in front, so that an address
  * somebody typed is text wherever it is opened.
  */
-export function csv(
-  columns: readonly string[],
-  rows: readonly (readonly Cell[])[],
-  name: string,
-): Response {
+export function csv(columns: readonly string[], rows: readonly (readonly Cell[])[], name: string): Response {
   return new Response(csvText(columns, rows), {
     headers: {
       'content-type': 'text/csv; charset=utf-8',

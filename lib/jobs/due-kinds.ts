@@ -13,6 +13,7 @@ export const DUE_KINDS = [
   'order_lapse',
   'decide_by_passed',
   'run_page',
+  'compare_books',
 ] as const
 
 export type DueKind = (typeof DUE_KINDS)[number]

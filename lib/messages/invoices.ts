@@ -7,9 +7,11 @@ export const invoiceText = {
       ? `Deposit for order ${order}`
       : purpose === 'balance'
         ? `Balance of order ${order}`
-        : purpose === 'again'
-          ? `Paid for order ${order}, at the rate of its new country`
-          : `Paid for a change of order ${order}`,
+        : purpose === 'outside'
+          ? `Paid outside for order ${order}`
+          : purpose === 'again'
+            ? `Paid for order ${order}, at the rate of its new country`
+            : `Paid for a change of order ${order}`,
   goods: (module: string, offer: keyof typeof offerNames, choices: readonly string[]) =>
     [`${module}, ${offerNames[offer]}`, ...choices].join('; '),
   postage: 'Postage',

@@ -42,7 +42,8 @@ export const orderWords = {
     cancelled: 'This order is cancelled. There is nothing more to do.',
     expired: 'The deposit was not paid in time, so the place is free again. Nothing was charged.',
     lapsed: 'The balance was not paid in time, so the order has lapsed.',
-    withdrawn: 'You have withdrawn from this order.',
+    withdrawn:
+      'You have withdrawn from this order. Send the goods back within 14 days; what you paid goes back when they arrive.',
     returned: 'The goods are back with the workshop.',
     calledOff: 'The run was called off. Everything you paid goes back without your asking.',
     disputed:
@@ -65,6 +66,26 @@ export const orderWords = {
   cancel: 'Cancel this order',
   leave: 'Leave the waiting list',
   changeAddress: 'Change the address',
+  withdraw: 'Withdraw from the contract here',
+  withdrawTitle: (number: string) => `Withdraw from order ${number}`,
+  withdrawLead: ({ hasRight, endsOn }: { hasRight: boolean; endsOn: string | null }) =>
+    !hasRight
+      ? 'The terms of this order let you withdraw until it is packed. Read it once more; the button withdraws for good.'
+      : endsOn === null
+        ? 'You may withdraw without giving a reason, until 14 days after the last piece has arrived. Read it once more; the button withdraws for good.'
+        : `You may withdraw without giving a reason until ${writtenDay(endsOn)}. Read it once more; the button withdraws for good.`,
+  withdrawOrder: 'The contract',
+  withdrawName: 'Your name',
+  withdrawMail: 'Your withdrawal is acknowledged, with day and time, to',
+  withdrawBack: 'You get back',
+  withdrawAfter: (sum: string) =>
+    `${sum}, postage included, once the goods are back or you show that you sent them`,
+  withdrawPosted:
+    'You send the goods back within 14 days, at your own cost. The mail that acknowledges your withdrawal says where to.',
+  withdrawButton: 'Confirm the withdrawal',
+  cannotWithdraw:
+    'You cannot withdraw from this order here where it stands now. Before the lock it is cancelled instead.',
+  sendBack: 'Send the goods back to:',
   change: 'Change what you ordered',
   changeTitle: (number: string) => `Change order ${number}`,
   changeLead:

@@ -1,6 +1,6 @@
 import 'server-only'
 import type { DueKind } from '@/lib/jobs/due-kinds'
-import { attemptLookUp, holdEnded, refundLookUp, refundRetry } from './due-money'
+import { attemptLookUp, compareBooksDue, holdEnded, refundLookUp, refundRetry } from './due-money'
 import { balanceCharge, balanceReminder, decideByPassed, orderLapse, runPage } from './due-runs'
 import { deleteUnconfirmedSignUp } from '@/lib/services/signups/delete-unconfirmed-signup'
 
@@ -23,4 +23,5 @@ export const DUE_HANDLERS: { readonly [K in DueKind]: DueHandler } = {
   order_lapse: orderLapse,
   decide_by_passed: decideByPassed,
   run_page: runPage,
+  compare_books: compareBooksDue,
 }

@@ -1,4 +1,5 @@
 import 'server-only'
+import { compareBooks } from '@/lib/services/money/compare-books'
 import { expireHold } from '@/lib/services/orders/expire-hold'
 import { settleAttempt } from '@/lib/services/payments/settle-attempt'
 import { lookUpRefund } from '@/lib/services/refunds/look-up-refund'
@@ -31,3 +32,7 @@ export const refundLookUp = async (item: DueItem, now: Date) => {
   const isOnItsWay = sent.ok && sent.value.state === 'pending'
   await orAgain(item, now, isOnItsWay ? await lookUpRefund({ refundId: item.subjectId, now }) : sent)
 }
+
+/** A workshop's books against the provider's lists, once a day; while the provider does not answer, a little later. */
+export const compareBooksDue = async (item: DueItem, now: Date) =>
+  orAgain(item, now, await compareBooks({ workshopId: item.subjectId, now }))

@@ -116,28 +116,34 @@ describe('docstrings of lib/core', () => {
     expect(files.length).toBeGreaterThan(40)
   })
 
-  test.each(files.map((path) => [relative(root, path), path]))('%s', async (_, path) => {
-    const exported = exportsOf(path)
-    const bare = exported.filter((each) => !each.documented).map((each) => each.name)
-    expect(bare, 'exports without a docstring').toEqual([])
+  test.each(files.map((path) => [relative(root, path), path]))(
+    '%s',
+    async (_, path) => {
+      const exported = exportsOf(path)
+      const bare = exported.filter((each) => !each.documented).map((each) => each.name)
+      expect(bare, 'exports without a docstring').toEqual([])
 
-    const examples = exported.flatMap((each) => each.examples)
-    if (examples.length === 0) return
-    const scope = { ...(await neighbours), ...(await load(path)) }
-    for (const example of examples) {
-      const parts = split(example)
-      if (parts === null) throw new Error(`an example reads "expression  // → value": ${example}`)
-      const actual = evaluate(parts.expression, scope)
-      const expected = evaluate(parts.value, scope)
-      if (parts.approximate) {
-        expect(Math.abs(Number(actual) - Number(expected)), `${example} (is ${actual})`).toBeLessThanOrEqual(
-          toleranceOf(parts.value),
-        )
-      } else {
-        expect(plain(actual), example).toEqual(plain(expected))
+      const examples = exported.flatMap((each) => each.examples)
+      if (examples.length === 0) return
+      const scope = { ...(await neighbours), ...(await load(path)) }
+      for (const example of examples) {
+        const parts = split(example)
+        if (parts === null) throw new Error(`an example reads "expression  // → value": ${example}`)
+        const actual = evaluate(parts.expression, scope)
+        const expected = evaluate(parts.value, scope)
+        if (parts.approximate) {
+          expect(
+            Math.abs(Number(actual) - Number(expected)),
+            `${example} (is ${actual})`,
+          ).toBeLessThanOrEqual(toleranceOf(parts.value))
+        } else {
+          expect(plain(actual), example).toEqual(plain(expected))
+        }
       }
-    }
-  })
+      // The first loads the whole core.
+    },
+    60_000,
+  )
 })
 
 describe('the index in lib/core/README.md', () => {

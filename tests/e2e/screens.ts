@@ -82,6 +82,20 @@ export const SCREENS: Readonly<Record<string, { by: Looker; at: (found: Found) =
   '/admin/[workshop]/settings/members': { by: 'owner', at: () => [`${ADMIN}/settings/members`] },
   '/admin/[workshop]/settings/postage': { by: 'owner', at: () => [`${ADMIN}/settings/postage`] },
   '/admin/[workshop]/settings/terms': { by: 'owner', at: () => [`${ADMIN}/settings/terms`] },
+  '/admin/[workshop]/orders/[order]': { by: 'owner', at: ({ order }) => [`${ADMIN}/orders/${order}`] },
+  '/admin/[workshop]/runs/[run]/orders/new': {
+    by: 'owner',
+    at: ({ rowlock }) => [`${ADMIN}/runs/${rowlock}/orders/new`],
+  },
+  '/account/orders/[order]/withdraw': {
+    by: 'receiver',
+    at: ({ posted }) => [`/account/orders/${posted}/withdraw`],
+  },
+  '/admin/[workshop]/money/books': { by: 'owner', at: () => [`${ADMIN}/money/books`] },
+  '/admin/[workshop]/runs/[run]/money': {
+    by: 'owner',
+    at: ({ fairlead }) => [`${ADMIN}/runs/${fairlead}/money`],
+  },
   '/admin/[workshop]/money/invoices': { by: 'owner', at: () => [`${ADMIN}/money/invoices`] },
   '/admin/[workshop]/money/tax': { by: 'owner', at: () => [`${ADMIN}/money/tax`] },
   '/admin/[workshop]/modules': { by: 'owner', at: () => [`${ADMIN}/modules`] },

@@ -31,4 +31,6 @@ export const money: Record<string, string> = {
   no_place:
     'There are not enough free places for more units, or others wait for them already. Order fewer, or wait until a place is free.',
   nothing_changed: 'Nothing would be different: the order is like this already.',
+  withdrawal_over:
+    'The 14 days after the last piece arrived are over, so this order can no longer be withdrawn from. Report a problem if something is wrong with it.',
 }

@@ -1,10 +1,12 @@
 import 'server-only'
 import type { OrderPageView, RefundView } from '@/lib/contracts/order-page'
 import { can, type Actor } from '@/lib/core/policy/can'
+import { formatAddress } from '@/lib/core/post/address'
 import { addDays } from '@/lib/core/time/day'
 import { dayIn } from '@/lib/core/time/zone'
 import { findOrders, type FoundOrder } from '@/lib/queries/orders/find-orders'
 import { toOrderView } from '@/lib/queries/orders/to-order-view'
+import { withdrawalOf } from '@/lib/queries/orders/withdrawal-of'
 import { type Invoice, ProviderCustomer, type Refund, TermsVersion } from '@/models'
 
 /**
@@ -23,7 +25,7 @@ export async function getOrder(asked: {
   if (!can(asked.actor, 'order:read', { workshopId, personId })) return null
   const card = await ProviderCustomer.findOne({ where: { workshopId, personId } })
   const terms = order.termsVersionId === null ? null : await TermsVersion.findByPk(order.termsVersionId)
-  const view = toOrderView(found, card)
+  const view = toOrderView(found, card, asked.now)
   // The workshop reads an order; what can be done with it here is its buyer's.
   const isOwn = asked.actor.kind === 'person' && asked.actor.personId === personId
   return {
@@ -39,6 +41,11 @@ export async function getOrder(asked: {
     balanceWhen: run.balanceWhen,
     lapseOn: lapseOnOf(found),
     personId,
+    withdrawal: withdrawalOf(order, workshop),
+    returnTo: workshop.postalAddress
+      ? formatAddress(workshop.postalAddress, { script: 'latin', from: '' })
+      : [],
+    manualReason: can(asked.actor, 'order:list', { workshopId }) ? order.manualReason : null,
     changeToPayMinor: view.can.includes('change') ? (order.changes?.[0]?.differenceMinor ?? 0) : 0,
     isDisputed: order.disputedAt !== null,
     cancelCause: order.cancelCause,

@@ -25,7 +25,7 @@ export async function listOwnOrders(asked: {
   const last = page.at(-1)?.order
   return {
     items: page.map((each) =>
-      toOrderView(each, cards.find(({ workshopId }) => workshopId === each.workshop.id) ?? null),
+      toOrderView(each, cards.find(({ workshopId }) => workshopId === each.workshop.id) ?? null, asked.now),
     ),
     next: found.length > PER_PAGE && last ? `${last.placedAt.toISOString()}_${last.id}` : null,
   }

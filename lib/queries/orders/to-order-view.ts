@@ -2,8 +2,11 @@ import 'server-only'
 import type { AddressInput } from '@/lib/contracts/address'
 import type { OrderDeed, OrderView } from '@/lib/contracts/orders'
 import { mayCancelFreely } from '@/lib/core/states/order-guards'
+import { mayWithdraw } from '@/lib/core/states/withdrawal-guards'
+import { dayIn } from '@/lib/core/time/zone'
 import type { OrderState } from '@/lib/core/states/order'
 import type { FoundOrder } from '@/lib/queries/orders/find-orders'
+import { withdrawalOf } from '@/lib/queries/orders/withdrawal-of'
 import type { ProviderCustomer } from '@/models'
 
 const UNTIL_PACKING: readonly OrderState[] = [
@@ -15,7 +18,7 @@ const UNTIL_PACKING: readonly OrderState[] = [
 ]
 
 /** An order as the API and the lists tell it; times as ISO text, money in minor units. */
-export function toOrderView(found: FoundOrder, card: ProviderCustomer | null): OrderView {
+export function toOrderView(found: FoundOrder, card: ProviderCustomer | null, now: Date): OrderView {
   const { order, run, module, workshop, parcels } = found
   return {
     id: order.id,
@@ -55,7 +58,7 @@ export function toOrderView(found: FoundOrder, card: ProviderCustomer | null): O
         state: parcel.state,
       })),
     history: historyOf(found),
-    can: deedsOf(found),
+    can: deedsOf(found, now),
   }
 }
 
@@ -84,15 +87,20 @@ function historyOf({ order, audit, parcels }: FoundOrder): OrderView['history'] 
     .map(({ at, event }) => ({ at: at.toISOString(), event }))
 }
 
-function deedsOf({ order, run, workshop }: FoundOrder): OrderDeed[] {
+function deedsOf({ order, run, workshop }: FoundOrder, now: Date): OrderDeed[] {
   const isDue = order.state === 'awaiting_deposit' || order.state === 'balance_due'
   const isCancellable =
     order.state === 'awaiting_deposit' || (order.state === 'reserved' && mayCancelFreely(run.state).ok)
   const isOpen = order.state === 'reserved' && order.kind === 'paid' && run.state === 'taking_deposits'
   const isChangeDue = isOpen && (order.changes ?? []).length > 0
+  const today = dayIn(now, workshop.timeZone)
+  const isWithdrawable =
+    order.kind === 'paid' &&
+    mayWithdraw({ run: run.state, state: order.state, today, ...withdrawalOf(order, workshop) }).ok
   return [
     ...((isDue || isChangeDue) && workshop.state === 'open' ? (['pay'] as const) : []),
     ...(isCancellable && order.disputedAt === null ? (['cancel'] as const) : []),
+    ...(isWithdrawable ? (['withdraw'] as const) : []),
     ...(order.state === 'waiting' ? (['leave'] as const) : []),
     ...(isOpen && order.disputedAt === null ? (['change'] as const) : []),
     ...(UNTIL_PACKING.includes(order.state) ? (['address'] as const) : []),

@@ -10,7 +10,7 @@ import { openParcelForOrder } from '@/lib/services/_steps/open-parcel-for-order'
 import { cardEndingOf, orderMailFacts } from '@/lib/services/_steps/order-mail-facts'
 import { promisesOf } from '@/lib/services/_steps/promises-of'
 import { queueMail } from '@/lib/services/_steps/queue-mail'
-import type { Order } from '@/models'
+import { MailOutbox, type Order } from '@/models'
 
 /** Days between the announcement of a balance and its charge. Source: product.md, Balances. */
 const NOTICE_DAYS = 7
@@ -35,7 +35,7 @@ export async function askBalance(
     dueMinor: order.balanceMinor,
     disputed: order.disputedAt !== null,
   })
-  if (may.ok) return announce(tx, order, byPersonId, now)
+  if (may.ok) return announceBalance(tx, order, { event: 'ask_balance', byPersonId, now })
   if (may.reason !== 'nothing_due') return refuse(may.reason)
   const moved = await moveOrder(tx, order, 'nothing_due', { now, byPersonId })
   if (!moved.ok) return moved
@@ -43,15 +43,19 @@ export async function askBalance(
   return ok(true)
 }
 
-async function announce(
+/**
+ * Tells one buyer what is charged and when, and sets it due; also for an order the owner takes up again.
+ * Refuses: not_allowed. The caller has locked run and order. Writes: order, due row, mail, audit. Repeat: refused.
+ */
+export async function announceBalance(
   tx: Transaction,
   order: Order,
-  byPersonId: string | null,
-  now: Date,
+  by: { event: 'ask_balance' | 'reinstate'; byPersonId: string | null; now: Date },
 ): Promise<Result<true, 'not_allowed'>> {
+  const { event, byPersonId, now } = by
   const chargeAt = new Date(now.getTime() + NOTICE_DAYS * 86_400_000)
   const change = { balanceAskedAt: now, balanceChargeAt: chargeAt, balanceFailedAt: null }
-  const moved = await moveOrder(tx, order, 'ask_balance', { now, byPersonId, change })
+  const moved = await moveOrder(tx, order, event, { now, byPersonId, change })
   if (!moved.ok) return moved
   const { id: subjectId, workshopId, personId, currency, balanceMinor } = order
   await setDue(tx, { kind: 'balance_charge', subjectId, workshopId, at: chargeAt })
@@ -61,6 +65,7 @@ async function announce(
     workshopId,
     personId,
     subjectId,
+    version: await nextVersion(tx, subjectId),
     props: {
       ...ofOrder,
       currency,
@@ -74,3 +79,7 @@ async function announce(
   })
   return ok(true)
 }
+
+/** One announcement per time it is asked for. */
+const nextVersion = async (tx: Transaction, subjectId: string) =>
+  (await MailOutbox.count({ where: { kind: 'balance_coming', subjectId }, transaction: tx })) + 1

@@ -5,12 +5,13 @@ import type { OrderState } from '@/lib/core/states/order'
 import { dropDue } from '@/lib/jobs/set-due'
 import { dropBalanceDues } from '@/lib/services/_steps/balance-dues'
 import { discardParcels } from '@/lib/services/_steps/discard-parcels'
+import { leftOf } from '@/lib/services/_steps/left-of'
 import { lockOrder } from '@/lib/services/_steps/lock-order'
 import { LIVE } from '@/lib/services/_steps/move-attempt'
 import { moveOrder } from '@/lib/services/_steps/move-order'
 import { orderMailFacts } from '@/lib/services/_steps/order-mail-facts'
 import { queueMail } from '@/lib/services/_steps/queue-mail'
-import { refundOrder, repaidOf } from '@/lib/services/_steps/refund-order'
+import { refundOrder } from '@/lib/services/_steps/refund-order'
 import { releasePlace } from '@/lib/services/_steps/release-place'
 import { type Order, PaymentAttempt } from '@/models'
 import type { CallOffCause } from '@/models/words'
@@ -60,17 +61,6 @@ export async function callOffOrder(
   await refundOrder(tx, { order, why: 'run_called_off', now, reason: cause === 'owner' ? reason : null })
   await tell(tx, order, given, owedMinor)
   return ok(true)
-}
-
-/** What was taken and has not gone back; of a disputed order it goes back once the bank has decided. */
-async function leftOf(tx: Transaction, order: Order): Promise<number> {
-  const captured = await PaymentAttempt.findAll({
-    where: { orderId: order.id, state: 'captured' },
-    transaction: tx,
-  })
-  let left = 0
-  for (const attempt of captured) left += attempt.amountMinor - (await repaidOf(tx, attempt))
-  return left
 }
 
 async function tell(tx: Transaction, order: Order, given: Given, refundMinor: number): Promise<void> {

@@ -25,6 +25,12 @@ export async function issuePrepayment(
   return writePrepayment(tx, { order, attemptId: attempt.id, purpose: attempt.purpose, parts, now })
 }
 
+/** The same for an order that was paid outside the provider. Writes: one invoice, one transfer. Repeat: issues another. */
+export async function issueOutsidePrepayment(tx: Transaction, order: Order, now: Date): Promise<Invoice> {
+  const parts = await partsOfOrder(tx, order)
+  return writePrepayment(tx, { order, attemptId: null, purpose: 'outside', parts, now })
+}
+
 async function writePrepayment(
   tx: Transaction,
   given: { order: Order; attemptId: string | null; purpose: string; parts: TaxPart[]; now: Date },

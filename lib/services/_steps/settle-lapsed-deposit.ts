@@ -6,7 +6,7 @@ import { creditStanding } from '@/lib/services/_steps/credit-note'
 import { depositThen } from '@/lib/services/_steps/deposit-then'
 import { postLedger } from '@/lib/services/_steps/post-ledger'
 import { refundOrder, repaidOf } from '@/lib/services/_steps/refund-order'
-import { type Order, PaymentAttempt } from '@/models'
+import { LedgerTransfer, type Order, PaymentAttempt } from '@/models'
 
 /**
  * Gives a lapsed order's deposit back, or books it as kept where terms and law allow that. A kept deposit counts as
@@ -30,9 +30,14 @@ export async function settleLapsedDeposit(
   let amount = 0
   for (const attempt of captured) amount += attempt.amountMinor - (await repaidOf(tx, attempt))
   if (amount === 0) return then
+  const nth = await LedgerTransfer.count({
+    where: { orderId: order.id, kind: 'deposit_kept' },
+    transaction: tx,
+  })
   await postLedger(tx, {
     workshopId: order.workshopId,
-    source: 'order',
+    // An order taken up again may lapse again, and the books take one movement of a kind per source.
+    source: nth === 0 ? 'order' : `order_${nth + 1}`,
     sourceId: order.id,
     kind: 'deposit_kept',
     orderId: order.id,

@@ -5,6 +5,7 @@ import type { ProviderChange } from '@/lib/gateways/payments/changes'
 import { readEvent } from '@/lib/gateways/payments/read-event'
 import { attemptOfChange } from '@/lib/services/_steps/attempt-of-change'
 import { recordDispute } from '@/lib/services/_steps/record-dispute'
+import { recordPayout } from '@/lib/services/_steps/record-payout'
 import { recordRefundNews } from '@/lib/services/_steps/record-refund-news'
 import { settle } from '@/lib/services/_steps/settle-attempt'
 import { ProviderEvent } from '@/models'
@@ -65,6 +66,7 @@ async function apply(
     case 'account_lost':
       return ok('account')
     case 'payout_changed':
+      return ok(await recordPayout(account, change, now))
     case 'ignored':
       return ok('ignored')
   }

@@ -2,7 +2,8 @@ import 'server-only'
 import { ok, refuse } from '@/lib/core/result'
 import { inTransaction } from '@/lib/db/in-transaction'
 import { payments } from '@/lib/gateways/payments'
-import { Workshop } from '@/models'
+import { setDue } from '@/lib/jobs/set-due'
+import { DueItem, Workshop } from '@/models'
 
 /**
  * Asks the provider what the workshop's account may do and writes it down; sets payouts to manual once cards may be
@@ -36,6 +37,12 @@ export async function refreshPaymentAccount(cmd: { account: string; now: Date })
       },
       { transaction: tx },
     )
+    const { id: workshopId } = workshop
+    const known = { kind: 'compare_books', subjectId: workshopId, doneAt: null }
+    if (facts.value.chargesEnabled && (await DueItem.count({ where: known, transaction: tx })) === 0) {
+      const at = new Date(cmd.now.getTime() + 86_400_000)
+      await setDue(tx, { kind: 'compare_books', subjectId: workshopId, workshopId, at })
+    }
     return ok({ chargesEnabled: facts.value.chargesEnabled, payoutsManual: isManual })
   })
 }

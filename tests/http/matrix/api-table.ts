@@ -34,6 +34,15 @@ export const API_TABLE: Readonly<Record<string, Row>> = {
   'POST /api/admin/[workshop]/settings/terms': '401 404 422 404 404 404 404',
   // The account of the small world is not in the provider's books: the owner gets as far as the provider.
   'POST /api/admin/[workshop]/payment-account': '401 404 409 404 404 404 404',
+  'POST /api/admin/[workshop]/orders/[order]/cancel': '401 404 422 404 404 404 404',
+  'POST /api/admin/[workshop]/orders/[order]/reinstate': '401 404 409 404 404 404 404',
+  'POST /api/admin/[workshop]/orders/[order]/return': '401 404 409 404 409 404 404',
+  'POST /api/admin/[workshop]/runs/[run]/orders': '401 404 422 404 404 404 404',
+  'POST /api/orders/[order]/withdraw': '401 409 404 404 404 404 404',
+  // Without a month; the account of the small world is not in the provider's books.
+  'GET /api/admin/[workshop]/ledger.csv': '401 404 422 404 404 404 404',
+  'POST /api/admin/[workshop]/money/compare': '401 404 409 404 404 404 404',
+  'POST /api/admin/[workshop]/money/resolve': '401 404 422 404 404 404 404',
   'GET /api/admin/[workshop]/tax.csv': '401 404 200 404 404 404 404',
   'GET /api/invoices/[invoice]/paper.pdf': '401 200 200 404 404 404 404',
   'GET /api/admin/[workshop]/bulk/[bulk]': '401 404 200 404 404 404 404',

@@ -1,16 +1,19 @@
 import { afterAll, beforeEach, describe, expect, test } from 'vitest'
+import { passTime } from '@/lib/gateways/payments/fake/pass-time'
 import { closeSandboxPool } from '@/lib/gateways/payments/fake/pool'
 import { getTaxReport } from '@/lib/queries/money/get-tax-report'
 import { getInvoicePaper } from '@/lib/queries/invoices/get-invoice-paper'
 import { cancelOrder } from '@/lib/services/orders/cancel-order'
+import { resolveStuck } from '@/lib/services/money/resolve-stuck'
 import { setAddress } from '@/lib/services/orders/set-address'
 import { payOrder } from '@/lib/services/payments/pay-order'
 import { askBalances } from '@/lib/services/runs/ask-balances'
 import { handOverParcel } from '@/lib/services/packing/hand-over-parcel'
 import { packParcel } from '@/lib/services/packing/pack-parcel'
-import { Invoice, MailOutbox, type Order, OrderLine, Parcel, TaxRate } from '@/models'
+import { Invoice, MailOutbox, type Order, OrderLine, Parcel, Refund, TaxRate } from '@/models'
 import { runJobs } from '@/tests/support/run-jobs'
-import { NOW } from '@/tests/support/worlds/base'
+import { setBusinessTime } from '@/tests/support/business-time'
+import { hoursAfter, NOW } from '@/tests/support/worlds/base'
 import { booksOf, CARD, moneyWorld, pay, reserved, settleAll } from '@/tests/support/worlds/money'
 import { actorOf } from '@/tests/support/worlds/person'
 
@@ -172,6 +175,18 @@ describe('where tax falls due on arrival', () => {
     const { order, actor } = await reserved(world.run, {}, CARD.refundFails)
     await cancelOrder({ actor, orderId: order.id, now: NOW })
     await settleAll()
+    await setBusinessTime(hoursAfter(NOW, 25))
+    await passTime()
+    await settleAll()
+    const failed = await Refund.findOne({
+      where: { orderId: order.id, state: 'failed' },
+      rejectOnEmpty: true,
+    })
+    const input = { kind: 'refund', id: failed.id } as const
+    const again = { actor: await actorOf(world.owner), workshopId: world.workshop.id, input, now: NOW }
+    expect(await resolveStuck(again)).toMatchObject({ ok: true })
+    await settleAll()
+    expect(await Refund.count({ where: { orderId: order.id } })).toBe(2)
     expect((await papersOf(order)).filter(({ kind }) => kind === 'credit_note')).toHaveLength(1)
     await expectReportIsLedger()
   })

@@ -14,7 +14,7 @@ export default async function DeskLayout({ params, children }: Props) {
     { href: paths.admin(slug), label: words.today },
     { href: paths.adminModules(slug), label: words.modules },
     { href: paths.adminRuns(slug), label: words.runs },
-    { href: paths.adminMoney(slug, 'invoices'), label: words.money },
+    { href: paths.adminMoney(slug, 'books'), label: words.money },
     { href: paths.adminSettings(slug), label: words.settings },
     { href: paths.packing(slug), label: words.packing },
   ]

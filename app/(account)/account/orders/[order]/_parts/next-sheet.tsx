@@ -1,4 +1,5 @@
 import { CheckPayment } from '@/components/order/check-payment'
+import { AddressLines } from '@/components/parcel/address-lines'
 import { Button, ButtonRow, LinkButton } from '@/components/ui/button'
 import { DeedForm } from '@/components/ui/form'
 import { Notice } from '@/components/ui/notice'
@@ -47,6 +48,12 @@ export function NextSheet({ order, hasReturned, refusal }: Props) {
           </Notice>
         ) : null}
         <NextWords order={order} />
+        {order.state === 'withdrawn' && order.returnTo.length > 0 ? (
+          <div>
+            <p className="text-15 text-quiet">{words.sendBack}</p>
+            <AddressLines lines={order.returnTo} />
+          </div>
+        ) : null}
         {order.changeToPayMinor > 0 ? (
           <p>{words.changeOpen(formatMoney(order.changeToPayMinor, order.currency, LOCALE))}</p>
         ) : null}
@@ -63,6 +70,11 @@ export function NextSheet({ order, hasReturned, refusal }: Props) {
           ) : null}
           {can('address') ? (
             <LinkButton href={paths.accountOrderAddress(order.id)}>{words.changeAddress}</LinkButton>
+          ) : null}
+          {can('withdraw') ? (
+            <LinkButton kind="plain" href={paths.accountOrderWithdraw(order.id)}>
+              {words.withdraw}
+            </LinkButton>
           ) : null}
           {can('cancel') || can('leave') ? (
             <LinkButton kind="plain" href={paths.accountOrderCancel(order.id)}>

@@ -6,10 +6,15 @@ import type { InvoiceListItem } from '@/lib/contracts/money-desk'
 import { moneyWords as words } from '@/lib/messages/money-desk'
 import { paths } from '@/lib/paths'
 
-type Props = { list: { items: InvoiceListItem[]; next: string | null }; here: string; isFirst: boolean }
+type Props = {
+  slug: string
+  list: { items: InvoiceListItem[]; next: string | null }
+  here: string
+  isFirst: boolean
+}
 
 /** Numbered papers, each a link to its PDF, beside the order it is about. */
-export function InvoiceTable({ list, here, isFirst }: Props) {
+export function InvoiceTable({ slug, list, here, isFirst }: Props) {
   return (
     <Table
       caption={words.invoicesCaption}
@@ -32,7 +37,7 @@ export function InvoiceTable({ list, here, isFirst }: Props) {
           key: 'order',
           heading: words.order,
           cell: (row) => (
-            <a href={paths.accountOrder(row.order)} className="figures inline-flex min-h-6">
+            <a href={paths.adminOrder(slug, row.order)} className="figures inline-flex min-h-6">
               {row.orderNumber}
             </a>
           ),

@@ -3,7 +3,7 @@ import { Tabs } from '@/components/ui/tabs'
 import { moneyWords as words } from '@/lib/messages/money-desk'
 import { paths } from '@/lib/paths'
 
-type Props = { slug: string; current: 'invoices' | 'tax'; lead: string }
+type Props = { slug: string; current: 'books' | 'invoices' | 'tax'; lead: string }
 
 /** The head of the pages about money, with the way between them. */
 export function MoneyHead({ slug, current, lead }: Props) {
@@ -13,6 +13,7 @@ export function MoneyHead({ slug, current, lead }: Props) {
       <Tabs
         label={words.pages}
         tabs={[
+          { href: paths.adminMoney(slug, 'books'), label: words.books, current: current === 'books' },
           {
             href: paths.adminMoney(slug, 'invoices'),
             label: words.invoices,

@@ -19,7 +19,7 @@ export default async function InvoicesPage({ params, searchParams }: Props) {
   return (
     <>
       <MoneyHead slug={slug} current="invoices" lead={words.invoicesLead} />
-      <InvoiceTable list={list} here={here} isFirst={before === undefined} />
+      <InvoiceTable slug={slug} list={list} here={here} isFirst={before === undefined} />
     </>
   )
 }

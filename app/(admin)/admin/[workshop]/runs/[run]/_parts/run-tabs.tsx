@@ -1,9 +1,10 @@
 import { Tabs } from '@/components/ui/tabs'
+import { moneyWords } from '@/lib/messages/money-desk'
 import { runWords as words } from '@/lib/messages/runs'
 import { unitWords } from '@/lib/messages/units'
 import { paths } from '@/lib/paths'
 
-type Props = { workshop: string; run: string; current: 'run' | 'costs' | 'orders' | 'units' }
+type Props = { workshop: string; run: string; current: 'run' | 'costs' | 'orders' | 'units' | 'money' }
 
 /** The pages of a run, side by side. */
 export function RunTabs({ workshop, run, current }: Props) {
@@ -26,6 +27,11 @@ export function RunTabs({ workshop, run, current }: Props) {
           href: paths.adminRunUnits(workshop, run),
           label: unitWords.title,
           current: current === 'units',
+        },
+        {
+          href: paths.adminRunPage(workshop, run, 'money'),
+          label: moneyWords.title,
+          current: current === 'money',
         },
       ]}
     />

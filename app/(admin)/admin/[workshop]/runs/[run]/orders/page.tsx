@@ -1,8 +1,10 @@
 import type { Metadata } from 'next'
 import { z } from 'zod'
+import { ButtonRow, LinkButton } from '@/components/ui/button'
 import { PageHead } from '@/components/ui/page-head'
 import { ORDER_MOVES } from '@/lib/core/states/order'
 import { statesOf } from '@/lib/core/states/next'
+import { moneyWords } from '@/lib/messages/money-desk'
 import { runWords as words } from '@/lib/messages/runs'
 import { paths } from '@/lib/paths'
 import { listRunOrders } from '@/lib/queries/runs/list-run-orders'
@@ -36,6 +38,11 @@ export default async function RunOrdersPage({ params, searchParams }: Props) {
         trail={[{ href: paths.adminRuns(workshop), label: words.title }]}
       />
       <RunTabs workshop={workshop} run={run} current="orders" />
+      {page.state === 'taking_deposits' || page.state === 'locked' ? (
+        <ButtonRow>
+          <LinkButton href={paths.adminOrderNew(workshop, run)}>{moneyWords.enter}</LinkButton>
+        </ButtonRow>
+      ) : null}
       <OrderTable page={page} list={list} here={here} {...query} />
     </>
   )

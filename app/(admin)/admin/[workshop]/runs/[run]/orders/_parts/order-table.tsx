@@ -5,6 +5,7 @@ import { withParams } from '@/components/ui/with-params'
 import type { RunOrderItem, RunPage } from '@/lib/contracts/run-page'
 import { countryName } from '@/lib/core/data/country'
 import { runWords as words } from '@/lib/messages/runs'
+import { paths } from '@/lib/paths'
 
 type Props = {
   page: RunPage
@@ -27,7 +28,15 @@ export function OrderTable({ page, list, here, state, before }: Props) {
       firstHref={before === undefined ? undefined : withParams(here, { state }, {})}
       nextHref={list.next === null ? undefined : withParams(here, { state }, { before: String(list.next) })}
       columns={[
-        { key: 'number', heading: words.order, cell: (row) => <span className="figures">{row.number}</span> },
+        {
+          key: 'number',
+          heading: words.order,
+          cell: (row) => (
+            <a href={paths.adminOrder(workshop.slug, row.id)} className="figures inline-flex min-h-6">
+              {row.number}
+            </a>
+          ),
+        },
         { key: 'buyer', heading: words.buyer, cell: (row) => row.name ?? '–' },
         { key: 'country', heading: words.country, cell: (row) => countryName(row.country) },
         {
