@@ -1,9 +1,18 @@
 import { beforeAll, describe, expect, test } from 'vitest'
 import type { Actor } from '@/lib/core/policy/can'
+import { depositPaid } from '@/lib/core/ledger/entries'
+import { ok } from '@/lib/core/result'
+import { inTransaction } from '@/lib/db/in-transaction'
 import { sequelize } from '@/lib/db/sequelize'
+import { postLedger } from '@/lib/services/_steps/post-ledger'
+import { makeAttempt, makeInvoice } from '@/tests/support/worlds/payment'
 import { listOwnSignUps } from '@/lib/queries/account/list-own-sign-ups'
 import { getBulk } from '@/lib/queries/bulk/get-bulk'
 import { listWorkshops } from '@/lib/queries/host/list-workshops'
+import { listInvoices } from '@/lib/queries/invoices/list-invoices'
+import { getMoneyDesk } from '@/lib/queries/money/get-money-desk'
+import { getStatement } from '@/lib/queries/money/get-statement'
+import { getTaxReport } from '@/lib/queries/money/get-tax-report'
 import { listMembers } from '@/lib/queries/members/list-members'
 import { getPartsDesk } from '@/lib/queries/modules-admin/get-parts-desk'
 import { listModules } from '@/lib/queries/modules-admin/list-modules'
@@ -26,7 +35,7 @@ import { listRunOrders } from '@/lib/queries/runs/list-run-orders'
 import { listRuns } from '@/lib/queries/runs/list-runs'
 import { getDesk } from '@/lib/queries/workshops/get-desk'
 import { BulkItem, BulkJob, PackBatch, Part, type Person, RevisionLine } from '@/models'
-import { NOW, serial } from '@/tests/support/worlds/base'
+import { hoursAfter, NOW, serial } from '@/tests/support/worlds/base'
 import { makeModule } from '@/tests/support/worlds/module'
 import { makeAddress, makeOrder } from '@/tests/support/worlds/order'
 import { makeParcel, makeUnit } from '@/tests/support/worlds/parcel'
@@ -93,6 +102,24 @@ async function addRow(): Promise<void> {
     packerPersonId: (world as unknown as { owner: Person }).owner.id,
   })
   await makeUnit(run)
+  await makeInvoice(paid.order)
+  await makeAttempt(paid.order, {
+    purpose: `change-${serial()}`,
+    state: 'unknown',
+    requestedAt: hoursAfter(NOW, -1),
+  })
+  await inTransaction(async (tx) => {
+    const { id: orderId, currency } = paid.order
+    const source = {
+      workshopId,
+      source: 'order',
+      sourceId: orderId,
+      kind: 'deposit_paid',
+      orderId,
+      runId: run.id,
+    }
+    return ok(await postLedger(tx, { ...source, at: NOW, entries: depositPaid({ amount: 2500, currency }) }))
+  })
   await module.reload()
 }
 
@@ -167,6 +194,10 @@ const LISTS: Readonly<
   'contents in the queue': { ask: () => listPackGroups(asked()), rows: () => 5 },
   batches: { ask: () => listBatches(asked()), most: 20 },
   'units of a run': { ask: () => listRunUnits({ ...asked(), runId: world.run.id }) },
+  'invoices of a workshop': { ask: () => listInvoices(asked()) },
+  'what is stuck': { ask: () => getMoneyDesk(asked()) },
+  'statement of a run': { ask: () => getStatement({ ...asked(), runId: world.run.id }) },
+  'tax of a year': { ask: () => getTaxReport(asked()), rows: () => 5 },
   'packed parcels': { ask: () => listPackedParcels({ ...asked(), show: 'packed' }) },
   'stopped orders': { ask: () => listStoppedOrders(asked()) },
   'summary of packing': {

@@ -2,6 +2,7 @@ import 'server-only'
 import type { Transaction } from 'sequelize'
 import type { PaymentFacts } from '@/lib/gateways/payments/types'
 import { dropDue } from '@/lib/jobs/set-due'
+import { askBalance } from '@/lib/services/_steps/ask-balance'
 import { modulePageChanged } from '@/lib/services/_steps/module-page-changed'
 import { moveOrder } from '@/lib/services/_steps/move-order'
 import { mailContract } from '@/lib/services/_steps/mail-contract'
@@ -11,7 +12,7 @@ import type { LockedPayment } from '@/lib/services/_steps/locked-payment'
 
 /**
  * A deposit counts: the order is reserved (one whose hold had ended takes its place again), the card is remembered for
- * the balance, and the buyer gets the contract on paper.
+ * the balance, and the buyer gets the contract on paper. In a run whose balances were asked for, this one is asked for too.
  * Run and order are locked by the caller. Writes: order, counts, saved card, mail, page. Repeat: not safe; called once
  * per capture.
  */
@@ -29,4 +30,7 @@ export async function acceptDeposit(
   await dropDue(tx, 'hold_ended', order.id)
   await saveCard(tx, order, payment, now)
   await mailContract(tx, order, { version: 1, now })
+  // Whoever gets a freed place after balances were asked for is asked too.
+  if (run.state === 'locked' && run.balancesAskedAt !== null)
+    await askBalance(tx, { orderId: order.id, byPersonId: null, now })
 }

@@ -158,6 +158,23 @@ describe('money that is not what was asked for', () => {
     expect(await booksOf(world.workshop.id)).toEqual({ provider_balance: -63, fees_lost_on_refunds: 63 })
   })
 
+  test('another currency goes back whole, and the order keeps waiting', async () => {
+    const { order, payUrl } = await placed(world.run)
+    const [attempt] = await attemptsOf(order)
+    await attempt!.update({ currency: 'USD' })
+    await pay(payUrl)
+    await settleAll()
+    expect((await order.reload()).state).toBe('awaiting_deposit')
+    expect(await attempt!.reload()).toMatchObject({
+      state: 'captured',
+      currency: 'EUR',
+      surplusAt: expect.any(Date),
+    })
+    expect(await Refund.findAll({ where: { orderId: order.id } })).toMatchObject([
+      { cause: 'surplus', amountMinor: 2_500, currency: 'EUR', state: 'succeeded' },
+    ])
+  })
+
   test('a second deposit for an order that has one goes back', async () => {
     const { order } = await reserved(world.run)
     const [first] = await attemptsOf(order)

@@ -15,19 +15,22 @@ import { makeRun } from './run'
 import { makeWorkshop } from './workshop'
 
 /** A workshop whose account is in the provider's books, with a run of 3 to 5 that takes deposits; it is NOW. */
-export async function moneyWorld(over: Parameters<typeof makeRun>[1] = {}) {
+export async function moneyWorld(
+  over: Parameters<typeof makeRun>[1] = {},
+  { currency = 'EUR', country = 'DE' }: { currency?: string; country?: string } = {},
+) {
   await setBusinessTime(NOW)
   const made = await payments().createAccount({
     key: `account-${serial()}-${Math.random()}`,
     workshopId: `workshop-${serial()}`,
-    country: 'DE',
-    currency: 'EUR',
+    country,
+    currency,
     email: 'owner@workshop.example',
     name: 'Workshop',
   })
   if (!made.ok) throw new Error(made.reason)
   await finishOnboarding(made.value.account)
-  const house = await makeWorkshop({ providerAccountId: made.value.account })
+  const house = await makeWorkshop({ providerAccountId: made.value.account, currency, country })
   const rate = { workshopId: null, country: 'DE', validFrom: '2021-01-01' }
   await TaxRate.findOrCreate({ where: { ...rate, basisPoints: 1900 } })
   const design = await makeModule(house.workshop)
