@@ -18,7 +18,7 @@ const BOOKED = `
     left join disputes d on t.source = 'dispute' and d.id::text = t.source_id
     left join payment_attempts p on p.id = d.attempt_id
     where t.workshop_id = $workshopId group by t.id, e.currency, a.id, r.id, p.id)
-  select * from moved where object = any($ids) or at >= $since order by at`
+  select * from moved where object = any($ids) or at >= $since order by at, kind, object`
 
 type Row = { kind: string; source: string; at: Date; currency: string; amount: number; object: string | null }
 

@@ -194,7 +194,7 @@ describe('an order that is somebody’s', () => {
         paidMinor: 2_500,
         refundedMinor: 0,
         currency: 'EUR',
-        can: ['cancel', 'address'],
+        can: ['cancel', 'change', 'address'],
         lines: [{ offer: 'kit', quantity: 1, priceMinor: 9_500, postedBy: '2027-08-31' }],
       },
     ])

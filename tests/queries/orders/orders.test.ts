@@ -77,7 +77,7 @@ describe('an order’s page', () => {
     expect(own).toMatchObject({
       state: 'reserved',
       paidMinor: 2_500,
-      can: ['cancel', 'address'],
+      can: ['cancel', 'change', 'address'],
       timeZone: 'Europe/Berlin',
     })
     expect(await getOrder({ actor: await actorOf(owner), orderId: order.id, now: NOW })).toMatchObject({
