@@ -4,6 +4,8 @@
  */
 const part = encodeURIComponent
 
+type PaperKind = 'labels' | 'customs' | 'invoices' | 'returns' | 'bags' | 'hand-over'
+
 export const paths = {
   home: '/',
   start: '/start',
@@ -70,7 +72,8 @@ export const paths = {
   packing: (workshop: string) => `/packing/${part(workshop)}`,
   packingParcel: (workshop: string, parcel: string) => `/packing/${part(workshop)}/parcels/${part(parcel)}`,
   packingBatch: (workshop: string, batch: string) => `/packing/${part(workshop)}/batches/${part(batch)}`,
-  packingPapers: (workshop: string, paper: 'list' | 'slips') => `/packing/${part(workshop)}/papers/${paper}`,
+  packingPapers: (workshop: string, paper: PaperKind | 'list' | 'slips') =>
+    `/packing/${part(workshop)}/papers/${paper}`,
   packingSlip: (workshop: string, parcel: string) =>
     `/packing/${part(workshop)}/parcels/${part(parcel)}/slip`,
   host: '/host',
@@ -157,6 +160,7 @@ export const paths = {
     packingBatchReturn: (workshop: string, batch: string) =>
       `/api/packing/${part(workshop)}/batches/${part(batch)}/return`,
     adminRunUnits: (workshop: string, run: string) => `/api/admin/${part(workshop)}/runs/${part(run)}/units`,
+    packingPaper: (workshop: string, paper: PaperKind) => `/api/packing/${part(workshop)}/papers/${paper}`,
     packingFill: (workshop: string) => `/api/packing/${part(workshop)}/fill`,
     packingList: (workshop: string) => `/api/packing/${part(workshop)}/list.pdf`,
     packingSlips: (workshop: string) => `/api/packing/${part(workshop)}/slips.pdf`,

@@ -31,6 +31,7 @@ export type OfferDesk = {
   customsDescription: string
   customsCode: string
   customsOrigin: string | null
+  storagePlace: string
   cautions: string
   ageFrom: number
   withdrawn: boolean

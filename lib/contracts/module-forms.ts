@@ -118,6 +118,7 @@ export const OfferInput = z
       z.string().regex(/^(\d{6,12})?$/, 'Enter six to twelve digits, or leave it empty.'),
     ),
     customsOrigin: blank(assignedCountry),
+    storagePlace: z.preprocess((typed) => typed ?? '', z.union([z.literal(''), line(40)])),
     cautions: paragraphs(5000),
     ageFrom: wholeNumber(0, 99, 'Enter an age in years, from 0 to 99.'),
     withdrawn: tick,

@@ -168,6 +168,19 @@ export type ParcelPage = {
   batch: { id: string; name: string } | null
 }
 
+export const PAPER_KINDS = ['labels', 'customs', 'invoices', 'returns', 'bags', 'hand-over'] as const
+export type PaperKind = (typeof PAPER_KINDS)[number]
+export const paperKind = z.enum(PAPER_KINDS)
+export const SHEET_SIZES = ['A4', 'Letter'] as const
+export const LABEL_SIZES = ['A6', '100x150', '4x6', 'roll62'] as const
+
+/** Papers of parcels: of one parcel, of a batch, or of the queue as it is filtered. */
+export const ParcelPaperQuery = QueueQuery.extend({
+  parcel: unlessEmpty(uuid),
+  size: unlessEmpty(z.enum([...SHEET_SIZES, ...LABEL_SIZES], { error: 'Choose one of the sizes of paper.' })),
+})
+export type ParcelPaperQuery = z.infer<typeof ParcelPaperQuery>
+
 /** Which papers are wanted; sizes as in the printer. */
 export const PaperQuery = QueueQuery.extend({
   size: unlessEmpty(z.enum(['A4', 'Letter'], { error: 'Choose A4 or Letter.' })),

@@ -1,7 +1,10 @@
 import type { OfferKind } from '@/lib/contracts/fields'
+import type { SlipLanguage } from '@/lib/core/post/slip-language'
 import type { Day } from '@/lib/core/brand'
+import type { CustomsLine, DeclarationProblem } from '@/lib/core/post/customs'
 
 export type PaperSize = 'A4' | 'Letter'
+export type LabelSize = 'A6' | '100x150' | '4x6' | 'roll62'
 
 /** What stands in the title block of every sheet beside "sheet n of m". */
 export type PaperIssue = {
@@ -9,7 +12,7 @@ export type PaperIssue = {
   /** Who had it made. */
   printedBy: string
   printedOn: Day
-  size: PaperSize
+  size: PaperSize | LabelSize
 }
 
 /** One thing to be put into a parcel, as it was ordered. */
@@ -21,6 +24,8 @@ export type PaperLine = {
   choices: readonly string[]
   /** Serial numbers of the very pieces; empty where none are recorded. */
   serials: readonly string[]
+  /** Where finished ones stand on the shelf; empty or left out if nowhere. */
+  place?: string
 }
 
 export type FulfilmentOrder = {
@@ -47,6 +52,8 @@ export type PackingSlip = {
   /** This parcel among those of the order, both from 1. */
   parcel: { nth: number; of: number }
   isReplacement: boolean
+  /** Of its fixed words. */
+  language: SlipLanguage
   /** Lines of the label in Latin letters, with the country line. */
   to: readonly string[]
   /** The same in the buyer's own script; null where it is the same. */
@@ -101,4 +108,53 @@ export type InvoiceView = {
   grossMinor: number
   taxMinor: number
   currency: string
+}
+
+/** What customs must know of a parcel; `form` none: it crosses no customs border. */
+export type ParcelCustoms = {
+  form: 'none' | 'CN22' | 'CN23'
+  lines: readonly CustomsLine[]
+  valueMinor: number
+  currency: string
+  /** What is missing before it may be labelled, worst first. */
+  problems: readonly DeclarationProblem[]
+  /** Who pays what falls due on arrival. */
+  duties: 'none' | 'buyer_pays' | 'prepaid' | 'refused'
+}
+
+/** Everything the papers of one parcel state. */
+export type ParcelPaper = {
+  parcel: string
+  number: number
+  orderNumber: string
+  place: { nth: number; of: number }
+  isReplacement: boolean
+  /** Label lines in Latin letters, with the country line. */
+  to: readonly string[]
+  toOwnScript: readonly string[] | null
+  country: string
+  phone: string | null
+  taxNumber: string | null
+  service: string | null
+  tracking: string | null
+  /** On the scale, or what it should weigh; null where nobody knows. */
+  grams: number | null
+  lines: readonly PaperLine[]
+  customs: ParcelCustoms
+}
+
+/** Papers of parcels, and what every one of them says of its maker. */
+export type ParcelPapers = Omit<PaperIssue, 'size'> & {
+  from: readonly string[]
+  fromPhone: string | null
+  fromTaxNumber: string | null
+  parcels: readonly ParcelPaper[]
+}
+
+/** What goes into one bag of a kit, and how many such bags. */
+export type BagList = {
+  what: string
+  choices: readonly string[]
+  bags: number
+  parts: readonly { quantity: number; name: string; value: string; place: string; designators: string }[]
 }

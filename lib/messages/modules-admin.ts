@@ -110,6 +110,8 @@ export const modulesAdminWords = {
   customsCode: 'Tariff code',
   customsCodeHint: 'Headings of such goods are disputed; ask your customs or your post.',
   customsOrigin: 'Country of origin',
+  storagePlace: 'Storage place',
+  storagePlaceHint: 'Where finished ones stand. Pick lists go along these places.',
   offerCautions: 'Cautions of this form',
   ageFrom: 'Youngest age it is meant for',
   years: 'years',

@@ -114,8 +114,6 @@ export const packingWords = {
       `${orders(count)} handed over; each buyer has had their mail. Take the next batch, or stop for today.`,
     closed: 'This batch is closed.',
     next: 'Pack the next one',
-    slips: 'Packing slips of this batch',
-    list: 'Fulfilment list of this batch',
     toQueue: 'To the queue',
     contains: 'Still to pack, oldest promise first',
     nothingLeft: 'Everything of this batch is packed. Hand it over below.',

@@ -15,27 +15,12 @@ export const papers = {
     name: 'Fulfilment list',
     summary: (orderCount: number, unitCount: number) =>
       `${orders(orderCount)}, ${units(unitCount)}, oldest promise first. Orders of the same contents stand together.`,
-    pick: 'To take from the shelf',
+    pick: 'To take from the shelf, place by place',
+    place: (place: string) => `[${place}]`,
     continued: (contents: string) => `${contents} (continued)`,
     same: (count: number) => `The same in ${orders(count)}`,
     nothing: 'Nothing waits to be packed.',
     note: 'Mind:',
-  },
-  slip: {
-    name: 'Packing slip',
-    order: (number: string) => `Order ${number}`,
-    parcel: (nth: number, of: number) => (of === 1 ? 'The whole order' : `Parcel ${nth} of ${of}`),
-    replacement: 'Replacement',
-    from: 'From',
-    to: 'To',
-    ownScriptLeftOut:
-      'The address in the buyer’s own script is on the screen; this paper has no letters for it.',
-    columns: { quantity: 'Quantity', thing: 'What' },
-    serials: (list: readonly string[]) =>
-      `${list.length === 1 ? 'Serial number' : 'Serial numbers'} ${list.join(', ')}`,
-    more: 'The rest of the order comes in another parcel.',
-    problem: 'Something missing, damaged or faulty? Tell us here:',
-    noInvoice: 'This is not an invoice.',
   },
   invoice: {
     names: { prepayment: 'Invoice for a payment on account', final: 'Invoice', credit_note: 'Credit note' },

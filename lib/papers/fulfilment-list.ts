@@ -66,12 +66,13 @@ function drawPicks(doc: Pdf, list: FulfilmentList, from: number): number {
   y += heading(doc, words.pick, y)
   for (const pick of toPick(list.orders)) {
     const name = { width: widthOf(doc) - 74 }
-    const height = measure(doc, nameOf(pick), name) + 8
+    const text = pick.place ? `${words.place(pick.place)} ${nameOf(pick)}` : nameOf(pick)
+    const height = measure(doc, text, name) + 8
     y = fit(doc, y, height)
     rule(doc, y)
     tickBox(doc, MARGIN, y + 5)
     write(doc, `${pick.quantity} ×`, { x: MARGIN + 18, y: y + 4, width: 44, bold: true, align: 'right' })
-    write(doc, nameOf(pick), { x: MARGIN + 74, y: y + 4, ...name })
+    write(doc, text, { x: MARGIN + 74, y: y + 4, ...name })
     y += height
   }
   rule(doc, y)

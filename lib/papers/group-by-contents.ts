@@ -19,13 +19,20 @@ export function groupByContents(orders: readonly FulfilmentOrder[]): SameContent
   return [...groups.values()]
 }
 
-/** How many of each thing the orders need together, in the order in which the things first come. */
+/**
+ * How many of each thing the orders need together, by the place where it stands; things without a place come last, in the
+ * order in which they first come.
+ */
 export function toPick(orders: readonly FulfilmentOrder[]): ToPick[] {
   const picks = new Map<string, ToPick>()
   for (const line of orders.flatMap((order) => order.lines)) {
-    const { module, offer, choices } = line
+    const { module, offer, choices, place } = line
     const before = picks.get(thing(line))?.quantity ?? 0
-    picks.set(thing(line), { module, offer, choices, quantity: before + line.quantity })
+    picks.set(thing(line), { module, offer, choices, place, quantity: before + line.quantity })
   }
-  return [...picks.values()]
+  return [...picks.values()].sort((a, b) => byPlace(a.place ?? '', b.place ?? ''))
 }
+
+/** As a shelf is numbered: place 2 before place 10. */
+const byPlace = (a: string, b: string) =>
+  Number(a === '') - Number(b === '') || a.localeCompare(b, 'en', { numeric: true })

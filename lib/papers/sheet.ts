@@ -1,37 +1,45 @@
 import PDFDocument from 'pdfkit'
-import { join } from 'node:path'
 import type { PaperIssue } from '@/lib/contracts/papers'
 import { QUIET_MODULES, code128 } from './code-128'
+import { BOLD, REGULAR, registerFaces, regularFile } from './faces'
+import { drawMixed, isMixed, lineHeight, mixedLines } from './mixed-text'
 import { printable } from './printable'
 
 export type Pdf = PDFKit.PDFDocument
-
-/** Complete faces: a subset drops letters (Łódź). */
-const face = (weight: string) =>
-  join(process.cwd(), 'fonts', 'pdf', `atkinson-hyperlegible-next-${weight}.ttf`)
-export const REGULAR = 'regular'
-export const BOLD = 'bold'
 
 export const MARGIN = 42
 /** Kept free at the foot of each sheet for the title block. */
 export const BLOCK_HEIGHT = 46
 /** 0.33 mm: printed by any office printer, read by any scanner. */
 const MODULE_WIDTH = 0.95
+/** 0.25 mm, two dots of a label printer: bars on a narrow label may be as fine as that, no finer. */
+const FINEST_MODULE = 0.72
+
+const MM = 72 / 25.4
+/** Width and height of each paper in points. The roll is cut after each label, so its height is that of the longest. */
+const SHEETS: Readonly<Record<PaperIssue['size'], [number, number]>> = {
+  A4: [595.28, 841.89],
+  Letter: [612, 792],
+  A6: [105 * MM, 148 * MM],
+  '100x150': [100 * MM, 150 * MM],
+  '4x6': [288, 432],
+  roll62: [62 * MM, 130 * MM],
+}
+const sheetPoints = (size: PaperIssue['size']) => [...SHEETS[size]] as [number, number]
 
 /** A blank paper: black on white, its pages kept until the title blocks are drawn. */
 export function openSheet(issue: PaperIssue, title: string): Pdf {
   const doc = new PDFDocument({
-    size: issue.size === 'A4' ? 'A4' : 'LETTER',
+    size: sheetPoints(issue.size),
     margin: 0,
     bufferPages: true,
     tagged: true,
-    font: face('regular'),
+    font: regularFile,
     lang: 'en-GB',
     displayTitle: true,
     info: { Title: title, Author: issue.workshop, Creator: 'Brimline', Producer: 'Brimline' },
   })
-  doc.registerFont(REGULAR, face('regular'))
-  doc.registerFont(BOLD, face('bold'))
+  registerFaces(doc)
   return doc.font(REGULAR).fillColor('black').strokeColor('black')
 }
 
@@ -62,17 +70,25 @@ export function write(doc: Pdf, text: string, where: Written): number {
   const { x, y, width, align = 'left', as = 'P' } = where
   const height = measure(doc, text, where)
   const known = printable(doc, text)
-  if (known !== text.normalize('NFC'))
-    lossy.set(doc, [...lossySheets(doc), doc.bufferedPageRange().count - 1])
-  rootOf(doc).add(doc.struct(as, {}, () => void doc.text(known, x, y, { width, align, lineGap: 1 })))
+  const { start, count } = doc.bufferedPageRange()
+  if (known !== text.normalize('NFC')) lossy.set(doc, [...lossySheets(doc), start + count - 1])
+  const { size = 10, bold = false } = where
+  const draw = isMixed(doc, known, bold)
+    ? () => drawMixed(doc, mixedLines(doc, known, { size, bold, width }), { ...where, size, bold, align })
+    : () => void face(doc, size, bold).text(known, x, y, { width, align, lineGap: 1 })
+  rootOf(doc).add(doc.struct(as, {}, draw))
   return height
 }
 
 /** The height a text would take. */
 export function measure(doc: Pdf, text: string, { width, size = 10, bold = false }: Sized): number {
-  doc.font(bold ? BOLD : REGULAR).fontSize(size)
-  return doc.heightOfString(printable(doc, text), { width, lineGap: 1 })
+  const known = printable(doc, text)
+  if (isMixed(doc, known, bold))
+    return mixedLines(doc, known, { size, bold, width }).length * lineHeight(doc, { size, bold })
+  return face(doc, size, bold).heightOfString(known, { width, lineGap: 1 })
 }
+
+const face = (doc: Pdf, size: number, bold: boolean) => doc.font(bold ? BOLD : REGULAR).fontSize(size)
 
 /** Draws what carries no meaning of its own: a reader of the screen passes over it. */
 export function decorate(doc: Pdf, draw: () => void): void {
@@ -94,21 +110,26 @@ export function tickBox(doc: Pdf, x: number, y: number): void {
 export function drawCode128(
   doc: Pdf,
   text: string,
-  { x, y, height }: { x: number; y: number; height: number },
+  { x, y, height, width }: { x: number; y: number; height: number; width?: number },
 ): void {
+  const module = moduleFor(text, width)
   decorate(doc, () => {
-    let at = x + QUIET_MODULES * MODULE_WIDTH
+    let at = x + QUIET_MODULES * module
     for (const [i, modules] of code128(text).entries()) {
-      const width = modules * MODULE_WIDTH
-      if (i % 2 === 0) doc.rect(at, y, width, height).fill('black')
-      at += width
+      if (i % 2 === 0) doc.rect(at, y, modules * module, height).fill('black')
+      at += modules * module
     }
   })
 }
 
-/** Width of the drawn bars with their margins, in points. */
-export function widthOfCode128(text: string): number {
-  return (code128(text).reduce((sum, modules) => sum + modules, 0) + 2 * QUIET_MODULES) * MODULE_WIDTH
+const modulesOf = (text: string) =>
+  code128(text).reduce((sum, modules) => sum + modules, 0) + 2 * QUIET_MODULES
+const moduleFor = (text: string, width = Infinity) =>
+  Math.min(MODULE_WIDTH, Math.max(FINEST_MODULE, width / modulesOf(text)))
+
+/** Width of the drawn bars with their margins, in points; narrower where less room is given, as far as scanners read them. */
+export function widthOfCode128(text: string, room?: number): number {
+  return modulesOf(text) * moduleFor(text, room)
 }
 
 /** Closes the paper and gives it back whole. */

@@ -2,7 +2,8 @@ import type { PaperIssue } from '@/lib/contracts/papers'
 import { papers } from '@/lib/messages/papers'
 import { writtenDay } from '@/lib/messages/written'
 import { printable } from './printable'
-import { BLOCK_HEIGHT, BOLD, decorate, lossySheets, MARGIN, REGULAR, widthOf, type Pdf } from './sheet'
+import { BOLD, REGULAR } from './faces'
+import { BLOCK_HEIGHT, decorate, lossySheets, MARGIN, widthOf, type Pdf } from './sheet'
 
 type Block = { what: string; from: number; to: number }
 

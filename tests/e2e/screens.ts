@@ -156,6 +156,13 @@ export const SCREENS: Readonly<Record<string, { by: Looker; at: (found: Found) =
   },
   '/packing/[workshop]/papers/list': { by: 'packer', at: () => ['/packing/hollow-pier/papers/list'] },
   '/packing/[workshop]/papers/slips': { by: 'packer', at: () => ['/packing/hollow-pier/papers/slips'] },
+  '/packing/[workshop]/papers/[paper]': {
+    by: 'packer',
+    at: () =>
+      ['labels', 'customs', 'invoices', 'returns', 'bags', 'hand-over'].map(
+        (paper) => `/packing/hollow-pier/papers/${paper}`,
+      ),
+  },
   '/packing/[workshop]/parcels/[parcel]': {
     by: 'packer',
     at: ({ open, packed, handedOver }) =>

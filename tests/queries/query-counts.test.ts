@@ -22,6 +22,7 @@ import { listBatches } from '@/lib/queries/packing/list-batches'
 import { listPackGroups } from '@/lib/queries/packing/list-pack-groups'
 import { listRunUnits } from '@/lib/queries/units/list-run-units'
 import { getPackSummary } from '@/lib/queries/packing/get-pack-summary'
+import { getParcelPapers } from '@/lib/queries/packing/get-parcel-papers'
 import { getPackingSlips } from '@/lib/queries/packing/get-packing-slips'
 import { listPackQueue } from '@/lib/queries/packing/list-pack-queue'
 import { listPackedParcels } from '@/lib/queries/packing/list-packed-parcels'
@@ -206,6 +207,7 @@ const LISTS: Readonly<
   },
   'fulfilment list': { ask: () => getFulfilmentOrders(asked()) },
   'packing slips': { ask: () => getPackingSlips({ ...asked(), parcelIds, problemUrl: (id) => id }) },
+  'papers of parcels': { ask: () => getParcelPapers({ ...asked(), parcelIds }) },
   'front of a workshop': { ask: () => getWorkshopFront({ slug: world.workshop.slug, now: NOW }) },
   'front of the site': { ask: () => getSiteFront({ now: NOW }) },
   'page of a module': {

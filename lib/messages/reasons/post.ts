@@ -12,6 +12,9 @@ export const post: Record<string, string> = {
     'The address has changed since the slip was printed. Throw the slip and its label away and print them again, then pack.',
   in_other_batch:
     'Somebody else is packing this order: it is in their batch. Take the next one, or ask the owner to give the batch back.',
+  nothing_to_print: 'There is nothing to print here.',
+  declaration_incomplete:
+    'Customs would send this back: something is missing in the declaration. The page of these papers says what.',
   nothing_to_pack:
     'Nothing in the queue is like this and free to take. Show everything again, or look who has it.',
   batch_done: 'This batch is done already.',

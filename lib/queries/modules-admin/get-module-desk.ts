@@ -61,11 +61,11 @@ function factsOf(module: Module): ModuleDesk['module'] {
 function toOffer(offer: Offer, destinations: number): OfferDesk {
   const { kind, priceMinor, depositMinor, priceListMinor, taxClass, contents, cautions, ageFrom } = offer
   const { netWeightG, packedWeightG, lengthMm, widthMm, heightMm } = offer
-  const { customsDescription, customsCode, customsOrigin } = offer
+  const { customsDescription, customsCode, customsOrigin, storagePlace } = offer
   return {
     ...{ offer: kind, priceMinor, depositMinor, priceListMinor, taxClass, contents, cautions, ageFrom },
     ...{ netWeightG, packedWeightG, lengthMm, widthMm, heightMm },
-    ...{ customsDescription, customsCode, customsOrigin },
+    ...{ customsDescription, customsCode, customsOrigin, storagePlace },
     withdrawn: offer.withdrawnAt !== null,
     destinations,
   }

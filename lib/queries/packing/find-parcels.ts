@@ -1,5 +1,5 @@
 import 'server-only'
-import type { WhereOptions } from 'sequelize'
+import type { InferAttributes, WhereOptions } from 'sequelize'
 import {
   Address,
   Module,
@@ -8,11 +8,22 @@ import {
   OrderLine,
   Parcel,
   ParcelLine,
+  Person,
   Revision,
   Run,
   RunOffer,
   Unit,
 } from '@/models'
+
+const OFFER_FACTS: (keyof InferAttributes<Offer>)[] = [
+  'id',
+  'packedWeightG',
+  'netWeightG',
+  'customsDescription',
+  'customsCode',
+  'customsOrigin',
+  'priceMinor',
+]
 
 /** Parcels with their address, lines, units, offers, order, run and module: everything a slip or page names. */
 export function findParcels(where: WhereOptions<Parcel>): Promise<Parcel[]> {
@@ -20,13 +31,19 @@ export function findParcels(where: WhereOptions<Parcel>): Promise<Parcel[]> {
   const revision = { model: Revision, as: 'revision', attributes: ['letter'] }
   const run = { model: Run, as: 'run', attributes: ['id', 'number'], include: [module, revision] }
   const order = { model: Order, as: 'order', required: true, include: [run] }
-  const offer = { model: Offer, as: 'offer', attributes: ['id', 'packedWeightG'] }
-  const runOffer = { model: RunOffer, as: 'runOffer', attributes: ['id', 'offerId'], include: [offer] }
+  const offer = { model: Offer, as: 'offer', attributes: OFFER_FACTS }
+  const runOffer = {
+    model: RunOffer,
+    as: 'runOffer',
+    attributes: ['id', 'offerId', 'priceMinor'],
+    include: [offer],
+  }
   const orderLine = { model: OrderLine, as: 'orderLine', required: true, include: [order, runOffer] }
   return Parcel.findAll({
     where,
     include: [
       { model: Address, as: 'address', required: true },
+      { model: Person, as: 'person', attributes: ['locale'] },
       // Apart from the rest, so that a parcel of many lines is not repeated with its address for each.
       { model: ParcelLine, as: 'lines', separate: true, include: [orderLine, { model: Unit, as: 'unit' }] },
     ],

@@ -4,7 +4,7 @@ import type { FulfilmentOrder } from '@/lib/contracts/papers'
 import { can, type Actor } from '@/lib/core/policy/can'
 import { dayIn } from '@/lib/core/time/zone'
 import { listPackQueue } from '@/lib/queries/packing/list-pack-queue'
-import { Module, Person, Revision, Run, Workshop } from '@/models'
+import { Module, Offer, OrderLine, Person, Revision, Run, RunOffer, Workshop } from '@/models'
 
 /** Orders on one list: what a packer takes in an afternoon, and what a printer takes at once. */
 export const PAPERS_MOST = 200
@@ -40,7 +40,7 @@ export async function getPaperIssue(cmd: {
   }
 }
 
-/** The queue as the fulfilment list prints it, the first 200 parcels; null for who may not print. Four statements. */
+/** The queue as the fulfilment list prints it, the first 200 parcels; null for who may not print. Five statements. */
 export async function getFulfilmentOrders(cmd: {
   actor: Actor
   workshopId: string
@@ -59,6 +59,7 @@ export async function getFulfilmentOrders(cmd: {
     ],
     order: [['createdAt', 'ASC']],
   })
+  const places = await placesOf(items.flatMap(({ lines }) => lines.map(({ line }) => line)))
   return {
     ...issue,
     runs: runs.map(({ module, revision, number }) => ({
@@ -72,7 +73,8 @@ export async function getFulfilmentOrders(cmd: {
       country,
       postedBy,
       note: null,
-      lines: lines.map(({ module, offer, quantity, choices }) => ({
+      lines: lines.map(({ module, offer, quantity, choices, line }) => ({
+        place: places.get(line) ?? '',
         module,
         offer,
         quantity,
@@ -82,4 +84,15 @@ export async function getFulfilmentOrders(cmd: {
     })),
     isCut: next !== null,
   }
+}
+
+/** Where the things of lines of orders stand. */
+async function placesOf(lineIds: string[]): Promise<Map<string, string>> {
+  const offer = { model: Offer, as: 'offer', attributes: ['storagePlace'] }
+  const lines = await OrderLine.findAll({
+    where: { id: lineIds },
+    attributes: ['id'],
+    include: [{ model: RunOffer, as: 'runOffer', attributes: ['id'], include: [offer] }],
+  })
+  return new Map(lines.map(({ id, runOffer }) => [id, runOffer?.offer?.storagePlace ?? '']))
 }

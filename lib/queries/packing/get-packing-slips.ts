@@ -1,6 +1,7 @@
 import 'server-only'
 import type { PackingSlip, PackingSlips } from '@/lib/contracts/papers'
 import { can, type Actor } from '@/lib/core/policy/can'
+import { slipLanguage } from '@/lib/core/post/slip-language'
 import { formatAddress } from '@/lib/core/post/address'
 import { contentsOf, findParcels } from '@/lib/queries/packing/find-parcels'
 import { getPaperIssue } from '@/lib/queries/packing/get-fulfilment-orders'
@@ -37,8 +38,8 @@ export async function getPackingSlips(cmd: {
   }
 }
 
-/** With the country line: the paper may come back from anywhere. */
-function senderOf(workshop: Workshop): string[] {
+/** Sender and return address, with the country line: the paper may come back from anywhere. */
+export function senderOf(workshop: Workshop): string[] {
   const lines = workshop.postalAddress
     ? formatAddress(workshop.postalAddress, { script: 'latin', from: '' })
     : []
@@ -60,6 +61,7 @@ function asSlip(
     orderNumber: String(order.number),
     parcel: place ?? { nth: 1, of: 1 },
     isReplacement: parcel.problemId !== null,
+    language: slipLanguage({ locale: parcel.person?.locale ?? 'en', country: parcel.address.country }),
     to,
     toOwnScript: own.join('\n') === to.join('\n') ? null : own,
     lines: contents.map(({ line, quantity, serials }) => ({

@@ -18,8 +18,10 @@ export async function listPackedParcels(cmd: {
   after?: number
   /** Only those of this batch. */
   batch?: string
+  /** Items a page, 50 unless said. */
+  limit?: number
 }): Promise<{ items: PackedParcel[]; next: number | null }> {
-  const { actor, workshopId, show, after, batch } = cmd
+  const { actor, workshopId, show, after, batch, limit = PER_PAGE } = cmd
   if (!can(actor, 'packing:read', { workshopId })) return { items: [], next: null }
   const isPacked = show === 'packed'
   const rows = await sequelize.query<
@@ -34,12 +36,12 @@ export async function listPackedParcels(cmd: {
        and ($after::int is null or p.number ${isPacked ? '>' : '<'} $after)
      group by p.id, a.id order by p.number ${isPacked ? 'asc' : 'desc'} limit $limit`,
     {
-      bind: { workshopId, batch: batch ?? null, after: after ?? null, limit: PER_PAGE + 1 },
+      bind: { workshopId, batch: batch ?? null, after: after ?? null, limit: limit + 1 },
       type: QueryTypes.SELECT,
     },
   )
   const items = rows
-    .slice(0, PER_PAGE)
+    .slice(0, limit)
     .map((row) => ({ ...row, orderNumber: String(row.orderNumber), at: row.at.toISOString() }))
-  return { items, next: rows.length > PER_PAGE ? (items.at(-1)?.number ?? null) : null }
+  return { items, next: rows.length > limit ? (items.at(-1)?.number ?? null) : null }
 }

@@ -56,6 +56,7 @@ export function saveOffer(cmd: {
       widthMm: input.widthMm ?? null,
       heightMm: input.heightMm ?? null,
       customsOrigin: input.customsOrigin ?? null,
+      storagePlace: input.storagePlace,
       position: POSITION[kind],
       withdrawnAt: withdrawn ? (before?.withdrawnAt ?? now) : null,
     }

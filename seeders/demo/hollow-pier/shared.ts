@@ -32,8 +32,9 @@ export function threeOffers(currency: string, origin: string, prices: Prices): R
     widthMm: 160,
     heightMm: 60,
     customsDescription: 'Electronic module for a music synthesizer',
-    customsCode: '920710',
+    customsCode: '9207900000',
     customsOrigin: origin,
+    storagePlace: { boards: 'Shelf 1', kit: 'Shelf 2', built: 'Shelf 3' }[offer],
     cautions: CAUTIONS,
     ageFrom: 14,
   }))

@@ -56,6 +56,7 @@ export const slips = (over: Partial<PackingSlips> = {}): PackingSlips => ({
       orderNumber: '1042',
       parcel: { nth: 1, of: 2 },
       isReplacement: false,
+      language: 'en',
       to: ['Hanako Mori', '1-2 Honmachi, Minato-ku', 'Tokyo 105-0001', 'JAPAN'],
       toOwnScript: null,
       lines: [kit, built],

@@ -85,6 +85,8 @@ export const API_TABLE: Readonly<Record<string, Row>> = {
   'GET /api/packing/[workshop]/queue': '401 404 200 404 200 404 404',
   // Nothing is in the queue: there is nothing to print.
   'GET /api/packing/[workshop]/slips.pdf': '401 404 404 404 404 404 404',
+  // Nothing is in the queue.
+  'GET /api/packing/[workshop]/papers/[paper]': '401 404 409 404 409 404 404',
   'POST /api/packing/[workshop]/batches': '401 404 422 404 422 404 404',
   // No batch was taken.
   'POST /api/packing/[workshop]/batches/[batch]/return': '401 404 404 404 404 404 404',

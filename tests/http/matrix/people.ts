@@ -41,6 +41,7 @@ export async function matrixWorld() {
     order: world.order.id,
     parcel: parcel.id,
     batch: randomUUID(),
+    paper: 'labels',
     bulk: bulk.id,
     invoice: (await makeInvoice(world.order)).id,
     revision: world.revision.letter,

@@ -1,14 +1,32 @@
 import { withParams } from '@/components/ui/with-params'
+import { PAPER_KINDS } from '@/lib/contracts/packing'
 import { packingWords as words } from '@/lib/messages/packing'
+import { parcelPaperWords } from '@/lib/messages/parcel-papers'
 import { paths } from '@/lib/paths'
 
-/** The papers of one batch. */
-export function BatchPapers({ slug, batch }: { slug: string; batch: string }) {
-  const href = (paper: 'list' | 'slips') => withParams(paths.packingPapers(slug, paper), { batch }, {})
+type Props = { slug: string; query: Readonly<Record<string, string | undefined>> }
+
+/** Every paper of what is shown: a batch, or the queue as it is filtered. */
+export function BatchPapers({ slug, query }: Props) {
+  const papers = [
+    { paper: 'list', label: words.listTitle },
+    { paper: 'slips', label: words.slipsTitle },
+    ...PAPER_KINDS.map((paper) => ({ paper, label: parcelPaperWords.names[paper] })),
+  ] as const
   return (
-    <p className="flex flex-wrap gap-x-6 gap-y-2 print:hidden">
-      <a href={href('list')}>{words.batch.list}</a>
-      <a href={href('slips')}>{words.batch.slips}</a>
-    </p>
+    <nav aria-label={words.papersTitle} className="print:hidden">
+      <ul className="flex flex-wrap gap-x-6 gap-y-1">
+        {papers.map(({ paper, label }) => (
+          <li key={paper}>
+            <a
+              href={withParams(paths.packingPapers(slug, paper), query, { after: null })}
+              className="inline-flex min-h-11 items-center"
+            >
+              {label}
+            </a>
+          </li>
+        ))}
+      </ul>
+    </nav>
   )
 }

@@ -30,7 +30,10 @@ export function ListSheet({ paper }: { paper: FulfilmentPaper }) {
           <li key={nameOf(pick)} className="flex gap-3 border-b border-rule py-1.5">
             <TickBox />
             <span className="figures w-14 text-right font-semibold">{pick.quantity} ×</span>
-            <span>{nameOf(pick)}</span>
+            <span>
+              {pick.place ? <span className="figures">{words.place(pick.place)} </span> : null}
+              {nameOf(pick)}
+            </span>
           </li>
         ))}
       </ul>

@@ -10,6 +10,7 @@ import { listPackGroups } from '@/lib/queries/packing/list-pack-groups'
 import { listPackQueue } from '@/lib/queries/packing/list-pack-queue'
 import { listPackers } from '@/lib/queries/packing/list-packers'
 import { listStoppedOrders } from '@/lib/queries/packing/list-stopped-orders'
+import { BatchPapers } from './batch-papers'
 import { BatchesTable } from './batches-table'
 import { GroupsTable } from './groups-table'
 import { QueueFilter } from './queue-filter'
@@ -41,6 +42,7 @@ export async function QueueSheet({ actor, workshopId, slug, query, summary }: Pr
     <Stack>
       <TakeForm slug={slug} query={query} packers={await listPackers(asked)} actor={actor} />
       <BatchesTable slug={slug} batches={batches} />
+      <BatchPapers slug={slug} query={query} />
       <GroupsTable slug={slug} query={query} groups={groups} />
       <QueueTable
         slug={slug}

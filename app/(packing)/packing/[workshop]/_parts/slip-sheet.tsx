@@ -3,16 +3,15 @@ import { AddressLines } from '@/components/parcel/address-lines'
 import { CodeBars } from '@/components/parcel/code-bars'
 import { TitleBlock } from '@/components/ui/title-block'
 import type { PackingSlip } from '@/lib/contracts/papers'
-import { papers } from '@/lib/messages/papers'
+import { SLIP_WORDS } from '@/lib/messages/slip-words'
 import { code128 } from '@/lib/papers/code-128'
 import type { SlipsPaper } from '@/lib/queries/packing/get-packing-slips'
-
-const words = papers.slip
 
 type Props = { paper: SlipsPaper; slip: PackingSlip; isLast?: boolean }
 
 /** One packing slip as it prints: a sheet of its own. */
 export function SlipSheet({ paper, slip, isLast = true }: Props) {
+  const words = SLIP_WORDS[slip.language]
   const place = slip.isReplacement ? words.replacement : words.parcel(slip.parcel.nth, slip.parcel.of)
   const isPart = slip.parcel.nth < slip.parcel.of && !slip.isReplacement
   return (
@@ -59,7 +58,7 @@ export function SlipSheet({ paper, slip, isLast = true }: Props) {
             <tr key={index} className="border-b border-rule align-top">
               <td className="figures py-2 pr-4 text-right font-semibold">{line.quantity}</td>
               <td className="py-2">
-                {line.module}, {papers.offers[line.offer]}
+                {line.module}, {words.offers[line.offer]}
                 {[...line.choices, ...(line.serials.length > 0 ? [words.serials(line.serials)] : [])].map(
                   (below) => (
                     <span key={below} className="block text-15">

@@ -67,7 +67,7 @@ export default async function BatchPage({ params, searchParams }: Props) {
         ) : (
           <a href={paths.packing(slug)}>{words.batch.toQueue}</a>
         )}
-        <BatchPapers slug={slug} batch={batchId} />
+        <BatchPapers slug={slug} query={{ batch: batchId }} />
         {isOpen ? (
           <QueueTable
             slug={slug}

@@ -85,6 +85,13 @@ export function OfferForm({ slug, module, offer, currency, form }: Props) {
             form={form}
             optional
           />
+          <TextField
+            name="storagePlace"
+            label={words.storagePlace}
+            hint={words.storagePlaceHint}
+            form={form}
+            optional
+          />
         </div>
       </Sheet>
       <TextArea name="cautions" label={words.offerCautions} form={form} optional />

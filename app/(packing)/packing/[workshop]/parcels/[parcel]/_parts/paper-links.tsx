@@ -1,8 +1,12 @@
 import { LinkButton } from '@/components/ui/button'
+import { withParams } from '@/components/ui/with-params'
 import { packingWords as words } from '@/lib/messages/packing'
+import { parcelPaperWords } from '@/lib/messages/parcel-papers'
 import { paths } from '@/lib/paths'
 
-/** The slip of this parcel, on a page that prints and as PDF. */
+const PAPERS = ['labels', 'customs', 'invoices', 'returns'] as const
+
+/** The papers of this parcel, on pages that print and offer the PDF. */
 export function PaperLinks({ slug, parcel }: { slug: string; parcel: string }) {
   return (
     <div className="flex flex-wrap items-center gap-x-6 pt-4 print:hidden">
@@ -10,6 +14,15 @@ export function PaperLinks({ slug, parcel }: { slug: string; parcel: string }) {
       <a href={paths.api.packingSlip(slug, parcel)} className="inline-flex min-h-14 items-center">
         {words.slipPdf}
       </a>
+      {PAPERS.map((paper) => (
+        <a
+          key={paper}
+          href={withParams(paths.packingPapers(slug, paper), { parcel }, {})}
+          className="inline-flex min-h-14 items-center"
+        >
+          {parcelPaperWords.names[paper]}
+        </a>
+      ))}
     </div>
   )
 }
