@@ -71,6 +71,7 @@ export const paths = {
   bench: (workshop: string) => `/bench/${part(workshop)}`,
   packing: (workshop: string) => `/packing/${part(workshop)}`,
   packingParcel: (workshop: string, parcel: string) => `/packing/${part(workshop)}/parcels/${part(parcel)}`,
+  packingPost: (workshop: string) => `/packing/${part(workshop)}/post`,
   packingBatch: (workshop: string, batch: string) => `/packing/${part(workshop)}/batches/${part(batch)}`,
   packingPapers: (workshop: string, paper: PaperKind | 'list' | 'slips') =>
     `/packing/${part(workshop)}/papers/${paper}`,
@@ -154,9 +155,13 @@ export const paths = {
     packingParcel: (
       workshop: string,
       parcel: string,
-      deed: 'pack' | 'hand-over' | 'reopen' | 'hold' | 'release',
+      deed: 'pack' | 'hand-over' | 'reopen' | 'hold' | 'release' | 'report',
     ) => `/api/packing/${part(workshop)}/parcels/${part(parcel)}/${deed}`,
     packingBatches: (workshop: string) => `/api/packing/${part(workshop)}/batches`,
+    packingTracking: (workshop: string) => `/api/packing/${part(workshop)}/tracking`,
+    packingPostCsv: (workshop: string) => `/api/packing/${part(workshop)}/post.csv`,
+    packingBatchHandOver: (workshop: string, batch: string) =>
+      `/api/packing/${part(workshop)}/batches/${part(batch)}/hand-over`,
     packingBatchReturn: (workshop: string, batch: string) =>
       `/api/packing/${part(workshop)}/batches/${part(batch)}/return`,
     adminRunUnits: (workshop: string, run: string) => `/api/admin/${part(workshop)}/runs/${part(run)}/units`,

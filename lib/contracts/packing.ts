@@ -162,6 +162,8 @@ export type ParcelPage = {
   tracking: string | null
   trackingKind: 's10' | 'other' | null
   handedOverAt: string | null
+  /** Last day to claim a loss from the post; null if it cannot be. */
+  claimByOn: string | null
   timeZone: string
   /** Who else packs it, in an open batch of their own; null when anybody, or the reader, may. */
   otherPacker: string | null

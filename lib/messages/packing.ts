@@ -38,7 +38,14 @@ export const packingMistakes = {
 /** The packer's pages. */
 export const packingWords = {
   title: 'Packing',
-  nav: { queue: 'Queue', packed: 'Packed', posted: 'Posted', papers: 'Papers', desk: 'Workshop’s desk' },
+  nav: {
+    post: 'Post',
+    queue: 'Queue',
+    packed: 'Packed',
+    posted: 'Posted',
+    papers: 'Papers',
+    desk: 'Workshop’s desk',
+  },
   queueLead: (count: number) =>
     count === 0 ? 'Nothing waits to be packed.' : `${orders(count)} can be packed now, oldest promise first.`,
   tabs: 'Parcels',
@@ -114,6 +121,10 @@ export const packingWords = {
       `${orders(count)} handed over; each buyer has had their mail. Take the next batch, or stop for today.`,
     closed: 'This batch is closed.',
     next: 'Pack the next one',
+    handOver: (count: number) =>
+      `Hand over ${plural(count, { one: '# packed parcel', other: '# packed parcels' })}: tell the buyers`,
+    handOverHint:
+      'Each goes by the service its buyer was quoted. Print the hand-over list first; after this nothing can be undone here.',
     toQueue: 'To the queue',
     contains: 'Still to pack, oldest promise first',
     nothingLeft: 'Everything of this batch is packed. Hand it over below.',

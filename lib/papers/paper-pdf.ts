@@ -45,7 +45,9 @@ function areaOf(doc: Pdf, issue: PaperIssue, part: PaperPart): Area {
   const fits = (unit: number) =>
     part.blocks.reduce((sum, block) => sum + heightOf(doc, block, { ...area, unit }), 0) <=
     area.floor - area.top
-  return { ...area, unit: LABEL_UNITS.find(fits) ?? LABEL_UNITS.at(-1)! }
+  // On a narrow label large letters would break the lines of an address.
+  const units = area.width < 200 ? LABEL_UNITS.filter((unit) => unit <= 8) : LABEL_UNITS
+  return { ...area, unit: units.find(fits) ?? LABEL_UNITS.at(-1)! }
 }
 
 function drawPart(doc: Pdf, { blocks }: PaperPart, area: Area): void {

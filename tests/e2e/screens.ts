@@ -156,6 +156,7 @@ export const SCREENS: Readonly<Record<string, { by: Looker; at: (found: Found) =
   },
   '/packing/[workshop]/papers/list': { by: 'packer', at: () => ['/packing/hollow-pier/papers/list'] },
   '/packing/[workshop]/papers/slips': { by: 'packer', at: () => ['/packing/hollow-pier/papers/slips'] },
+  '/packing/[workshop]/post': { by: 'packer', at: () => ['/packing/hollow-pier/post'] },
   '/packing/[workshop]/papers/[paper]': {
     by: 'packer',
     at: () =>

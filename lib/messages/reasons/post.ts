@@ -17,6 +17,9 @@ export const post: Record<string, string> = {
     'Customs would send this back: something is missing in the declaration. The page of these papers says what.',
   nothing_to_pack:
     'Nothing in the queue is like this and free to take. Show everything again, or look who has it.',
+  look_first: 'Look at what each line does, then take the list in.',
+  not_handed_over: 'This parcel was not handed over yet.',
+  no_service: 'No service was quoted for this order. Hand its parcel over by itself and choose one.',
   batch_done: 'This batch is done already.',
   already_packed: 'This parcel is packed already. Open its page to hand it over, or to unpack it.',
   already_handed_over: 'This parcel has been handed over and cannot be changed any more.',

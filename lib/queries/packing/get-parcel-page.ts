@@ -86,6 +86,7 @@ export async function getParcelPage(cmd: {
     tracking: parcel.tracking,
     trackingKind: parcel.trackingKind,
     handedOverAt: parcel.handedOverAt?.toISOString() ?? null,
+    claimByOn: parcel.claimByOn,
     timeZone: workshop.timeZone,
   }
 }

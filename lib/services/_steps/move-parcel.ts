@@ -24,6 +24,9 @@ type ParcelColumns = Partial<
     | 'handedOverAt'
     | 'handedOverByPersonId'
     | 'discardedAt'
+    | 'deliveredAt'
+    | 'lostAt'
+    | 'returnedAt'
   >
 >
 

@@ -90,6 +90,10 @@ export const API_TABLE: Readonly<Record<string, Row>> = {
   'POST /api/packing/[workshop]/batches': '401 404 422 404 422 404 404',
   // No batch was taken.
   'POST /api/packing/[workshop]/batches/[batch]/return': '401 404 404 404 404 404 404',
+  'POST /api/packing/[workshop]/batches/[batch]/hand-over': '401 404 200 404 200 404 404',
+  'POST /api/packing/[workshop]/tracking': '401 404 422 404 422 404 404',
+  'GET /api/packing/[workshop]/post.csv': '401 404 200 404 200 404 404',
+  'POST /api/packing/[workshop]/parcels/[parcel]/report': '401 404 422 404 422 404 404',
   'POST /api/packing/[workshop]/parcels/[parcel]/hold': '401 404 422 404 422 404 404',
   'POST /api/packing/[workshop]/parcels/[parcel]/release': '401 404 200 404 200 404 404',
   'POST /api/packing/[workshop]/fill': '401 404 200 404 200 404 404',

@@ -76,6 +76,7 @@ export const PAGE_TABLE: Readonly<Record<string, Row>> = {
   // No batch was taken.
   'PAGE /packing/[workshop]/batches/[batch]': '307 404 404 404 404 404 404',
   'PAGE /packing/[workshop]/papers/list': '307 404 200 404 200 404 404',
+  'PAGE /packing/[workshop]/post': '307 404 200 404 200 404 404',
   'PAGE /packing/[workshop]/papers/[paper]': '307 404 200 404 200 404 404',
   'PAGE /packing/[workshop]/papers/slips': '307 404 200 404 200 404 404',
   'PAGE /packing/[workshop]/parcels/[parcel]': '307 404 200 404 200 404 404',

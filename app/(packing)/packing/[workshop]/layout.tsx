@@ -17,6 +17,7 @@ export default async function PackingLayout({ params, children }: Props) {
   const links = [
     { href: paths.packing(slug), label: words.nav.queue },
     { href: `${paths.packing(slug)}?show=packed`, label: words.nav.packed },
+    { href: paths.packingPost(slug), label: words.nav.post },
     { href: paths.packingPapers(slug, 'list'), label: words.listTitle },
     { href: paths.packingPapers(slug, 'slips'), label: words.slipsTitle },
     ...(can(actor, 'order:list', { workshopId: workshop.id })

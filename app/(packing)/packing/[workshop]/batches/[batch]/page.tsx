@@ -67,6 +67,14 @@ export default async function BatchPage({ params, searchParams }: Props) {
         ) : (
           <a href={paths.packing(slug)}>{words.batch.toQueue}</a>
         )}
+        {batch.packed > 0 ? (
+          <div className="print:hidden">
+            <DeedForm action={paths.api.packingBatchHandOver(slug, batchId)}>
+              <Button>{words.batch.handOver(batch.packed)}</Button>
+            </DeedForm>
+            <p className="max-w-words pt-2 text-15 text-quiet">{words.batch.handOverHint}</p>
+          </div>
+        ) : null}
         <BatchPapers slug={slug} query={{ batch: batchId }} />
         {isOpen ? (
           <QueueTable

@@ -19,6 +19,7 @@ import { HandOverForm } from './_parts/hand-over-form'
 import { LeftSheet } from './_parts/left-sheet'
 import { PackForm } from './_parts/pack-form'
 import { PaperLinks } from './_parts/paper-links'
+import { ReportForm } from './_parts/report-form'
 import { UnpackForm } from './_parts/unpack-form'
 
 export const metadata: Metadata = { title: words.parcel }
@@ -80,6 +81,7 @@ export default async function ParcelRoute({ params, searchParams }: Props) {
             {parcel.state === 'packed' && mayGo ? (
               <HandOverForm slug={slug} parcel={parcel} form={handing} />
             ) : null}
+            <ReportForm slug={slug} parcel={parcel} />
             {parcel.state === 'packed' ? <UnpackForm slug={slug} parcel={parcel.parcel} /> : null}
             {parcel.handedOverAt === null && parcel.state !== 'discarded' ? (
               <HoldForm
