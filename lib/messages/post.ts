@@ -1,7 +1,4 @@
-import { POST_COLUMNS } from '@/lib/contracts/tracking'
 import { plural } from './plural'
-
-const parcels = (count: number) => plural(count, { one: '# parcel', other: '# parcels' })
 
 /** Mistakes in a carrier's list, and in what is said of a parcel. */
 export const postMistakes = {
@@ -37,7 +34,8 @@ export const postWords = {
     button: 'Make the list',
     sets: { all: 'Every column', address: 'Addresses and services', customs: 'Customs data' },
     choose: 'Or these columns',
-    chooseHint: `In the order the carrier wants, commas between. There are: ${POST_COLUMNS.join(', ')}.`,
+    chooseHint: (columns: readonly string[]) =>
+      `In the order the carrier wants, commas between. There are: ${columns.join(', ')}.`,
     columns: {
       order: 'Order',
       parcel: 'Parcel',

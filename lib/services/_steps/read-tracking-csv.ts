@@ -1,3 +1,4 @@
+import 'server-only'
 import { CsvError, parse } from 'csv-parse/sync'
 import { ok, refuse, type Result } from '@/lib/core/result'
 import { postMistakes as words } from '@/lib/messages/post'

@@ -31,7 +31,7 @@ export function ExportSheet({ slug }: { slug: string }) {
         <TextField
           name="columns"
           label={words.choose}
-          hint={words.chooseHint}
+          hint={words.chooseHint(POST_COLUMNS)}
           defaultValue={SETS.address}
           width="full"
           autoComplete="off"
