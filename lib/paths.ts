@@ -3,6 +3,12 @@
  * here, once. Pages take `draft` when a form comes back with its mistakes (see lib/http/form-draft.ts).
  */
 const part = encodeURIComponent
+const asked = (query: Record<string, string | undefined>) => {
+  const given = Object.entries(query).flatMap(([name, value]) =>
+    value === undefined ? [] : [`${name}=${part(value)}`],
+  )
+  return given.length > 0 ? `?${given.join('&')}` : ''
+}
 
 type PaperKind = 'labels' | 'customs' | 'invoices' | 'returns' | 'bags' | 'hand-over'
 
@@ -48,6 +54,13 @@ export const paths = {
     module: string,
     page: 'facts' | 'offers' | 'revisions' | 'parts' | 'plan' | 'preview',
   ) => `/admin/${part(workshop)}/modules/${part(module)}/${page}`,
+  adminPartImport: (
+    workshop: string,
+    module: string,
+    query: { import?: string; revision?: string; kind?: string; draft?: string } = {},
+  ) => `/admin/${part(workshop)}/modules/${part(module)}/parts/import${asked(query)}`,
+  adminPart: (workshop: string, module: string, id: string) =>
+    `/admin/${part(workshop)}/modules/${part(module)}/parts/${part(id)}`,
   adminRuns: (workshop: string) => `/admin/${part(workshop)}/runs`,
   adminRunNew: (workshop: string) => `/admin/${part(workshop)}/runs/new`,
   adminRun: (workshop: string, run: string) => `/admin/${part(workshop)}/runs/${part(run)}`,
@@ -140,6 +153,13 @@ export const paths = {
         | 'archive'
         | 'first-unit'
         | 'parts'
+        | 'parts/import'
+        | 'parts/import/settings'
+        | 'parts/import/confirm'
+        | 'parts/quotes'
+        | 'parts/stock'
+        | 'parts/alternates'
+        | 'parts/alternates/remove'
         | 'samples'
         | 'plan',
     ) => `/api/admin/${part(workshop)}/modules/${part(module)}/${what}`,

@@ -42,6 +42,9 @@ export const moment = (): Column => ({ type: DataTypes.DATE, allowNull: false })
 export const flag = (): Column => ({ type: DataTypes.BOOLEAN, allowNull: false })
 export const json = (): Column => ({ type: DataTypes.JSONB, allowNull: false })
 
+/** Bytes as they came. */
+export const bytes = (): Column => ({ type: DataTypes.BLOB, allowNull: false })
+
 export const optional = (column: Column): Column => ({ ...column, allowNull: true })
 /** The same default as in the migration. */
 export const preset = (column: Column, value: unknown): Column => ({ ...column, defaultValue: value })

@@ -96,11 +96,17 @@ export type PartsDesk = {
     value: string
     designators: string
     perUnit: number
-    placedBy: Partial<Record<OfferKind, string>>
+    placedBy: Partial<Record<OfferKind, 'assembler' | 'maker' | 'buyer'>>
+    onHand: number
     quotedOn: string | null
     stockSeenOn: string | null
     sample: 'not_needed' | 'open' | 'fits' | 'does_not_fit'
   }[]
+  /** Position of the first line shown, and of the next page; null on the last. */
+  from: number
+  next: number | null
+  /** Every line whose part wants a sample looked at, wherever it stands. */
+  samples: { partId: string; code: string; sample: 'not_needed' | 'open' | 'fits' | 'does_not_fit' }[]
   findings: { code: string | null; problem: string; severity: 'error' | 'advice'; detail: string }[]
 }
 

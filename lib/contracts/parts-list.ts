@@ -9,7 +9,12 @@ export const PART_HEADINGS = [
   ...['code', 'description', 'value', 'designators', 'per_unit', 'boards', 'kit', 'built'],
   ...['attrition_percent', 'attrition_least', 'needs_sample', 'lifecycle', 'supply_pins', 'polarity'],
   ...['supplier', 'currency', 'moq', 'multiple', 'setup', 'breaks', 'lead_days', 'quoted_on'],
-  ...['stock_seen', 'stock_seen_on'],
+  ...['stock_seen', 'stock_seen_on', 'choice', 'alternates'],
+] as const
+/** Headings of quotes as CSV, one line per quote: a part may stand there as often as it has been quoted. */
+export const QUOTE_HEADINGS = [
+  ...['code', 'supplier', 'supplier_code', 'currency', 'moq', 'multiple', 'setup', 'breaks'],
+  ...['lead_days', 'quoted_on', 'stock_seen', 'stock_seen_on'],
 ] as const
 export const NEEDED_HEADINGS: readonly string[] = ['code', 'per_unit']
 
@@ -74,6 +79,8 @@ export const PartRow = z
     quoted_on: blank(day()),
     stock_seen: blank(wholeNumber(0, 100_000_000)),
     stock_seen_on: blank(day()),
+    choice: words(80),
+    alternates: words(400),
   })
   .transform((row, check) => {
     const { boards, kit, built } = row
@@ -86,12 +93,7 @@ export const PartRow = z
         path: ['built'],
         message: 'Write assembler, maker or buyer for at least one offer.',
       })
-    if ((row.stock_seen === undefined) !== (row.stock_seen_on === undefined))
-      check.addIssue({
-        code: 'custom',
-        path: ['stock_seen_on'],
-        message: 'Enter the stock seen and the day together.',
-      })
+    checkStockSeen(row, check)
     return {
       code: row.code,
       description: row.description,
@@ -105,6 +107,13 @@ export const PartRow = z
       lifecycle: row.lifecycle,
       supplyPins: row.supply_pins,
       polarityNote: row.polarity,
+      /** The answer of a choice that needs it, by its label; empty where every unit does. */
+      choice: row.choice,
+      /** Codes of parts that may stand in for it. */
+      alternates: row.alternates
+        .split(/[;,]/)
+        .map((code) => code.trim())
+        .filter((code) => code !== ''),
       quote: quoteOf(row, check),
     }
   })
@@ -112,6 +121,7 @@ export type PartRow = z.infer<typeof PartRow>
 
 type Typed = {
   supplier: string
+  supplier_code?: string
   currency?: string | undefined
   breaks: string
   quoted_on?: string | undefined
@@ -122,6 +132,44 @@ type Typed = {
   stock_seen?: number | undefined
   stock_seen_on?: string | undefined
 }
+
+function checkStockSeen({ stock_seen: seen, stock_seen_on: on }: Typed, check: z.RefinementCtx): void {
+  if ((seen === undefined) !== (on === undefined))
+    check.addIssue({
+      code: 'custom',
+      path: ['stock_seen_on'],
+      message: 'Enter the stock seen and the day together.',
+    })
+}
+
+/** A quote of a part, by the part's code. */
+export const QuoteRow = z
+  .object({
+    code: z
+      .string({ error: 'Enter your code for the part.' })
+      .trim()
+      .min(1, 'Enter your code for the part.')
+      .max(80),
+    supplier: words(120),
+    supplier_code: words(120),
+    currency: blank(currencyCode),
+    moq: atLeastOne(1_000_000),
+    multiple: atLeastOne(1_000_000),
+    setup: z.string().default(''),
+    breaks: words(400),
+    lead_days: blank(wholeNumber(0, 1000)),
+    quoted_on: blank(day()),
+    stock_seen: blank(wholeNumber(0, 100_000_000)),
+    stock_seen_on: blank(day()),
+  })
+  .transform((row, check) => {
+    checkStockSeen(row, check)
+    const quote = quoteOf(row, check)
+    if (row.supplier === '' && row.breaks === '')
+      check.addIssue({ code: 'custom', path: ['supplier'], message: 'Enter the supplier.' })
+    return { code: row.code, quote: quote ?? z.NEVER }
+  })
+export type QuoteRow = z.infer<typeof QuoteRow>
 
 /** The quote of a line; null when the line names no supplier. */
 function quoteOf(row: Typed, check: z.RefinementCtx) {
@@ -136,9 +184,11 @@ function quoteOf(row: Typed, check: z.RefinementCtx) {
     return null
   }
   const breaks = readBreaks(row.breaks, currency)
-  if (!breaks.ok) check.addIssue({ code: 'custom', path: ['breaks'], message: PRICE_BREAKS_WORDS })
+  if (!breaks.ok)
+    check.addIssue({ code: 'custom', path: ['breaks'], message: PRICE_BREAKS_WORDS[breaks.reason] })
   return {
     supplier,
+    supplierCode: row.supplier_code ?? '',
     currency,
     quotedOn,
     moq: row.moq,

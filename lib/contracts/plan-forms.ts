@@ -34,11 +34,12 @@ const Board = z
     multiple: wholeNumber(1, 1_000_000),
     setup: typed,
     stencil: typed,
-    breaks: line(400, PRICE_BREAKS_WORDS),
+    breaks: line(400, PRICE_BREAKS_WORDS.unreadable),
   })
   .transform(({ boards, kit, built, breaks, setup, stencil, ...board }, check) => {
     const read = readBreaks(breaks, board.currency)
-    if (!read.ok) check.addIssue({ code: 'custom', path: ['breaks'], message: PRICE_BREAKS_WORDS })
+    if (!read.ok)
+      check.addIssue({ code: 'custom', path: ['breaks'], message: PRICE_BREAKS_WORDS[read.reason] })
     const neededFor = Object.entries({ boards, kit, built }).flatMap(([offer, needs]) =>
       needs ? [offer] : [],
     )

@@ -10,7 +10,7 @@ import type { Result } from '@/lib/core/result'
 import { clock } from '@/lib/gateways/clock'
 import { paths } from '@/lib/paths'
 import { Workshop } from '@/models'
-import { readBody, type ReadBody } from './body'
+import { readBody, type ReadBody, type SentFile } from './body'
 import { problem } from './errors'
 import { keepDraft } from './form-draft'
 import { isOwnOrigin } from './origin'
@@ -24,6 +24,8 @@ export type RouteContext<P, Q, B> = {
   body: B
   /** The fields as typed, when a form was sent. */
   fields: Record<string, string> | null
+  /** Files that came along, by field; only where the route takes some. */
+  files: Record<string, SentFile>
   /** Business time. */
   now: Date
   /** The workshop named in the path; absent where the path names none. */
@@ -53,6 +55,8 @@ type Spec<P, Q, B> = {
   query?: z.ZodType<Q>
   body?: z.ZodType<B>
   limit?: LimitName
+  /** Takes files: so many bytes, the form's other fields included. */
+  upload?: number
   /** Takes an Idempotency-Key: the same key and body give the same answer once. */
   idempotent?: boolean
   /** Status of a success with a value; 200 unless said. */
@@ -114,10 +118,10 @@ async function answerOf<P, Q, B>(
   }
   if (spec.deed && !can(actor, spec.deed, scope)) return problem('forbidden')
 
-  const read = isChange ? await readBody(request) : null
+  const read = isChange ? await readBody(request, spec.upload) : null
   if (read && !read.ok) return problem(read.reason)
   const now = await clock.now()
-  const carried = read?.value ?? { body: {}, fields: null, errors: {}, text: '' }
+  const carried = read?.value ?? { body: {}, fields: null, errors: {}, text: '', files: {} }
   const shaped =
     carried.fields && spec.form?.reads
       ? spec.form.reads(carried.body as Record<string, unknown>)
@@ -144,6 +148,7 @@ async function answerOf<P, Q, B>(
     query: query?.data as Q,
     body: (body?.data ?? shaped) as B,
     fields: carried.fields,
+    files: carried.files,
     workshop: workshop as RouteContext<P, Q, B>['workshop'],
   }
   const key = spec.idempotent ? requestKeyOf(request, carried) : null

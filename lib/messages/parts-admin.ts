@@ -1,15 +1,14 @@
 /** A module's parts list and its check. */
 export const partsAdminWords = {
   title: 'Parts list (BOM)',
-  lead: 'One line per distinct part. Paste it as CSV; saving replaces the list of this revision.',
+  lead: 'One line per distinct part. Follow a part to its quotes, its stock and what may replace it.',
   revision: 'Revision',
   noRevision: 'Begin a revision first; a parts list belongs to one.',
   toRevisions: 'To the revisions',
-  csv: 'Parts list as CSV',
-  csvHint:
-    'The first line names the columns; code and per_unit must be there. Under boards, kit and built write who places the part: assembler, maker or buyer. Prices look like 1: 0.12; 100: 0.09.',
-  columns: 'Columns you can use',
-  save: 'Save this list',
+  importList: 'Import or edit the list',
+  importQuotes: 'Import quotes',
+  onHand: 'In the drawer',
+  placers: { assembler: 'assembler', maker: 'you', buyer: 'buyer' },
   table: 'Lines',
   none: 'The list is empty.',
   code: 'Part',

@@ -28,6 +28,7 @@ const TYPES: Record<string, string> = {
   DATE: 'timestamptz',
   BOOLEAN: 'bool',
   JSONB: 'jsonb',
+  BLOB: 'bytea',
   ARRAY: '_text',
 }
 

@@ -9,7 +9,8 @@ export type Found = Record<
   | 'open'
   | 'packed'
   | 'handedOver'
-  | 'bulk',
+  | 'bulk'
+  | 'part',
   string
 >
 
@@ -104,6 +105,14 @@ export const SCREENS: Readonly<Record<string, { by: Looker; at: (found: Found) =
   '/admin/[workshop]/modules/[module]/facts': { by: 'owner', at: () => [`${ROWLOCK}/facts`] },
   '/admin/[workshop]/modules/[module]/offers': { by: 'owner', at: () => [`${ROWLOCK}/offers?offer=kit`] },
   '/admin/[workshop]/modules/[module]/parts': { by: 'owner', at: () => [`${ROWLOCK}/parts`] },
+  '/admin/[workshop]/modules/[module]/parts/[part]': {
+    by: 'owner',
+    at: ({ part }) => [`${ROWLOCK}/parts/${part}`],
+  },
+  '/admin/[workshop]/modules/[module]/parts/import': {
+    by: 'owner',
+    at: () => [`${ROWLOCK}/parts/import`, `${ROWLOCK}/parts/import?kind=quotes`],
+  },
   '/admin/[workshop]/modules/[module]/plan': { by: 'owner', at: () => [`${ROWLOCK}/plan`] },
   '/admin/[workshop]/modules/[module]/preview': { by: 'owner', at: () => [`${ROWLOCK}/preview`] },
   '/admin/[workshop]/modules/[module]/revisions': { by: 'owner', at: () => [`${ROWLOCK}/revisions`] },

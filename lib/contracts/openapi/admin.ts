@@ -2,6 +2,8 @@ import type { z } from 'zod'
 import type { Deed } from '@/lib/core/policy/deeds'
 import { CostTrial } from '../cost-desk'
 import * as forms from '../module-forms'
+import * as parts from '../part-forms'
+import { ImportConfirm, ImportSettings, ImportStart } from '../part-import'
 import { PlanInput } from '../plan-forms'
 import { CallOffInput, LockInput, LowerMinimumInput, RunInput } from '../runs'
 import * as settings from '../settings'
@@ -84,6 +86,21 @@ export const WORKSHOP_OPERATIONS: readonly Operation[] = [
   post(`${module}/lessons`, 'Write down a lesson', 'lesson:write', forms.LessonInput),
   post(`${module}/lessons/mend`, 'Say which revision mends a lesson', 'lesson:mend', forms.MendInput),
   post(`${module}/lessons/waive`, 'Live with a lesson, with a reason', 'lesson:waive', forms.WaiveInput),
+  post(`${module}/parts/import`, 'Send a file of parts or quotes', 'part:import', ImportStart, {
+    status: 201,
+    answer: '{import, revision}',
+  }),
+  post(`${module}/parts/import/settings`, 'Say how a file is to be read', 'part:import', ImportSettings),
+  post(`${module}/parts/import/confirm`, 'Save a file as it was shown', 'part:import', ImportConfirm),
+  post(`${module}/parts/quotes`, 'Write down a quote of a part', 'quote:write', parts.QuoteInput),
+  post(`${module}/parts/stock`, 'Say how many pieces were counted', 'stock:write', parts.StockInput),
+  post(`${module}/parts/alternates`, 'A part that may stand in', 'part:write', parts.AlternateInput),
+  post(
+    `${module}/parts/alternates/remove`,
+    'It may no longer stand in',
+    'part:write',
+    parts.AlternateRemoval,
+  ),
   post(`${module}/parts`, 'Replace a parts list by CSV', 'part:write', forms.PartsInput),
   post(`${module}/samples`, 'Record that a sample was checked', 'part:check_sample', forms.SampleInput),
   post(`${module}/plan`, 'What a run of it costs and takes', 'plan:write', PlanInput),

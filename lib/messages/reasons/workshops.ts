@@ -19,4 +19,5 @@ export const workshops: Record<string, string> = {
   last_owner: 'A workshop needs an owner. Invite another one first.',
   already_member: 'This person already works for the workshop in that role.',
   other_address: 'This invitation was sent to another address. Sign in with that one to accept it.',
+  import_has_mistakes: 'Some lines cannot be read yet. Mend them first; nothing was saved.',
 }

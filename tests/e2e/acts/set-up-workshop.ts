@@ -1,5 +1,6 @@
 import { expect, type BrowserContext, type Page } from '@playwright/test'
 import { modulesAdminWords } from '@/lib/messages/modules-admin'
+import { importWords } from '@/lib/messages/part-imports'
 import { settingsWords } from '@/lib/messages/settings'
 import { workshopWords } from '@/lib/messages/workshops'
 import { paths } from '@/lib/paths'
@@ -141,15 +142,16 @@ export async function enterModule(page: Page, { slug, module }: House, today: Da
   const unit = await formTo(page, on('first-unit')).fill({ how: 'Every step of the test plan passed.' })
   await unit.press(modulesAdminWords.record, SAVED)
 
-  await page.goto(`${desk}/parts`)
-  const parts = await formTo(page, on('parts')).fill({
-    csv: [
+  await page.goto(`${desk}/parts/import`)
+  const parts = await formTo(page, on('parts/import')).fill({
+    text: [
       'code,value,designators,per_unit,kit,needs_sample,supplier,currency,breaks,quoted_on,stock_seen,stock_seen_on',
       `R-100K,100k,R1-R4,4,buyer,no,Brasswick,EUR,1: 0.02; 100: 0.01,${day(-2)},9000,${day(-1)}`,
       `POT-B100K,100k,RV1,1,buyer,yes,Brasswick,EUR,1: 1.40; 50: 1.10,${day(-2)},700,${day(-1)}`,
     ].join('\n'),
   })
-  await parts.press(modulesAdminWords.save, SAVED)
+  await parts.press(importWords.look, /import=/)
+  await formTo(page, on('parts/import/confirm')).press(importWords.confirm(2, false), SAVED)
   await page.goto(`${desk}/parts`)
   const sample = formTo(page, on('samples'))
   await sample.itself.locator('[name="part"]').selectOption({ index: 1 })

@@ -19,6 +19,13 @@ export const API_TABLE: Readonly<Record<string, Row>> = {
   'POST /api/admin/[workshop]/modules/[module]/lessons/waive': '401 404 422 404 404 404 404',
   'POST /api/admin/[workshop]/modules/[module]/offers': '401 404 422 404 404 404 404',
   'POST /api/admin/[workshop]/modules/[module]/parts': '401 404 422 404 404 404 404',
+  'POST /api/admin/[workshop]/modules/[module]/parts/alternates': '401 404 422 404 404 404 404',
+  'POST /api/admin/[workshop]/modules/[module]/parts/alternates/remove': '401 404 422 404 404 404 404',
+  'POST /api/admin/[workshop]/modules/[module]/parts/import': '401 404 422 404 404 404 404',
+  'POST /api/admin/[workshop]/modules/[module]/parts/import/confirm': '401 404 422 404 404 404 404',
+  'POST /api/admin/[workshop]/modules/[module]/parts/import/settings': '401 404 422 404 404 404 404',
+  'POST /api/admin/[workshop]/modules/[module]/parts/quotes': '401 404 422 404 404 404 404',
+  'POST /api/admin/[workshop]/modules/[module]/parts/stock': '401 404 422 404 404 404 404',
   'POST /api/admin/[workshop]/modules/[module]/plan': '401 404 422 404 404 404 404',
   // It is published already, which is no mistake.
   'POST /api/admin/[workshop]/modules/[module]/publish': '401 404 200 404 404 404 404',

@@ -42,6 +42,8 @@ export const PAGE_TABLE: Readonly<Record<string, Row>> = {
   'PAGE /admin/[workshop]/modules/[module]/facts': '307 404 200 404 404 404 404',
   'PAGE /admin/[workshop]/modules/[module]/offers': '307 404 200 404 404 404 404',
   'PAGE /admin/[workshop]/modules/[module]/parts': '307 404 200 404 404 404 404',
+  'PAGE /admin/[workshop]/modules/[module]/parts/[part]': '307 404 200 404 404 404 404',
+  'PAGE /admin/[workshop]/modules/[module]/parts/import': '307 404 200 404 404 404 404',
   'PAGE /admin/[workshop]/modules/[module]/plan': '307 404 200 404 404 404 404',
   'PAGE /admin/[workshop]/modules/[module]/preview': '307 404 200 200 404 404 404',
   'PAGE /admin/[workshop]/modules/[module]/revisions': '307 404 200 404 404 404 404',

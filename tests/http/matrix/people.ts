@@ -1,6 +1,6 @@
 import { randomUUID } from 'node:crypto'
 import { hashToken, makeToken } from '@/lib/config/secrets'
-import { BulkJob, Membership, Session, User, type Person } from '@/models'
+import { BulkJob, Membership, Part, Session, User, type Person } from '@/models'
 import { pier } from '@/tests/support/worlds/pier'
 import { makeParcel } from '@/tests/support/worlds/parcel'
 import { makeInvoice } from '@/tests/support/worlds/payment'
@@ -20,6 +20,7 @@ export async function matrixWorld() {
     byPersonId: world.owner.id,
     doneAt: NOW,
   })
+  const part = await Part.create({ workshopId: world.workshop.id, code: 'JACK-35', createdAt: NOW })
   const host = await makePerson({ emailNormal: 'host@brimline.example' })
   const people: Record<Exclude<MatrixRole, 'visitor'>, Person> = {
     customer: world.ines,
@@ -44,6 +45,7 @@ export async function matrixWorld() {
     paper: 'labels',
     bulk: bulk.id,
     invoice: (await makeInvoice(world.order)).id,
+    part: part.id,
     revision: world.revision.letter,
     move: 'open',
     token: makeToken(),

@@ -4,7 +4,7 @@ import { FactsForm } from '@/app/(admin)/admin/[workshop]/modules/[module]/_part
 import { FirstUnitForm } from '@/app/(admin)/admin/[workshop]/modules/[module]/_parts/first-unit-form'
 import { OfferForm } from '@/app/(admin)/admin/[workshop]/modules/[module]/_parts/offer-form'
 import { offerForm } from '@/app/(admin)/admin/[workshop]/modules/[module]/_parts/offer-values'
-import { PartsForm } from '@/app/(admin)/admin/[workshop]/modules/[module]/_parts/parts-form'
+import { ImportForm } from '@/app/(admin)/admin/[workshop]/modules/[module]/parts/import/_parts/import-form'
 import { PlanForm } from '@/components/plan/plan-form'
 import { RevisionForm } from '@/app/(admin)/admin/[workshop]/modules/[module]/_parts/revision-form'
 import { DetailsForm } from '@/app/(admin)/admin/[workshop]/settings/_parts/details-form'
@@ -13,7 +13,8 @@ import { StartForm } from '@/app/(public)/start/_parts/start-form'
 import { POST as postFacts } from '@/app/api/admin/[workshop]/modules/[module]/route'
 import { POST as postFirstUnit } from '@/app/api/admin/[workshop]/modules/[module]/first-unit/route'
 import { POST as postOffer } from '@/app/api/admin/[workshop]/modules/[module]/offers/route'
-import { POST as postParts } from '@/app/api/admin/[workshop]/modules/[module]/parts/route'
+import { POST as postConfirm } from '@/app/api/admin/[workshop]/modules/[module]/parts/import/confirm/route'
+import { POST as postImport } from '@/app/api/admin/[workshop]/modules/[module]/parts/import/route'
 import { POST as postPlan } from '@/app/api/admin/[workshop]/modules/[module]/plan/route'
 import { POST as postPublish } from '@/app/api/admin/[workshop]/modules/[module]/publish/route'
 import { POST as postRevision } from '@/app/api/admin/[workshop]/modules/[module]/revisions/route'
@@ -182,17 +183,25 @@ test('a revision with its parts list and first good unit', async () => {
   )
 
   const parts = async () => (await getPartsDesk({ actor: await actor(), workshopId, module: 'kedge' }))!
-  const list = createElement(PartsForm, { ...own, parts: await parts(), form: {} })
+  const take = async (text?: string) => {
+    const form = createElement(ImportForm, {
+      ...{ ...own, parts: await parts(), kind: 'lines', form: undefined },
+    })
+    const { file: _, ...typed } = typedForm(form, text === undefined ? {} : { text })
+    const sent = await send(postImport, mara, { ...typed, kind: 'lines' }, at)
+    const id = new URL(sent.to, 'http://localhost').searchParams.get('import') ?? ''
+    return (await send(postConfirm, mara, { import: id }, at)).to
+  }
   const csv =
     'code,designators,value,per_unit,kit,supplier,currency,breaks,quoted_on\nR-10K,"R1, R2",10k,2,buyer,Counter West,EUR,1: 0.0125,2027-02-28'
-  expect((await send(postParts, mara, typedForm(list, { csv }), at)).to).toContain('saved=1')
+  expect(await take(csv)).toContain('saved=1')
   const before = await parts()
   expect(before.lines).toMatchObject([
     { code: 'R-10K', perUnit: 2, quotedOn: '2027-02-28', sample: 'not_needed' },
   ])
   expect(before.findings).toEqual([])
-  const shown = createElement(PartsForm, { ...own, parts: before, form: { values: { csv: before.csv } } })
-  expect((await send(postParts, mara, typedForm(shown), at)).to).toContain('saved=1')
+  // The list as it is shown to be edited, sent again.
+  expect(await take()).toContain('saved=1')
   expect({ ...(await parts()), lines: [] }).toEqual({ ...before, lines: [] })
 })
 

@@ -8,7 +8,12 @@ import type { PartsDesk } from '@/lib/contracts/module-desk'
 import { partsAdminWords as words } from '@/lib/messages/parts-admin'
 import { paths } from '@/lib/paths'
 
-type Props = { slug: string; module: string; lines: PartsDesk['lines']; today: string }
+type Props = {
+  slug: string
+  module: string
+  lines: readonly Pick<PartsDesk['lines'][number], 'partId' | 'code' | 'sample'>[]
+  today: string
+}
 
 /** Records whether a sample of a marked part fits; nothing where no part is marked. */
 export function SampleForm({ slug, module, lines, today }: Props) {
