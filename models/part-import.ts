@@ -1,6 +1,7 @@
 import { type CreationOptional, type InferAttributes, type InferCreationAttributes, Model } from 'sequelize'
 import { sequelize } from '@/lib/db/sequelize'
 import { bytes, json, key, moment, optional, preset, ref, table, text } from './columns'
+import type { OfferKind } from './words'
 
 /** A file of parts or quotes as it was sent, until it is confirmed or a day has passed. */
 export class PartImport extends Model<InferAttributes<PartImport>, InferCreationAttributes<PartImport>> {
@@ -23,7 +24,7 @@ export class PartImport extends Model<InferAttributes<PartImport>, InferCreation
   /** Our heading for each column, '' for one left out; null while that is found out. */
   declare columns: string[] | null
   /** Who places a part where the file does not say, by offer. */
-  declare placedBy: CreationOptional<Record<string, string>>
+  declare placedBy: CreationOptional<{ [K in OfferKind]?: string }>
   /** When it was sent (business time). */
   declare createdAt: Date
   /** Who sent it. */

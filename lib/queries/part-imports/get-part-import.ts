@@ -48,7 +48,7 @@ export async function getPartImport({ actor, workshopId, module, id }: Asked): P
       example: lines[0]?.cells[read.columns[i] ?? ''] ?? '',
     })),
     headings: row.kind === 'lines' ? PART_HEADINGS : QUOTE_HEADINGS,
-    placedBy: { ...row.placedBy },
+    placedBy: row.placedBy,
     lines: lines.length,
     shownHeadings,
     shown: lines

@@ -7,6 +7,7 @@ import {
   type ImportKind,
   type ImportProblem,
 } from '@/lib/contracts/part-import'
+import type { OfferKind } from '@/lib/contracts/fields'
 import { NEEDED_HEADINGS, PART_HEADINGS, PartRow, QUOTE_HEADINGS, QuoteRow } from '@/lib/contracts/parts-list'
 import { matchColumns } from './match-columns'
 import { readTable, type TextTable } from './read-table'
@@ -30,8 +31,9 @@ type Asked = {
   encoding: Encoding | null
   delimiter: Delimiter | null
   columns: string[] | null
-  placedBy: Record<string, string>
+  placedBy: Placers
 }
+type Placers = { readonly [K in OfferKind]?: string }
 
 /** Sentences for what the file itself is, not what a cell says. */
 export const IMPORT_WORDS = {
@@ -109,9 +111,10 @@ function cellsOf(
 }
 
 /** Where no offer is said at a line, the answer given for the whole file counts. */
-function withPlacer(cells: Record<string, string>, placedBy: Record<string, string>): Record<string, string> {
+function withPlacer(cells: Record<string, string>, placedBy: Placers): Record<string, string> {
   const says = ['boards', 'kit', 'built'].some((offer) => (cells[offer] ?? '') !== '')
-  return says ? cells : { ...cells, ...placedBy }
+  if (says) return cells
+  return { ...cells, boards: placedBy.boards ?? '', kit: placedBy.kit ?? '', built: placedBy.built ?? '' }
 }
 
 function parsed<T extends z.ZodType>(
