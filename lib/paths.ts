@@ -52,7 +52,7 @@ export const paths = {
   adminModulePage: (
     workshop: string,
     module: string,
-    page: 'facts' | 'offers' | 'revisions' | 'parts' | 'plan' | 'preview',
+    page: 'facts' | 'offers' | 'revisions' | 'parts' | 'plan' | 'preview' | 'files',
   ) => `/admin/${part(workshop)}/modules/${part(module)}/${page}`,
   adminPartImport: (
     workshop: string,
@@ -67,7 +67,17 @@ export const paths = {
   adminRunPage: (
     workshop: string,
     run: string,
-    page: 'demand' | 'costs' | 'orders' | 'buying' | 'bench' | 'packing' | 'money' | 'messages',
+    page:
+      | 'demand'
+      | 'costs'
+      | 'what-ifs'
+      | 'schedule'
+      | 'orders'
+      | 'buying'
+      | 'bench'
+      | 'packing'
+      | 'money'
+      | 'messages',
   ) => `/admin/${part(workshop)}/runs/${part(run)}/${page}`,
   adminRunUnits: (workshop: string, run: string) => `/admin/${part(workshop)}/runs/${part(run)}/units`,
   adminRunDeed: (workshop: string, run: string, deed: 'open' | 'lock' | 'call-off' | 'ask-balances') =>
@@ -97,6 +107,7 @@ export const paths = {
 
   api: {
     health: '/api/health',
+    file: (file: string) => `/api/files/${part(file)}`,
     openapi: '/api/openapi.json',
     auth: '/api/auth',
     signIn: '/api/signin',
@@ -160,6 +171,8 @@ export const paths = {
         | 'parts/stock'
         | 'parts/alternates'
         | 'parts/alternates/remove'
+        | 'files'
+        | 'files/remove'
         | 'samples'
         | 'plan',
     ) => `/api/admin/${part(workshop)}/modules/${part(module)}/${what}`,
@@ -168,7 +181,18 @@ export const paths = {
     adminRunDeed: (
       workshop: string,
       run: string,
-      deed: 'open' | 'lock' | 'call-off' | 'ask-balances' | 'lower-minimum' | 'close' | 'plan' | 'plan/try',
+      deed:
+        | 'open'
+        | 'lock'
+        | 'call-off'
+        | 'ask-balances'
+        | 'lower-minimum'
+        | 'close'
+        | 'plan'
+        | 'plan/try'
+        | 'what-ifs'
+        | 'what-ifs/remove'
+        | 'closed-days',
     ) => `/api/admin/${part(workshop)}/runs/${part(run)}/${deed}`,
     adminBulk: (workshop: string, bulk: string) => `/api/admin/${part(workshop)}/bulk/${part(bulk)}`,
     packingQueue: (workshop: string) => `/api/packing/${part(workshop)}/queue`,

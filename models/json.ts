@@ -122,6 +122,11 @@ export type PlanStep = {
   likely: number
   pessimistic: number
   after: string[]
+  /** Offers that need it; left out or empty: all. */
+  offers?: OfferKind[]
+  /** First and last day on which whoever does it is closed; both or none. */
+  closedFrom?: string | null
+  closedTo?: string | null
 }
 
 /** Who places a part, per offer that needs it. */

@@ -1,6 +1,6 @@
 import { type CreationOptional, type InferAttributes, type InferCreationAttributes, Model } from 'sequelize'
 import { sequelize } from '@/lib/db/sequelize'
-import { flag, json, key, moment, optional, preset, ref, table, text } from './columns'
+import { flag, json, key, moment, optional, preset, ref, table, text, whole } from './columns'
 import type { PlanStep } from './json'
 
 /** A cost plan with its schedule: the base of a module or run, or a named what-if. */
@@ -21,6 +21,8 @@ export class Plan extends Model<InferAttributes<Plan>, InferCreationAttributes<P
   declare plan: Record<string, unknown>
   /** Steps of the schedule with three-point estimates, days. */
   declare steps: CreationOptional<PlanStep[]>
+  /** The quantity a what-if is about; null: the run's own. */
+  declare units: CreationOptional<number | null>
   /** When it was made (business time). */
   declare createdAt: Date
   /** When it was last changed (business time). */
@@ -39,6 +41,7 @@ Plan.init(
     isBase: preset(flag(), true),
     plan: json(),
     steps: preset(json(), []),
+    units: optional(whole()),
     createdAt: moment(),
     changedAt: moment(),
     changedByPersonId: ref(),

@@ -30,6 +30,7 @@ export function BalancePlot(facts: BalanceChartFacts & { across: 'wide' | 'narro
     `M${PLOT.left} ${round(y(0))}`,
   )
   const lowX = lowOn === null ? PLOT.left : round(x(dayNumber(lowOn)))
+  const isRight = lowX > width / 2
   return (
     <svg
       viewBox={`0 0 ${width} ${bottom + 24}`}
@@ -77,8 +78,9 @@ export function BalancePlot(facts: BalanceChartFacts & { across: 'wide' | 'narro
         <>
           <circle cx={lowX} cy={round(y(low))} r="5" className="fill-sheet stroke-rust" strokeWidth="1.75" />
           <text
-            x={Math.min(lowX + 10, right - 60)}
+            x={isRight ? lowX - 10 : lowX + 10}
             y={round(y(low)) - 8}
+            textAnchor={isRight ? 'end' : 'start'}
             className="figures fill-ink stroke-sheet stroke-4 font-semibold [paint-order:stroke]"
           >
             {charts.lowest}

@@ -9,7 +9,9 @@ type Props = {
   figures: CostFigures | null
   /** Answers with the figures of the plan as it is typed. */
   tryAt: string
-  /** The forms whose fields make the plan and the quantity. */
+  /** The form that asks for the quantity, above the sheets. */
+  question: React.ReactNode
+  /** The form of the plan, below them. */
   children: React.ReactNode
 }
 
@@ -17,7 +19,7 @@ type Props = {
 const PAUSE_MS = 60
 
 /** The sheets of costs, which follow the forms below them while they are filled in. Without script they show what is saved. */
-export function LiveCosts({ figures: first, tryAt, children }: Props) {
+export function LiveCosts({ figures: first, tryAt, question, children }: Props) {
   const [figures, setFigures] = useState(first)
   const [isUnread, setUnread] = useState(false)
   const [isChanged, setChanged] = useState(false)
@@ -53,11 +55,10 @@ export function LiveCosts({ figures: first, tryAt, children }: Props) {
     }
   }, [tryAt])
   return (
-    <div className="flex flex-col gap-6">
+    <div ref={forms} className="flex flex-col gap-6">
+      {question}
       {figures ? <CostSheets figures={figures} /> : null}
-      <div ref={forms} className="flex flex-col gap-6 print:hidden">
-        {children}
-      </div>
+      <div className="print:hidden">{children}</div>
       {isChanged && figures ? <LiveLine figures={figures} isUnread={isUnread} /> : null}
     </div>
   )

@@ -18,6 +18,7 @@ export const FORM_CONTRACTS = {
   moduleNew: async () => (await import('@/lib/contracts/module-forms')).ModuleNewInput,
   moduleFacts: async () => (await import('@/lib/contracts/module-forms')).ModuleFactsInput,
   offer: async () => (await import('@/lib/contracts/module-forms')).OfferInput,
+  whatIf: async () => (await import('@/lib/contracts/what-ifs')).WhatIfInput,
   quote: async () => (await import('@/lib/contracts/part-forms')).QuoteInput,
   plan: async () => (await import('@/lib/contracts/plan-forms')).PlanInput,
 } satisfies Record<string, () => Promise<z.ZodType>>

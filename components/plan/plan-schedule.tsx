@@ -1,4 +1,4 @@
-import { RowsField } from '@/components/forms/rows-field'
+import { RowsField, type RowColumn } from '@/components/forms/rows-field'
 import type { FormState } from '@/components/ui/form-state'
 import { Sheet } from '@/components/ui/sheet'
 import { planAdminWords as words } from '@/lib/messages/plan-admin'
@@ -6,7 +6,7 @@ import { planAdminWords as words } from '@/lib/messages/plan-admin'
 /** The steps from the lock to the last parcel, each with three estimates. */
 export function PlanSchedule({ form }: { form: FormState }) {
   return (
-    <Sheet title={words.schedule}>
+    <Sheet title={words.schedule} id="schedule">
       <RowsField
         name="steps"
         legend={words.steps}
@@ -21,6 +21,13 @@ export function PlanSchedule({ form }: { form: FormState }) {
           { name: 'likely', label: words.likely, kind: 'number', unit: words.days },
           { name: 'pessimistic', label: words.pessimistic, kind: 'number', unit: words.days },
           { name: 'after', label: words.after },
+          ...(['boards', 'kit', 'built'] as const).map((offer): RowColumn => ({
+            name: offer,
+            label: words.stepFor[offer],
+            kind: 'tick',
+          })),
+          { name: 'closedFrom', label: words.closedFrom, kind: 'date' },
+          { name: 'closedTo', label: words.closedTo, kind: 'date' },
         ]}
       />
     </Sheet>

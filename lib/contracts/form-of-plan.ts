@@ -14,6 +14,9 @@ type Step = {
   likely: number
   pessimistic: number
   after: readonly string[]
+  offers?: readonly string[]
+  closedFrom?: string | null
+  closedTo?: string | null
 }
 
 /** A stored plan as the short form shows it (see `formValues`); what the form does not ask is left as the plan has it. */
@@ -90,8 +93,11 @@ export function formOfPlan(plan: CostPlan, steps: readonly Step[]) {
       on,
       margin: writeShare(marginBasisPoints),
     })),
-    steps: steps.map(({ id: _id, after, ...step }) => ({
+    steps: steps.map(({ id: _id, after, offers = [], ...step }) => ({
       ...step,
+      boards: offers.includes('boards'),
+      kit: offers.includes('kit'),
+      built: offers.includes('built'),
       after: after.map((id) => steps.findIndex((other) => other.id === id) + 1).join(', '),
     })),
   }

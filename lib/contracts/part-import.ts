@@ -72,6 +72,8 @@ export type ImportPreview = {
   id: string
   kind: ImportKind
   revision: string
+  /** The file as text, to be mended on the spot; empty where it is too long for that. */
+  text: string
   fileName: string
   encoding: Encoding
   delimiter: Delimiter

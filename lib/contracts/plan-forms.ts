@@ -106,6 +106,7 @@ const OfferWork = z.object({
   packaging: typed,
 })
 
+const OFFERS = ['boards', 'kit', 'built'] as const
 const days = wholeNumber(0, 1000, 'Enter whole working days, from 0 to 1000.')
 /** A step of the schedule; `after` names rows of the list by their numbers. */
 const Step = z
@@ -119,6 +120,11 @@ const Step = z
       .string()
       .default('')
       .transform((list) => list.split(/[\s,;]+/).filter((each) => each !== '')),
+    boards: tick,
+    kit: tick,
+    built: tick,
+    closedFrom: blank(day()),
+    closedTo: blank(day()),
   })
   .superRefine(({ optimistic, likely, pessimistic }, check) => {
     if (likely < optimistic)
@@ -126,6 +132,18 @@ const Step = z
     if (pessimistic < likely)
       check.addIssue({ code: 'custom', path: ['pessimistic'], message: 'Not before the likely one.' })
   })
+  .superRefine(({ closedFrom, closedTo }, check) => {
+    const at = (path: string, message: string) => check.addIssue({ code: 'custom', path: [path], message })
+    if (closedFrom && !closedTo) at('closedTo', 'Enter the last closed day as well.')
+    if (!closedFrom && closedTo) at('closedFrom', 'Enter the first closed day as well.')
+    if (closedFrom && closedTo && closedTo < closedFrom) at('closedTo', 'Not before the first closed day.')
+  })
+  .transform(({ boards, kit, built, closedFrom, closedTo, ...step }) => ({
+    ...step,
+    offers: OFFERS.filter((offer) => ({ boards, kit, built })[offer]),
+    closedFrom: closedFrom ?? null,
+    closedTo: closedTo ?? null,
+  }))
 
 /** Rows carry the number they are shown with, so that others can name them. */
 const numbered = (list: unknown) =>

@@ -6,6 +6,7 @@ export const moduleMistakes = {
   mendedBefore: 'A lesson is mended in a later revision than the one it was found on.',
   partUnknown: 'You have no part of this code.',
   partItself: 'This is the part itself. Enter another.',
+  whatIfNameTaken: 'Another plan of this run is called that. Choose another name.',
   notYet: 'This day has not come yet.',
   notAMember: 'Choose somebody who works for the workshop.',
   priceList: 'Enter prices between commas, rising, at most eight: 75, 85, 95.',

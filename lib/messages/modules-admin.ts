@@ -29,6 +29,7 @@ export const modulesAdminWords = {
     revisions: 'Revisions and lessons',
     parts: 'Parts list',
     plan: 'Cost plan',
+    files: 'Pictures and files',
   },
   publicPage: 'See its public page',
   preview: 'Preview',

@@ -66,6 +66,11 @@ export const importWords = {
   findingsLead: 'None of this keeps you from saving; an error keeps a run from being ready.',
   moreOf: (shown: number, all: number) => `${writtenNumber(shown)} of ${writtenNumber(all)} are shown.`,
 
+  mend: 'Mend it here',
+  mendText: 'The file as text',
+  mendHint: 'Line 1 are the headings. Change what is wrong; nothing is saved by looking again.',
+  lookAgain: 'Look at it again',
+
   preview: 'The first lines as they are read, and every line something is wrong with',
   lineHeading: 'Line',
   remark: 'Remark',

@@ -126,7 +126,11 @@ export const planAdminWords = {
   ],
 
   schedule: 'Schedule',
-  scheduleHint: 'Working days: at best, likely, at worst. “After” names rows by their number.',
+  scheduleHint:
+    'Working days: at best, likely, at worst. “After” names rows by their number. Tick offers where a step is not for all of them; closed days are those of whoever does it.',
+  stepFor: { boards: 'For PCB sets', kit: 'For kits', built: 'For built ones' },
+  closedFrom: 'Closed from',
+  closedTo: 'Closed until',
   steps: 'Steps from the lock to the last parcel',
   stepRow: (row: number) => `Step ${row}`,
   step: 'Step',

@@ -65,6 +65,8 @@ export const runWords = {
   pages: 'Pages of this run',
   decision: 'Decision',
   costsTitle: 'Costs',
+  whatIfsTitle: 'What if',
+  scheduleTitle: 'Schedule',
   publicPage: 'The public page',
   gauge: 'Deposits',
   readiness: 'Readiness list',

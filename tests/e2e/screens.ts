@@ -103,6 +103,7 @@ export const SCREENS: Readonly<Record<string, { by: Looker; at: (found: Found) =
   '/admin/[workshop]/modules/new': { by: 'owner', at: () => [`${ADMIN}/modules/new`] },
   '/admin/[workshop]/modules/[module]': { by: 'owner', at: () => [ROWLOCK] },
   '/admin/[workshop]/modules/[module]/facts': { by: 'owner', at: () => [`${ROWLOCK}/facts`] },
+  '/admin/[workshop]/modules/[module]/files': { by: 'owner', at: () => [`${ROWLOCK}/files`] },
   '/admin/[workshop]/modules/[module]/offers': { by: 'owner', at: () => [`${ROWLOCK}/offers?offer=kit`] },
   '/admin/[workshop]/modules/[module]/parts': { by: 'owner', at: () => [`${ROWLOCK}/parts`] },
   '/admin/[workshop]/modules/[module]/parts/[part]': {
@@ -132,6 +133,17 @@ export const SCREENS: Readonly<Record<string, { by: Looker; at: (found: Found) =
   '/admin/[workshop]/runs/[run]/costs': {
     by: 'owner',
     at: ({ rowlock, fairlead }) => [`${ADMIN}/runs/${rowlock}/costs`, `${ADMIN}/runs/${fairlead}/costs`],
+  },
+  '/admin/[workshop]/runs/[run]/schedule': {
+    by: 'owner',
+    at: ({ rowlock }) => [
+      `${ADMIN}/runs/${rowlock}/schedule`,
+      `${ADMIN}/runs/${rowlock}/schedule?step=1&days=10`,
+    ],
+  },
+  '/admin/[workshop]/runs/[run]/what-ifs': {
+    by: 'owner',
+    at: ({ rowlock }) => [`${ADMIN}/runs/${rowlock}/what-ifs`],
   },
   '/admin/[workshop]/runs/[run]/open': {
     by: 'owner',

@@ -32,6 +32,8 @@ import { getSiteFront } from '@/lib/queries/public/get-site-front'
 import { getWorkshopFront } from '@/lib/queries/public/get-workshop-front'
 import { getCostDesk } from '@/lib/queries/runs/get-cost-desk'
 import { getRunPage } from '@/lib/queries/runs/get-run-page'
+import { getSchedule } from '@/lib/queries/runs/get-schedule'
+import { getWhatIfs } from '@/lib/queries/runs/get-what-ifs'
 import { listRunOrders } from '@/lib/queries/runs/list-run-orders'
 import { listRuns } from '@/lib/queries/runs/list-runs'
 import { getDesk } from '@/lib/queries/workshops/get-desk'
@@ -174,6 +176,14 @@ const LISTS: Readonly<
   'page of a run': {
     ask: () => getRunPage({ ...asked(), runId: world.run.id, balanceMinor: 0 }),
     rows: ({ orders }: { orders: Record<string, number> }) => orders['reserved'] ?? 0,
+  },
+  'schedule of a run': {
+    ask: () => getSchedule({ ...asked(), runId: world.run.id, slip: null }),
+    rows: () => 5,
+  },
+  'what-ifs of a run': {
+    ask: () => getWhatIfs({ ...asked(), runId: world.run.id }),
+    rows: () => 5,
   },
   'costs of a run': {
     ask: () => getCostDesk({ ...asked(), runId: world.run.id }),

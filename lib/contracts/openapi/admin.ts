@@ -1,12 +1,15 @@
 import type { z } from 'zod'
 import type { Deed } from '@/lib/core/policy/deeds'
 import { CostTrial } from '../cost-desk'
+import { FileInput, FileRemoval } from '../files'
 import * as forms from '../module-forms'
 import * as parts from '../part-forms'
 import { ImportConfirm, ImportSettings, ImportStart } from '../part-import'
 import { PlanInput } from '../plan-forms'
 import { CallOffInput, LockInput, LowerMinimumInput, RunInput } from '../runs'
+import { ClosedDaysInput } from '../schedule'
 import * as settings from '../settings'
+import { WhatIfInput, WhatIfRemoval } from '../what-ifs'
 import type { Operation } from './operation'
 
 const post = (
@@ -86,6 +89,11 @@ export const WORKSHOP_OPERATIONS: readonly Operation[] = [
   post(`${module}/lessons`, 'Write down a lesson', 'lesson:write', forms.LessonInput),
   post(`${module}/lessons/mend`, 'Say which revision mends a lesson', 'lesson:mend', forms.MendInput),
   post(`${module}/lessons/waive`, 'Live with a lesson, with a reason', 'lesson:waive', forms.WaiveInput),
+  post(`${module}/files`, 'A picture, a sound or a document', 'file:add', FileInput, {
+    status: 201,
+    answer: '{file, kind}',
+  }),
+  post(`${module}/files/remove`, 'Take a file away', 'file:remove', FileRemoval),
   post(`${module}/parts/import`, 'Send a file of parts or quotes', 'part:import', ImportStart, {
     status: 201,
     answer: '{import, revision}',
@@ -126,6 +134,9 @@ export const RUN_OPERATIONS: readonly Operation[] = [
   post(`${run}/plan/try`, 'Figures of a plan, nothing saved', 'cost:read', CostTrial, {
     answer: 'CostFigures',
   }),
+  post(`${run}/what-ifs`, 'Keep the plan with something different', 'cost:write', WhatIfInput),
+  post(`${run}/what-ifs/remove`, 'Throw a what-if away', 'cost:write', WhatIfRemoval),
+  post(`${run}/closed-days`, 'Days the workshop does not work', 'schedule:write', ClosedDaysInput),
   post(`${run}/close`, 'Close a run whose orders are all at an end', 'run:close'),
   get('/bulk/{bulk}', 'How far a bulk job is', 'bulk:read', '{total, done, failed}'),
 ]

@@ -16,6 +16,13 @@ export const PUBLIC_OPERATIONS: readonly Operation[] = [
   },
   {
     method: 'GET',
+    path: '/api/files/{file}',
+    summary: 'A picture, sound or document, for who may see it',
+    deed: 'anybody',
+    answer: 'the file',
+  },
+  {
+    method: 'GET',
     path: '/api/openapi.json',
     summary: 'This description',
     deed: 'anybody',

@@ -1,10 +1,9 @@
 import type { Minor } from '@/lib/core/brand'
-import { readDecimal } from '@/lib/core/costs/decimal'
 import type { CostPlan } from '@/lib/core/costs/plan'
 import type { PlanQuote } from '@/lib/core/costs/plan-buying'
 import { costRun } from '@/lib/core/costs/run-cost'
+import { scaled, type Scaled } from '@/lib/core/costs/scaled'
 import { divide } from '@/lib/core/money/allocate'
-import { roundHalfUp } from '@/lib/core/money/round'
 
 /** An input of a plan that may turn out differently than written. */
 export type MoverKey =
@@ -34,29 +33,20 @@ export type Mover = {
 }
 
 type Case = { readonly plan: CostPlan; readonly quantities: Readonly<Record<string, number>> }
-type Times = { readonly whole: (value: number) => number; readonly exact: (value: string) => string }
 
 /** Points of yield lost or won; a tenth of a yield near 100 % could not be won. */
 const YIELD_POINTS = 500
 
-const times = (tenths: 9 | 11): Times => ({
-  whole: (value) => roundHalfUp(value * tenths, 10),
-  exact: (value) => {
-    const { digits, scale } = readDecimal('price', value)
-    const places = String(scale).length
-    const text = String(digits * BigInt(tenths)).padStart(places + 1, '0')
-    return `${text.slice(0, -places)}.${text.slice(-places)}`
-  },
-})
+const [LESS, MORE] = [scaled(90), scaled(110)]
 
-const quotesTimes = (quotes: readonly PlanQuote[], by: Times): PlanQuote[] =>
+const quotesTimes = (quotes: readonly PlanQuote[], by: Scaled): PlanQuote[] =>
   quotes.map((quote) => ({
     ...quote,
     setup: by.whole(quote.setup),
     breaks: quote.breaks.map(({ from, unitPrice }) => ({ from, unitPrice: by.exact(unitPrice) })),
   }))
 
-const CHANGES: Readonly<Record<Exclude<MoverKey, 'rate' | 'yield'>, (from: Case, by: Times) => Case>> = {
+const CHANGES: Readonly<Record<Exclude<MoverKey, 'rate' | 'yield'>, (from: Case, by: Scaled) => Case>> = {
   price: ({ plan, quantities }, by) => ({
     plan: {
       ...plan,
@@ -151,7 +141,7 @@ const CHANGES: Readonly<Record<Exclude<MoverKey, 'rate' | 'yield'>, (from: Case,
   }),
 }
 
-const withRate = (plan: CostPlan, currency: string, by: Times): CostPlan => ({
+const withRate = (plan: CostPlan, currency: string, by: Scaled): CostPlan => ({
   ...plan,
   rates: plan.rates.map((each) =>
     each.currency === currency ? { ...each, rate: by.exact(each.rate) } : each,
@@ -186,7 +176,7 @@ export function movers(plan: CostPlan, quantities: Readonly<Record<string, numbe
   }
   const keys = Object.keys(CHANGES) as (keyof typeof CHANGES)[]
   const found = [
-    ...keys.map((key) => mover(key, '', CHANGES[key](given, times(9)), CHANGES[key](given, times(11)))),
+    ...keys.map((key) => mover(key, '', CHANGES[key](given, LESS), CHANGES[key](given, MORE))),
     mover(
       'yield',
       '',
@@ -197,8 +187,8 @@ export function movers(plan: CostPlan, quantities: Readonly<Record<string, numbe
       mover(
         'rate',
         currency,
-        { ...given, plan: withRate(plan, currency, times(9)) },
-        { ...given, plan: withRate(plan, currency, times(11)) },
+        { ...given, plan: withRate(plan, currency, LESS) },
+        { ...given, plan: withRate(plan, currency, MORE) },
       ),
     ),
   ]

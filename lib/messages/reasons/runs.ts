@@ -39,6 +39,8 @@ export const runs: Record<string, string> = {
   order_short_of_end: 'Some orders are not posted yet. Close the run when the last one is.',
   problem_open: 'A buyer’s problem is still open. Answer and close it first.',
   refund_pending: 'A refund is still on its way. Close the run when it has arrived.',
+  no_plan: 'This run has no plan of its own yet. Save one under Costs first.',
+  too_many_what_ifs: 'Three what-ifs stand beside the plan already. Remove one first.',
   run_ended: 'This run has ended; its plan is kept as it was.',
   conversions_missing: 'What became of the sign-ups could not be stored. Try again.',
 }

@@ -6,10 +6,14 @@ import { Module, PartImport, Revision } from '@/models'
 import { changesOf } from './changes-of'
 import { checkImport } from './check-import'
 import { readImport } from './read-import'
+import { decodeText } from './read-table'
 
 /** Lines shown from the top; those with something wrong are shown wherever they stand, up to the second number. */
 const SHOWN = 30
 const SHOWN_WRONG = 200
+
+/** Longer texts are mended in the program they come from. */
+const MOST_MENDED = 300_000
 
 type Asked = { actor: Actor; workshopId: string; module: string; id: string }
 
@@ -39,6 +43,7 @@ export async function getPartImport({ actor, workshopId, module, id }: Asked): P
     id,
     kind: row.kind,
     revision: revision.letter,
+    text: textOf(row.content, read.encoding),
     fileName: row.fileName,
     encoding: read.encoding,
     delimiter: read.delimiter,
@@ -64,4 +69,9 @@ export async function getPartImport({ actor, workshopId, module, id }: Asked): P
     changes,
     unchanged,
   }
+}
+
+function textOf(content: Buffer, encoding: ImportPreview['encoding']): string {
+  const decoded = decodeText(content, encoding)
+  return decoded.ok && decoded.value.text.length <= MOST_MENDED ? decoded.value.text : ''
 }

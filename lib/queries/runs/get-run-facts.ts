@@ -85,13 +85,7 @@ async function readPlan(run: Run, tx: Transaction | null): Promise<RunFacts['pla
   if (!plan) return null
   return {
     costs: plan.plan as unknown as CostPlan,
-    steps: plan.steps.map(({ id, optimistic, likely, pessimistic, after }) => ({
-      id,
-      optimistic,
-      likely,
-      pessimistic,
-      after,
-    })),
+    steps: plan.steps.map(({ name: _, ...step }) => step),
     names: Object.fromEntries(plan.steps.map(({ id, name }) => [id, name])),
   }
 }

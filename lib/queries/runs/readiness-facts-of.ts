@@ -16,7 +16,6 @@ export function readinessFactsOf(facts: RunFacts, balanceMinor: number | null): 
   const marked = [...new Map(lines.map((line) => [line.partId, line])).values()].filter(
     ({ needsSample }) => needsSample,
   )
-  const finish = finishOf(facts)
   return {
     goodUnits: firstUnits.tried === 0 ? null : firstUnits.good,
     openLessons: facts.openLessons,
@@ -28,10 +27,10 @@ export function readinessFactsOf(facts: RunFacts, balanceMinor: number | null): 
     partsListErrors:
       lines.length === 0 ? null : lintParts(lines).filter(({ severity }) => severity === 'error').length,
     post: offers.map((offer) => ({ ...offer, hasDestinations: offer.openDestinations > 0 })),
-    promises: offers.map(({ postedByOn }) => ({
-      postedBy: postedByOn,
-      likelyBy: finish && likelyBy(facts, finish),
-    })),
+    promises: offers.map(({ kind, postedByOn }) => {
+      const finish = finishOf(facts, kind)
+      return { postedBy: postedByOn, likelyBy: finish && likelyBy(facts, finish) }
+    }),
     page,
     canRepay: repayOf(facts, balanceMinor)?.yes ?? null,
     waivers: facts.waivers,

@@ -5,7 +5,7 @@ import type { OrderState } from '@/lib/core/states/order'
 import type { Day } from '@/lib/core/brand'
 import type { PartsLine } from '@/lib/core/parts/lint'
 import type { Waiver } from '@/lib/core/states/run-readiness'
-import type { ScheduleStep } from '@/lib/core/schedule/finish'
+import type { PlannedStep } from '@/lib/core/schedule/closures'
 import type { RunState } from '@/lib/core/states/run'
 import type { OfferKind, OrderKind } from '@/models/words'
 
@@ -82,7 +82,7 @@ export type RunFacts = {
   signUps: { confirmed: number; notOrdered: SignUpFacts[] }
   /** What earlier runs of the workshop taught, per class. */
   outcomes: { className: ConversionClass; converted: number; notConverted: number }[]
-  plan: { costs: CostPlan; steps: ScheduleStep[]; names: Record<string, string> } | null
+  plan: { costs: CostPlan; steps: PlannedStep[]; names: Record<string, string> } | null
   closedDays: Day[]
   firstUnits: { tried: number; good: number }
   /** Built units of the module's runs whose fate is known. */

@@ -149,6 +149,9 @@ export function shortPlan(given: Costs): Record<string, unknown> {
     refundShare: '4',
     disputeShare: '0.3',
     disputeFixedMinor: 2000,
+    laterUnits: 12,
+    failurePercent: '2',
+    canLayOutMinor: 150000,
     taxes: [
       { rate: '19', weight: 3 },
       { rate: '0', weight: 2 },
@@ -198,7 +201,7 @@ export function shortPlan(given: Costs): Record<string, unknown> {
       { name: 'Boards made and fitted', optimistic: 12, likely: 18, pessimistic: 35, after: '' },
       { name: 'Front panels made', optimistic: 8, likely: 12, pessimistic: 25, after: '' },
       { name: 'Parts arrive', optimistic: 4, likely: 7, pessimistic: 30, after: '' },
-      { name: 'Built and tested', optimistic: 8, likely: 14, pessimistic: 25, after: '1, 2, 3' },
+      { name: 'Built and tested', optimistic: 8, likely: 14, pessimistic: 25, after: '1, 2, 3', built: 'on' },
       { name: 'Packed and posted', optimistic: 3, likely: 5, pessimistic: 10, after: '4' },
     ],
   }

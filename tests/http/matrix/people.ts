@@ -46,6 +46,7 @@ export async function matrixWorld() {
     bulk: bulk.id,
     invoice: (await makeInvoice(world.order)).id,
     part: part.id,
+    file: bulk.id,
     revision: world.revision.letter,
     move: 'open',
     token: makeToken(),

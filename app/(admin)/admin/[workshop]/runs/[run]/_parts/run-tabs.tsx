@@ -5,6 +5,11 @@ import { unitWords } from '@/lib/messages/units'
 import { paths } from '@/lib/paths'
 
 type Props = { workshop: string; run: string; current: 'run' | 'costs' | 'orders' | 'units' | 'money' }
+type Props = {
+  workshop: string
+  run: string
+  current: 'run' | 'costs' | 'what-ifs' | 'schedule' | 'orders' | 'units'
+}
 
 /** The pages of a run, side by side. */
 export function RunTabs({ workshop, run, current }: Props) {
@@ -17,6 +22,16 @@ export function RunTabs({ workshop, run, current }: Props) {
           href: paths.adminRunPage(workshop, run, 'costs'),
           label: words.costsTitle,
           current: current === 'costs',
+        },
+        {
+          href: paths.adminRunPage(workshop, run, 'what-ifs'),
+          label: words.whatIfsTitle,
+          current: current === 'what-ifs',
+        },
+        {
+          href: paths.adminRunPage(workshop, run, 'schedule'),
+          label: words.scheduleTitle,
+          current: current === 'schedule',
         },
         {
           href: paths.adminRunPage(workshop, run, 'orders'),

@@ -47,8 +47,11 @@ export default async function RunCostsPage({ params, searchParams }: Props) {
       <Stack>
         <OutcomeNotice form="run-plan" saved={saved} />
         <PlanNotes slug={slug} desk={desk} />
-        <LiveCosts figures={desk.figures} tryAt={paths.api.adminRunDeed(slug, run, 'plan/try')}>
-          <UnitsForm action={here} units={units} />
+        <LiveCosts
+          figures={desk.figures}
+          tryAt={paths.api.adminRunDeed(slug, run, 'plan/try')}
+          question={<UnitsForm action={here} units={units} />}
+        >
           <PlanForm
             action={paths.api.adminRunDeed(slug, run, 'plan')}
             currency={desk.run.currency}

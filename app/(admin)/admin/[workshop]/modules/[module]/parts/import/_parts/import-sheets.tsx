@@ -6,6 +6,7 @@ import { importWords as words } from '@/lib/messages/part-imports'
 import { paths } from '@/lib/paths'
 import { ChangesSheet } from './changes-sheet'
 import { ImportTable } from './import-table'
+import { MendForm } from './mend-form'
 import { MistakesSheet } from './mistakes-sheet'
 import { SettingsForm } from './settings-form'
 
@@ -32,6 +33,7 @@ export function ImportSheets({ slug, module, preview, form }: Props) {
           {words.anew}
         </LinkButton>
       </ButtonRow>
+      <MendForm {...{ slug, module, preview }} />
       <SettingsForm {...{ slug, module, preview, form }} />
       <ImportTable preview={preview} />
     </>
