@@ -171,6 +171,8 @@ export const paths = {
         | 'parts/stock'
         | 'parts/alternates'
         | 'parts/alternates/remove'
+        | 'choices'
+        | 'choices/retire'
         | 'files'
         | 'files/remove'
         | 'samples'

@@ -1,5 +1,6 @@
 import { emptyPlan, type CostPlan } from '@/lib/core/costs/plan'
 import type { PlanPart } from '@/lib/core/costs/plan-buying'
+import type { PlanChoice } from '@/lib/core/costs/plan-selling'
 import type { TaxMode } from '@/lib/core/orders/tax-rate'
 import type { PlanInput } from './plan-forms'
 import { readUnitPrice } from '@/lib/core/plain/unit-price'
@@ -12,6 +13,8 @@ export type PlanSetting = {
   pricesIncludeTax: boolean
   payoutDelayDays: number
   parts: readonly PlanPart[]
+  /** The questions the offers ask; those of an offer that is not sold are left out. */
+  choices?: readonly PlanChoice[]
 }
 
 /** The short form as the cost plan the core computes with. An offer the form does not name takes no work and no packaging. */
@@ -35,6 +38,7 @@ export function planOfForm(form: PlanInput, setting: PlanSetting): CostPlan {
         packaging: packagingOf(work?.packaging),
       }
     }),
+    choices: (setting.choices ?? []).filter(({ offer }) => setting.offers.some(({ kind }) => kind === offer)),
     oneOff: form.oneOff,
     atRisk: form.atRisk,
     boards: form.boards.map(({ name, kind, perUnit, perArray, spare, neededFor, stencil, ...quote }, i) => ({

@@ -31,6 +31,7 @@ export const modulesAdminWords = {
     plan: 'Cost plan',
     files: 'Pictures and files',
   },
+  mustMend: 'What the next revision must mend, or you live with for a reason:',
   publicPage: 'See its public page',
   preview: 'Preview',
   previewWords:

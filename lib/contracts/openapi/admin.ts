@@ -1,5 +1,6 @@
 import type { z } from 'zod'
 import type { Deed } from '@/lib/core/policy/deeds'
+import { ChoiceInput, ChoiceRetirement } from '../choice-forms'
 import { CostTrial } from '../cost-desk'
 import { FileInput, FileRemoval } from '../files'
 import * as forms from '../module-forms'
@@ -89,6 +90,8 @@ export const WORKSHOP_OPERATIONS: readonly Operation[] = [
   post(`${module}/lessons`, 'Write down a lesson', 'lesson:write', forms.LessonInput),
   post(`${module}/lessons/mend`, 'Say which revision mends a lesson', 'lesson:mend', forms.MendInput),
   post(`${module}/lessons/waive`, 'Live with a lesson, with a reason', 'lesson:waive', forms.WaiveInput),
+  post(`${module}/choices`, 'Ask one more question with an offer', 'choice:write', ChoiceInput),
+  post(`${module}/choices/retire`, 'Ask a question no longer', 'choice:write', ChoiceRetirement),
   post(`${module}/files`, 'A picture, a sound or a document', 'file:add', FileInput, {
     status: 201,
     answer: '{file, kind}',

@@ -27,6 +27,7 @@ export async function tryCosts(cmd: {
     payoutDelayDays: workshop.payoutDelayDays,
     offers: facts.offers,
     parts: facts.plan?.costs.parts ?? [],
+    choices: facts.plan?.costs.choices ?? [],
   })
   const tried = { ...facts, plan: { costs, steps: input.steps, names: {} } }
   return costFiguresOf(tried, { units: input.units, locale: workshop.locale })

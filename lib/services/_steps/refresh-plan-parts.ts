@@ -1,10 +1,12 @@
 import 'server-only'
 import { col, fn, type Transaction } from 'sequelize'
+import type { CostPlan } from '@/lib/core/costs/plan'
 import { Plan, Revision } from '@/models'
+import { planChoices } from './plan-choices'
 import { planParts } from './plan-parts'
 
 /**
- * Brings the parts list of a module's newest revision into its base plan, which costs are computed from. Nothing to do
+ * Brings the parts list of a module's newest revision and the questions of its offers into its base plan, which costs are computed from. Nothing to do
  * while there is no plan. Plans of runs keep the list they were made with.
  * Locks: nothing; the caller holds the module. Writes: the plan. Repeat: safe.
  */
@@ -16,8 +18,10 @@ export async function refreshPlanParts(
   if (!plan) return
   const newest = await newestRevision(tx, moduleId)
   const parts = newest ? await planParts(tx, newest.id) : []
+  const offers = (plan.plan as unknown as CostPlan).offers.map(({ offer }) => offer)
+  const choices = (await planChoices(tx, moduleId)).filter(({ offer }) => offers.includes(offer))
   await plan.update(
-    { plan: { ...plan.plan, parts }, changedAt: now, changedByPersonId: byPersonId },
+    { plan: { ...plan.plan, parts, choices }, changedAt: now, changedByPersonId: byPersonId },
     { transaction: tx },
   )
 }

@@ -9,6 +9,7 @@ import { inTransaction } from '@/lib/db/in-transaction'
 import { moduleMistakes } from '@/lib/messages/module-mistakes'
 import { Offer, Plan, Workshop } from '@/models'
 import { lockModule } from '../_steps/find-module'
+import { planChoices } from '../_steps/plan-choices'
 import { planParts } from '../_steps/plan-parts'
 import { newestRevision } from '../_steps/refresh-plan-parts'
 
@@ -44,6 +45,7 @@ export function savePlan(cmd: {
       payoutDelayDays: workshop.payoutDelayDays,
       offers: offers.map((offer) => offer.facts()),
       parts: newest ? await planParts(tx, newest.id) : [],
+      choices: await planChoices(tx, module.id),
     })
     // Once through the core, so that a plan it could not compute with is never stored.
     costRun(plan, Object.fromEntries(offers.map(({ kind }) => [kind, 1])))

@@ -8,6 +8,7 @@ import { ok, refuse } from '@/lib/core/result'
 import { inTransaction } from '@/lib/db/in-transaction'
 import { moduleMistakes } from '@/lib/messages/module-mistakes'
 import { Plan, Run, RunOffer, Workshop } from '@/models'
+import { planChoices } from '../_steps/plan-choices'
 import { planParts } from '../_steps/plan-parts'
 
 /**
@@ -41,6 +42,7 @@ export function saveRunPlan(cmd: {
       payoutDelayDays: workshop.payoutDelayDays,
       offers,
       parts: await planParts(tx, run.revisionId),
+      choices: await planChoices(tx, run.moduleId),
     })
     // Once through the core, so that a plan it could not compute with is never stored.
     costRun(plan, Object.fromEntries(offers.map(({ kind }) => [kind, 1])))

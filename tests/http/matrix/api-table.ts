@@ -18,6 +18,8 @@ export const API_TABLE: Readonly<Record<string, Row>> = {
   'POST /api/admin/[workshop]/modules/[module]/lessons/mend': '401 404 422 422 404 404 404',
   'POST /api/admin/[workshop]/modules/[module]/lessons/waive': '401 404 422 404 404 404 404',
   'POST /api/admin/[workshop]/modules/[module]/offers': '401 404 422 404 404 404 404',
+  'POST /api/admin/[workshop]/modules/[module]/choices': '401 404 422 404 404 404 404',
+  'POST /api/admin/[workshop]/modules/[module]/choices/retire': '401 404 422 404 404 404 404',
   'POST /api/admin/[workshop]/modules/[module]/files': '401 404 422 422 404 404 404',
   'POST /api/admin/[workshop]/modules/[module]/files/remove': '401 404 422 404 404 404 404',
   'GET /api/files/[file]': '404 404 404 404 404 404 404',

@@ -7,10 +7,10 @@ import { NumberField, TextField } from '@/components/ui/text-field'
 import { modulesAdminWords as words } from '@/lib/messages/modules-admin'
 import { paths } from '@/lib/paths'
 
-type Props = { slug: string; module: string; form?: FormState }
+type Props = { slug: string; module: string; toMend?: readonly string[]; form?: FormState }
 
 /** Begins a next version of the electronics. */
-export function RevisionForm({ slug, module, form }: Props) {
+export function RevisionForm({ slug, module, toMend = [], form }: Props) {
   return (
     <Sheet title={words.beginRevision} id="begin-revision">
       <Form
@@ -18,6 +18,16 @@ export function RevisionForm({ slug, module, form }: Props) {
         form={form}
         foot={<Button kind="secondary">{words.beginRevision}</Button>}
       >
+        {toMend.length > 0 ? (
+          <div className="max-w-words">
+            <p className="font-semibold">{words.mustMend}</p>
+            <ul className="ml-5 list-disc">
+              {toMend.map((symptom) => (
+                <li key={symptom}>{symptom}</li>
+              ))}
+            </ul>
+          </div>
+        ) : null}
         <TextField
           name="letter"
           label={words.letter}

@@ -8,15 +8,17 @@ import { modulesAdminWords as words } from '@/lib/messages/modules-admin'
 import { offerWords } from '@/lib/messages/public'
 import { paths } from '@/lib/paths'
 import { getFormDraft } from '@/lib/queries/forms/get-form-draft'
+import { listChoices } from '@/lib/queries/modules-admin/list-choices'
 import { loadModule, type ModulePageProps } from '../_parts/load-module'
 import { ModuleHead } from '../_parts/module-head'
+import { ChoicesSheet } from '../_parts/choices-sheet'
 import { OfferForm } from '../_parts/offer-form'
 import { offerForm } from '../_parts/offer-values'
 
 export const metadata: Metadata = { title: words.pages.offers }
 
 export default async function OffersPage({ params, searchParams }: ModulePageProps<{ offer?: string }>) {
-  const { workshop, desk } = await loadModule(params)
+  const { actor, workshop, desk } = await loadModule(params)
   const { draft, saved, offer: asked } = await searchParams
   const { module } = desk
   const here = paths.adminModulePage(workshop.slug, module.slug, 'offers')
@@ -34,7 +36,7 @@ export default async function OffersPage({ params, searchParams }: ModulePagePro
         }))}
       />
       <Stack>
-        <OutcomeNotice form="module-deed" saved={saved} />
+        <OutcomeNotice form="module-deed" draft={draft} saved={saved} />
         <OfferForm
           slug={workshop.slug}
           module={module.slug}
@@ -42,6 +44,16 @@ export default async function OffersPage({ params, searchParams }: ModulePagePro
           currency={workshop.currency}
           form={form}
         />
+        {desk.offers.some(({ offer }) => offer === chosen) ? (
+          <ChoicesSheet
+            slug={workshop.slug}
+            module={module.slug}
+            offer={chosen}
+            currency={workshop.currency}
+            choices={await listChoices({ actor, workshopId: workshop.id, module: module.slug })}
+            form={keptForm(await getFormDraft(draft, 'choice'))}
+          />
+        ) : null}
       </Stack>
     </>
   )

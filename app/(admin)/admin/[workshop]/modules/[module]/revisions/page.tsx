@@ -31,7 +31,13 @@ export default async function RevisionsPage({ params, searchParams }: ModulePage
       <Stack>
         <OutcomeNotice form="module-deed" draft={draft} saved={saved} />
         <RevisionsTable {...at} revisions={desk.revisions} zone={workshop.timeZone} />
-        <RevisionForm {...at} form={await kept('revision')} />
+        <RevisionForm
+          {...at}
+          toMend={desk.lessons
+            .filter(({ mendedIn, waivedReason }) => mendedIn === null && waivedReason === null)
+            .map(({ symptom }) => symptom)}
+          form={await kept('revision')}
+        />
         {unproven.length > 0 ? (
           <FirstUnitForm
             {...at}
