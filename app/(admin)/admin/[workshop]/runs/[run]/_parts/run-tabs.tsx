@@ -4,11 +4,10 @@ import { runWords as words } from '@/lib/messages/runs'
 import { unitWords } from '@/lib/messages/units'
 import { paths } from '@/lib/paths'
 
-type Props = { workshop: string; run: string; current: 'run' | 'costs' | 'orders' | 'units' | 'money' }
 type Props = {
   workshop: string
   run: string
-  current: 'run' | 'costs' | 'what-ifs' | 'schedule' | 'orders' | 'units'
+  current: 'run' | 'costs' | 'what-ifs' | 'schedule' | 'orders' | 'units' | 'money'
 }
 
 /** The pages of a run, side by side. */
