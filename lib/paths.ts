@@ -82,6 +82,7 @@ export const paths = {
   adminRunUnits: (workshop: string, run: string) => `/admin/${part(workshop)}/runs/${part(run)}/units`,
   adminRunDeed: (workshop: string, run: string, deed: 'open' | 'lock' | 'call-off' | 'ask-balances') =>
     `/admin/${part(workshop)}/runs/${part(run)}/${deed}`,
+  adminProblems: (workshop: string) => `/admin/${part(workshop)}/problems`,
   adminBulk: (workshop: string, bulk: string) => `/admin/${part(workshop)}/bulk/${part(bulk)}`,
   adminPaymentAccount: (workshop: string) => `/admin/${part(workshop)}/payment-account`,
   adminOrder: (workshop: string, order: string) => `/admin/${part(workshop)}/orders/${part(order)}`,
@@ -125,6 +126,9 @@ export const paths = {
     orderPaid: (order: string) => `/api/orders/${part(order)}/check`,
     orderPay: (order: string) => `/api/orders/${part(order)}/pay`,
     orderCancel: (order: string) => `/api/orders/${part(order)}/cancel`,
+    orderProblems: (order: string) => `/api/orders/${part(order)}/problems`,
+    adminProblemAnswer: (workshop: string, problem: string) =>
+      `/api/admin/${part(workshop)}/problems/${part(problem)}/answer`,
     orderAddress: (order: string) => `/api/orders/${part(order)}/address`,
     orderWithdraw: (order: string) => `/api/orders/${part(order)}/withdraw`,
     orderChange: (order: string) => `/api/orders/${part(order)}/change`,

@@ -167,6 +167,7 @@ export const SCREENS: Readonly<Record<string, { by: Looker; at: (found: Found) =
     by: 'owner',
     at: ({ fairlead }) => [`${ADMIN}/runs/${fairlead}/units`],
   },
+  '/admin/[workshop]/problems': { by: 'owner', at: () => [`${ADMIN}/problems`] },
   '/packing/[workshop]': {
     by: 'packer',
     at: () => [

@@ -22,6 +22,7 @@ import { listBatches } from '@/lib/queries/packing/list-batches'
 import { listPackGroups } from '@/lib/queries/packing/list-pack-groups'
 import { listRunUnits } from '@/lib/queries/units/list-run-units'
 import { getPackSummary } from '@/lib/queries/packing/get-pack-summary'
+import { listProblems } from '@/lib/queries/problems/list-problems'
 import { getParcelPapers } from '@/lib/queries/packing/get-parcel-papers'
 import { getPackingSlips } from '@/lib/queries/packing/get-packing-slips'
 import { listPackQueue } from '@/lib/queries/packing/list-pack-queue'
@@ -37,7 +38,7 @@ import { getWhatIfs } from '@/lib/queries/runs/get-what-ifs'
 import { listRunOrders } from '@/lib/queries/runs/list-run-orders'
 import { listRuns } from '@/lib/queries/runs/list-runs'
 import { getDesk } from '@/lib/queries/workshops/get-desk'
-import { BulkItem, BulkJob, PackBatch, Part, type Person, RevisionLine } from '@/models'
+import { BulkItem, BulkJob, PackBatch, Part, Problem, type Person, RevisionLine } from '@/models'
 import { hoursAfter, NOW, serial } from '@/tests/support/worlds/base'
 import { makeModule } from '@/tests/support/worlds/module'
 import { makeAddress, makeOrder } from '@/tests/support/worlds/order'
@@ -105,6 +106,11 @@ async function addRow(): Promise<void> {
     packerPersonId: (world as unknown as { owner: Person }).owner.id,
   })
   await makeUnit(run)
+  await Problem.create({
+    ...{ workshopId, number: serial(), orderId: paid.order.id, orderLineId: null, parcelId: null },
+    ...{ kind: 'fault', story: 'It hums.', remedy: null, answer: null, lessonId: null },
+    ...{ openedAt: NOW, answerByOn: '2027-03-06', answeredAt: null, closedAt: null },
+  })
   await makeInvoice(paid.order)
   await makeAttempt(paid.order, {
     purpose: `change-${serial()}`,
@@ -217,6 +223,7 @@ const LISTS: Readonly<
   },
   'fulfilment list': { ask: () => getFulfilmentOrders(asked()) },
   'packing slips': { ask: () => getPackingSlips({ ...asked(), parcelIds, problemUrl: (id) => id }) },
+  'problems of a workshop': { ask: () => listProblems(asked()) },
   'papers of parcels': { ask: () => getParcelPapers({ ...asked(), parcelIds }) },
   'front of a workshop': { ask: () => getWorkshopFront({ slug: world.workshop.slug, now: NOW }) },
   'front of the site': { ask: () => getSiteFront({ now: NOW }) },

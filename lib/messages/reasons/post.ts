@@ -17,6 +17,8 @@ export const post: Record<string, string> = {
     'Customs would send this back: something is missing in the declaration. The page of these papers says what.',
   nothing_to_pack:
     'Nothing in the queue is like this and free to take. Show everything again, or look who has it.',
+  nothing_posted: 'Nothing of this order was handed over yet, so there is nothing to report.',
+  problem_open: 'You have reported this already. The page says by when you hear.',
   look_first: 'Look at what each line does, then take the list in.',
   not_handed_over: 'This parcel was not handed over yet.',
   no_service: 'No service was quoted for this order. Hand its parcel over by itself and choose one.',

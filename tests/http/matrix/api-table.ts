@@ -98,6 +98,8 @@ export const API_TABLE: Readonly<Record<string, Row>> = {
   'POST /api/unsubscribe/[token]': '404 404 404 404 404 404 404',
   'GET /api/packing/[workshop]/list.pdf': '401 404 200 404 200 404 404',
   'GET /api/packing/[workshop]/parcels/[parcel]/slip.pdf': '401 404 200 404 200 404 404',
+  'POST /api/orders/[order]/problems': '401 422 422 422 422 422 422',
+  'POST /api/admin/[workshop]/problems/[problem]/answer': '401 404 422 404 404 404 404',
   'GET /api/packing/[workshop]/queue': '401 404 200 404 200 404 404',
   // Nothing is in the queue: there is nothing to print.
   'GET /api/packing/[workshop]/slips.pdf': '401 404 404 404 404 404 404',

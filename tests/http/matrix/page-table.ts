@@ -77,6 +77,7 @@ export const PAGE_TABLE: Readonly<Record<string, Row>> = {
   // A link nobody was sent: said so, to whoever is signed in.
   'PAGE /join/[token]': '307 200 200 200 200 200 200',
   'PAGE /admin/[workshop]/runs/[run]/units': '307 404 200 404 404 404 404',
+  'PAGE /admin/[workshop]/problems': '307 404 200 404 404 404 404',
   'PAGE /packing/[workshop]': '307 404 200 404 200 404 404',
   // No batch was taken.
   'PAGE /packing/[workshop]/batches/[batch]': '307 404 404 404 404 404 404',

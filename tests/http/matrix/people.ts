@@ -42,6 +42,7 @@ export async function matrixWorld() {
     order: world.order.id,
     parcel: parcel.id,
     batch: randomUUID(),
+    problem: randomUUID(),
     paper: 'labels',
     bulk: bulk.id,
     invoice: (await makeInvoice(world.order)).id,

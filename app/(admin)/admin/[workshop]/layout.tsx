@@ -1,6 +1,7 @@
 import { SignedFrame } from '@/app/_parts/signed-frame'
 import { currentActor } from '@/lib/auth/actor'
 import { deskWords as words } from '@/lib/messages/desk'
+import { problemWords } from '@/lib/messages/problems'
 import { paths } from '@/lib/paths'
 import { getDeskWorkshop } from '@/lib/queries/workshops/get-desk-workshop'
 
@@ -15,6 +16,7 @@ export default async function DeskLayout({ params, children }: Props) {
     { href: paths.adminModules(slug), label: words.modules },
     { href: paths.adminRuns(slug), label: words.runs },
     { href: paths.adminMoney(slug, 'books'), label: words.money },
+    { href: paths.adminProblems(slug), label: problemWords.title },
     { href: paths.adminSettings(slug), label: words.settings },
     { href: paths.packing(slug), label: words.packing },
   ]

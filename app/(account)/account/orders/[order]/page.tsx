@@ -15,6 +15,7 @@ import { InvoiceSheet } from './_parts/invoice-sheet'
 import { NextSheet } from './_parts/next-sheet'
 import { OrderSheet } from './_parts/order-sheet'
 import { ParcelSheet } from './_parts/parcel-sheet'
+import { ProblemSheet } from './_parts/problem-sheet'
 import { refusalOf } from './_parts/refusal-of'
 import { RefundSheet } from './_parts/refund-sheet'
 import { StorySheet } from './_parts/story-sheet'
@@ -43,6 +44,7 @@ export default async function OrderPage({ params, searchParams }: Props) {
       <Stack>
         <NextSheet order={order} hasReturned={paid !== undefined} refusal={await refusalOf(draft)} />
         <ParcelSheet order={order} />
+        <ProblemSheet order={order} draft={draft} />
         <RefundSheet order={order} />
         <InvoiceSheet order={order} />
         <StorySheet order={order} />
