@@ -23,15 +23,15 @@ const BOOKED = `
   left join payment_attempts p on p.id = d.attempt_id
   where t.workshop_id = $workshopId group by t.id, e.currency, a.id, r.id, p.id order by t.at, t.id`
 
-/** The ledger of every workshop against the provider's lists, read through the SDK alone. */
-export async function compareBooks(): Promise<Compared> {
+/** The ledger of every workshop, or of those given, against the provider's lists, read through the SDK alone. */
+export async function compareBooks(only?: readonly Workshop[]): Promise<Compared> {
   const found: Compared = { wrong: [], charges: 0, refunds: 0, fees: 0, disputes: 0 }
   const unbalanced = await sequelize.query<{ id: string }>(
     `select transfer_id as id from ledger_entries group by transfer_id, currency having sum(amount_minor) <> 0`,
     { type: QueryTypes.SELECT },
   )
   found.wrong.push(...unbalanced.map(({ id }) => `the transfer ${id} does not balance`))
-  for (const workshop of await Workshop.findAll()) {
+  for (const workshop of only ?? (await Workshop.findAll())) {
     if (workshop.providerAccountId) await compareOne(workshop.id, workshop.providerAccountId, found)
   }
   return found
