@@ -8,7 +8,7 @@ import { planAgain } from '@/lib/services/payments/plan-again'
 import type { DueItem } from './due-kinds'
 
 /** How long to wait when the provider has not said what became of something. */
-const AGAIN_MS = 120_000
+const AGAIN_MS = 60_000
 
 /** Does it, or sets it again for a little later while the provider does not answer. */
 async function orAgain(item: DueItem, now: Date, done: { ok: boolean; reason?: string }): Promise<void> {

@@ -5,8 +5,8 @@ import type { PaymentAttempt } from '@/models'
 const MINUTE_MS = 60_000
 
 const MINUTES: Readonly<Record<AttemptState, number>> = {
-  requested: 2,
-  unknown: 2,
+  requested: 1,
+  unknown: 1,
   sent: 5,
   needs_customer: 24 * 60,
   captured: 60,

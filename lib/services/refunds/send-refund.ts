@@ -15,7 +15,7 @@ import { Order, PaymentAttempt, Refund } from '@/models'
 const KEY_IS_SURE_MS = 12 * 3_600_000
 /** A look-up is final only when the request can no longer be under way. */
 const FINAL_AFTER_MS = 60_000
-const LOOK_UP_AGAIN_MS = 120_000
+const LOOK_UP_AGAIN_MS = 60_000
 
 type Sent =
   | { state: 'answered'; facts: RefundFacts; shortBy?: Minor }

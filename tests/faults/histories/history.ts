@@ -10,7 +10,7 @@ import { due } from '@/lib/tasks/due'
 import { Op } from 'sequelize'
 import Stripe from 'stripe'
 import { expect } from 'vitest'
-import { Order, type Person, SignUp } from '@/models'
+import { DueItem, Order, type Person, SignUp } from '@/models'
 import { compareBooks } from '@/tests/support/books'
 import { businessTime, minutesLater, setBusinessTime } from '@/tests/support/business-time'
 import { makeReady } from '@/tests/support/worlds/decision'
@@ -102,10 +102,15 @@ export class History {
     return work(ALL_BUT_MAIL)
   }
 
-  /** Business time passes, for the provider too, and what falls due is done as by the worker's minute. */
-  async pass(minutes: number, mishap: Mishap = null): Promise<void> {
+  /** Business time passes, for the provider too. */
+  async moveClock(minutes: number): Promise<void> {
     await setBusinessTime(minutesLater(await this.now(), minutes))
     await passTime()
+  }
+
+  /** The same, and what falls due is done as by the worker's minute. */
+  async pass(minutes: number, mishap: Mishap = null): Promise<void> {
+    await this.moveClock(minutes)
     // One that fails stays due, and is said when all is quiet.
     const fallDue = () => due({}, { jobId: '1', attempt: 1, maxAttempts: 1 }).catch(() => {})
     await this.under(mishap, fallDue)
@@ -124,6 +129,22 @@ export class History {
       if (delivered === 0 && failed === 0 && before === 0 && this.late.length === 0) return
     }
     throw new Error('it never gets quiet')
+  }
+
+  /** How long until something of this run falls due; null when nothing does within twenty days. */
+  async minutesToNextDue(): Promise<number | null> {
+    const now = await this.now()
+    const dueAt = { [Op.gt]: now, [Op.lt]: minutesLater(now, 20 * 1440) }
+    const kind = [
+      'hold_ended',
+      'balance_charge',
+      'balance_reminder',
+      'order_lapse',
+      'refund_look_up',
+      'refund_retry',
+    ]
+    const next = await DueItem.min<Date | null, DueItem>('dueAt', { where: { kind, doneAt: null, dueAt } })
+    return next && Math.ceil((next.getTime() - now.getTime()) / 60_000) + 1
   }
 
   private get about() {

@@ -42,8 +42,12 @@ export const LOCKED: Step = (state) =>
 
 export const ASKED: Step = (state) => (state === 'reserved' ? ['reserved', 'balance_due'] : [state])
 
-export const CALLED_OFF: Step = (state) =>
-  state === 'expired' || state === 'lapsed' ? [state] : ['cancelled']
+/** A hold or a balance whose time is over may have ended before its turn came. */
+export const CALLED_OFF: Step = (state) => {
+  if (state === 'expired' || state === 'lapsed') return [state]
+  if (state === 'awaiting_deposit') return ['cancelled', 'expired']
+  return state === 'balance_due' ? ['cancelled', 'lapsed'] : ['cancelled']
+}
 
 /** Time brings the ends of holds, offers to those who wait, charges and lapses. */
 export const TIME_PASSED: Step = (state) => {

@@ -95,7 +95,7 @@ describe('a refund', () => {
     breakCalls(({ path }) => (path.includes('/refunds') ? 'before' : null))
     expect(await send(refund)).toEqual({ ok: true, value: { state: 'unknown' } })
     expect(await DueItem.findOne({ where: { kind: 'refund_look_up', subjectId: refund.id } })).toMatchObject({
-      dueAt: minutesLater(NOW, 2),
+      dueAt: minutesLater(NOW, 1),
     })
     breakCalls(null)
     await send(refund, true, minutesLater(NOW, 2))
