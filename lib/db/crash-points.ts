@@ -1,8 +1,8 @@
 /**
- * Every place at which the tests of faults kill the process, in the order of a deposit's path. A name that no test
- * reaches makes the fault tests fail.
+ * Every place on the way of a deposit, and on its way back, at which the tests of faults kill the process, in the order
+ * they are passed. A name that no test reaches makes the fault tests fail.
  */
-export const CRASH_POINTS = [
+export const DEPOSIT_CRASH_POINTS = [
   'order_placed',
   'attempt_requested',
   'provider_answered',
@@ -22,4 +22,15 @@ export const CRASH_POINTS = [
   'bulk_item_done',
 ] as const
 
-export type CrashPoint = (typeof CRASH_POINTS)[number]
+/** The same for what follows the lock: announcing, charging, lapsing. */
+export const BALANCE_CRASH_POINTS = [
+  'run_locked',
+  'bulk_item_before_commit',
+  'balance_requested',
+  'balance_provider_answered',
+  'balance_sent',
+  'due_handled',
+  'lapse_payments_ended',
+] as const
+
+export type CrashPoint = (typeof DEPOSIT_CRASH_POINTS)[number] | (typeof BALANCE_CRASH_POINTS)[number]

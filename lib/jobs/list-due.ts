@@ -1,5 +1,6 @@
 import 'server-only'
 import { QueryTypes } from 'sequelize'
+import { crashPoint } from '@/lib/db/crash-point'
 import { sequelize } from '@/lib/db/sequelize'
 import type { DueKind } from './due-kinds'
 
@@ -18,6 +19,7 @@ export async function listDue(now: Date): Promise<DueRow[]> {
 
 /** Ticks one off, unless its handler has set it again for a later instant. */
 export async function markDone(item: DueRow, now: Date): Promise<void> {
+  crashPoint('due_handled')
   await sequelize.query(
     `update due_items set done_at = :now
      where kind = :kind and subject_id = :subjectId and done_at is null and date_trunc('milliseconds', due_at) <= :dueAt`,

@@ -4,6 +4,7 @@ import { ok, refuse, type Result } from '@/lib/core/result'
 import { mayLapse } from '@/lib/core/states/order-guards'
 import { addDays } from '@/lib/core/time/day'
 import { dayIn, startOfDay } from '@/lib/core/time/zone'
+import { crashPoint } from '@/lib/db/crash-point'
 import { inTransaction } from '@/lib/db/in-transaction'
 import { setDue } from '@/lib/jobs/set-due'
 import { dropBalanceDues } from '@/lib/services/_steps/balance-dues'
@@ -35,6 +36,7 @@ export async function lapseOrder(cmd: {
   if (!looked.ok || !looked.value.mayLapse) return looked.ok ? ok(looked.value) : looked
   const ended = await endOpenPayments(orderId, now)
   if (!ended.ok) return ended
+  crashPoint('lapse_payments_ended')
   return inTransaction(async (tx) => {
     const judged = await judge(tx, orderId, now)
     if (!judged.ok || !judged.value.mayLapse) return judged

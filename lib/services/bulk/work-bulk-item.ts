@@ -56,6 +56,7 @@ export async function workBulkItem(cmd: { itemId: string; now: Date }): Promise<
       ? { state: 'done' as const, reason: null }
       : { state: 'failed' as const, reason: result.reason }
     await item.update({ ...settled, doneAt: now }, { transaction: tx })
+    crashPoint('bulk_item_before_commit')
     return ok(true)
   })
   crashPoint('bulk_item_done')

@@ -101,19 +101,19 @@ async function charge(
 ): Promise<Result<{ outcome: BalanceOutcome }, 'not_found' | 'rate_limited'>> {
   const attempt = await PaymentAttempt.findByPk(attemptId, { rejectOnEmpty: true })
   const { amount, ...params } = SavedCardParams.parse(attempt.params)
-  crashPoint('attempt_requested')
+  crashPoint('balance_requested')
   const done = await payments().chargeSavedCard({
     ...params,
     amount: minor(amount),
     key: attempt.idempotencyKey,
   })
-  crashPoint('provider_answered')
+  crashPoint('balance_provider_answered')
   if (!done.ok && done.reason === 'rate_limited') return refuse('rate_limited')
   if (!done.ok && done.reason !== 'unknown_outcome') return failed(attemptId, done.reason, now)
   const truth: Truth = done.ok ? truthOfPayment(done.value.payment) : await lookUpAttempt(attempt)
   if (truth.state === 'never_had_it' || truth.state === 'unavailable') return lost(attemptId, now)
   const recorded = await recordTruth(attemptId, truth, { now })
-  crashPoint('attempt_sent')
+  crashPoint('balance_sent')
   if (!recorded.ok) return recorded
   const { state } = recorded.value
   return ok({

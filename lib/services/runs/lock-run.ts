@@ -4,6 +4,7 @@ import type { FieldRefusal } from '@/lib/contracts/problem'
 import type { LockInput } from '@/lib/contracts/runs'
 import { can, type Actor } from '@/lib/core/policy/can'
 import { ok, refuse, type Result } from '@/lib/core/result'
+import { crashPoint } from '@/lib/db/crash-point'
 import { inTransaction } from '@/lib/db/in-transaction'
 import { balanceAtProvider } from '@/lib/services/_steps/balance-at-provider'
 import { endHolds } from '@/lib/services/_steps/end-holds'
@@ -52,6 +53,7 @@ export async function lockRun(cmd: {
     if (!ended.ok) return ended
     const locked = await inTransaction((tx) => lock(tx, which, asked))
     const isRaced = !locked.ok && (locked.reason === 'session_open' || locked.reason === 'attempt_unknown')
+    crashPoint('run_locked')
     if (!isRaced || tried >= TRIES) return locked
   }
 }

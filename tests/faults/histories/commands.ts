@@ -1,5 +1,5 @@
 import fc from 'fast-check'
-import { CRASH_POINTS } from '@/lib/db/crash-points'
+import { BALANCE_CRASH_POINTS, DEPOSIT_CRASH_POINTS } from '@/lib/db/crash-points'
 import { disputePayment } from '@/lib/gateways/payments/fake/controls'
 import { payAsCustomer } from '@/lib/gateways/payments/fake/pay-as-customer'
 import { cancelOrder } from '@/lib/services/orders/cancel-order'
@@ -208,7 +208,10 @@ const breaks = fc.record({
 const mishaps: fc.Arbitrary<Mishap> = fc.oneof(
   { weight: 6, arbitrary: fc.constant(null) },
   { weight: 1, arbitrary: fc.record({ calls: fc.array(breaks, { minLength: 1, maxLength: 3 }) }) },
-  { weight: 2, arbitrary: fc.record({ kill: fc.constantFrom(...CRASH_POINTS) }) },
+  {
+    weight: 2,
+    arbitrary: fc.record({ kill: fc.constantFrom(...DEPOSIT_CRASH_POINTS, ...BALANCE_CRASH_POINTS) }),
+  },
 )
 const which = fc.nat(MOST_ORDERS)
 const cards = fc.constantFrom(

@@ -1,8 +1,8 @@
 import { type ChildProcess, spawn } from 'node:child_process'
 import { createWriteStream, mkdirSync } from 'node:fs'
 import { join, resolve } from 'node:path'
-import { freePort } from '../../scripts/support/ports.mjs'
-import { childSettings } from '../../scripts/support/settings.mjs'
+import { freePort } from '../../../scripts/support/ports.mjs'
+import { childSettings } from '../../../scripts/support/settings.mjs'
 
 const SCRIPTS = {
   'mail-server': 'scripts/mail-server.ts',
@@ -79,6 +79,12 @@ export class Machine {
     const ended = new Promise((done) => child.once('exit', done))
     child.kill('SIGTERM')
     await ended
+  }
+
+  /** Starts every part again that has ended by itself. */
+  async revive(): Promise<void> {
+    for (const [part, { exitCode, signalCode }] of this.running)
+      if (exitCode !== null || signalCode !== null) await this.start(part)
   }
 
   async close(): Promise<void> {
