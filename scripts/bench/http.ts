@@ -1,45 +1,14 @@
 import { gzipSync } from 'node:zlib'
-import autocannon, { type Request } from 'autocannon'
+import type { Request } from 'autocannon'
 import { pathToFileURL } from 'node:url'
 import { run } from '../support/shell.mjs'
+import { load, ratio } from './load'
 import { openServers, type Servers } from './servers'
 
 type Measure = { name: string; value: number; unit: string }
 
-const CONNECTIONS = 50
-const SLICE_SECONDS = 3
-const PAIRS = 6
 const PAGE = '/w/hollow-pier/rowlock'
 let sent = 0
-
-/**
- * Requests a second of ours against the bare one's, in slices taken in turn so that a busy machine meets both alike; the
- * median of the pairs' ratios.
- */
-async function ratio(ours: () => Promise<number>, bare: () => Promise<number>) {
-  await ours()
-  await bare()
-  const pairs: { ours: number; bare: number }[] = []
-  for (let pair = 0; pair < PAIRS; pair += 1) pairs.push({ ours: await ours(), bare: await bare() })
-  const median = (list: number[]) => list.sort((a, b) => a - b)[Math.floor(list.length / 2)]!
-  return {
-    ratio: median(pairs.map((each) => each.ours / each.bare)),
-    ours: median(pairs.map((each) => each.ours)),
-    bare: median(pairs.map((each) => each.bare)),
-  }
-}
-
-async function load(url: string, request: Request = {}): Promise<number> {
-  const answer = await autocannon({
-    url,
-    connections: CONNECTIONS,
-    duration: SLICE_SECONDS,
-    requests: [request],
-  })
-  if (answer.non2xx > 0 || answer.errors > 0)
-    throw new Error(`${url}: ${answer.non2xx} answers were not 2xx, ${answer.errors} failed`)
-  return answer.requests.average
-}
 
 /** A sign-up by somebody new each time, from an address of its own: limits are for one person. */
 const signUp = (body: object): Request => ({

@@ -114,13 +114,13 @@ export const BUGS = [
     named: 'before it was made: unknown until a look-up a minute later says the provider never had it',
   },
   {
-    name: 'a place is given away though the card page may still be paid',
+    name: 'a hold ends before its time',
     file: 'lib/services/orders/expire-hold.ts',
-    find: '  const ended = await endOpenPayments(orderId, now)\n  if (!ended.ok) return ended\n',
-    put: '  await endOpenPayments(orderId, now)\n',
+    find: "order.state === 'awaiting_deposit' && order.holdUntil !== null && order.holdUntil <= now",
+    put: "order.state === 'awaiting_deposit'",
     project: 'db',
     test: 'tests/services/orders/expire-hold.test.ts',
-    named: 'keeps the place while the provider does not answer',
+    named: 'before its time nothing happens',
   },
   {
     name: 'a call-off forgets the money',
