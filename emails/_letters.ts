@@ -11,6 +11,7 @@ import { depositsOpen } from '@/emails/deposits-open'
 import { orderCancelled } from '@/emails/order-cancelled'
 import { orderLapsed } from '@/emails/order-lapsed'
 import { ownerDigest } from '@/emails/owner-digest'
+import { ownerReminder } from '@/emails/owner-reminder'
 import { parcelHandedOver } from '@/emails/parcel-handed-over'
 import { placeFree } from '@/emails/place-free'
 import { placeReleased } from '@/emails/place-released'
@@ -18,6 +19,7 @@ import { problemAnswered } from '@/emails/problem-answered'
 import { problemOpened } from '@/emails/problem-opened'
 import { refundSent } from '@/emails/refund-sent'
 import { runCalledOff } from '@/emails/run-called-off'
+import { runChanged } from '@/emails/run-changed'
 import { runLocked } from '@/emails/run-locked'
 import { runUpdate } from '@/emails/run-update'
 import { signInLink } from '@/emails/sign-in-link'
@@ -36,6 +38,7 @@ export const LETTERS: { readonly [K in MailKind]: Write<K> } = {
   place_free: placeFree,
   run_locked: runLocked,
   run_called_off: runCalledOff,
+  run_changed: runChanged,
   balance_coming: balanceComing,
   balance_paid: balancePaid,
   card_needs_you: cardNeedsYou,
@@ -53,4 +56,5 @@ export const LETTERS: { readonly [K in MailKind]: Write<K> } = {
   sign_in_link: signInLink,
   staff_invitation: staffInvitation,
   owner_digest: ownerDigest,
+  owner_reminder: ownerReminder,
 }

@@ -52,7 +52,7 @@ export const paths = {
   adminModulePage: (
     workshop: string,
     module: string,
-    page: 'facts' | 'offers' | 'revisions' | 'parts' | 'plan' | 'preview' | 'files',
+    page: 'facts' | 'offers' | 'revisions' | 'parts' | 'plan' | 'preview' | 'files' | 'interest',
   ) => `/admin/${part(workshop)}/modules/${part(module)}/${page}`,
   adminPartImport: (
     workshop: string,
@@ -61,6 +61,7 @@ export const paths = {
   ) => `/admin/${part(workshop)}/modules/${part(module)}/parts/import${asked(query)}`,
   adminPart: (workshop: string, module: string, id: string) =>
     `/admin/${part(workshop)}/modules/${part(module)}/parts/${part(id)}`,
+  adminRecord: (workshop: string) => `/admin/${part(workshop)}/record`,
   adminRuns: (workshop: string) => `/admin/${part(workshop)}/runs`,
   adminRunNew: (workshop: string) => `/admin/${part(workshop)}/runs/new`,
   adminRun: (workshop: string, run: string) => `/admin/${part(workshop)}/runs/${part(run)}`,
@@ -69,6 +70,7 @@ export const paths = {
     run: string,
     page:
       | 'demand'
+      | 'outcome'
       | 'costs'
       | 'what-ifs'
       | 'schedule'
@@ -80,8 +82,11 @@ export const paths = {
       | 'messages',
   ) => `/admin/${part(workshop)}/runs/${part(run)}/${page}`,
   adminRunUnits: (workshop: string, run: string) => `/admin/${part(workshop)}/runs/${part(run)}/units`,
-  adminRunDeed: (workshop: string, run: string, deed: 'open' | 'lock' | 'call-off' | 'ask-balances') =>
-    `/admin/${part(workshop)}/runs/${part(run)}/${deed}`,
+  adminRunDeed: (
+    workshop: string,
+    run: string,
+    deed: 'open' | 'lock' | 'call-off' | 'ask-balances' | 'lower-minimum' | 'move-decide-by',
+  ) => `/admin/${part(workshop)}/runs/${part(run)}/${deed}`,
   adminProblems: (workshop: string) => `/admin/${part(workshop)}/problems`,
   adminBulk: (workshop: string, bulk: string) => `/admin/${part(workshop)}/bulk/${part(bulk)}`,
   adminPaymentAccount: (workshop: string) => `/admin/${part(workshop)}/payment-account`,
@@ -182,6 +187,12 @@ export const paths = {
         | 'samples'
         | 'plan',
     ) => `/api/admin/${part(workshop)}/modules/${part(module)}/${what}`,
+    adminModuleInterest: (workshop: string, module: string) =>
+      `/api/admin/${part(workshop)}/modules/${part(module)}/interest`,
+    adminRunDemand: (workshop: string, run: string) =>
+      `/api/admin/${part(workshop)}/runs/${part(run)}/demand`,
+    adminRunActuals: (workshop: string, run: string) =>
+      `/api/admin/${part(workshop)}/runs/${part(run)}/actuals`,
     adminRuns: (workshop: string) => `/api/admin/${part(workshop)}/runs`,
     adminRun: (workshop: string, run: string) => `/api/admin/${part(workshop)}/runs/${part(run)}`,
     adminRunDeed: (
@@ -193,6 +204,7 @@ export const paths = {
         | 'call-off'
         | 'ask-balances'
         | 'lower-minimum'
+        | 'move-decide-by'
         | 'close'
         | 'plan'
         | 'plan/try'

@@ -12,6 +12,7 @@ export function VerdictSheet(facts: Props) {
     <div className="flex flex-col gap-3">
       <Notice kind={kind} title={title}>
         <p>{words}</p>
+        {facts.state === 'draft' || facts.state === 'called_off' ? null : <p>{decision.carried(facts)}</p>}
       </Notice>
       <Facts facts={figures.map(({ name, value }) => ({ name, value, kind: 'figures' as const }))} />
       <p className="max-w-words text-13 text-quiet">{decision.profitNote}</p>

@@ -1,12 +1,14 @@
 import { paths } from '@/lib/paths'
 import { ui } from '@/lib/messages/ui'
+import { CurrentLinks } from './current-links'
+import { type FrameLink, LinkList } from './link-list'
 import { TitleBlock, type TitleBlockProps } from './title-block'
 import { WordMark } from './word-mark'
 
-export type FrameLink = { href: string; label: React.ReactNode; current?: boolean }
-
 type Props = {
   links?: readonly FrameLink[]
+  /** Marks the link the page belongs under by itself: for a frame that stays while pages change. */
+  marksCurrent?: boolean
   /** Right of the links: who is signed in, a way to sign in or out. */
   account?: React.ReactNode
   /** A line above everything: a notice that this is a demonstration, say. */
@@ -27,6 +29,7 @@ const legal: readonly FrameLink[] = [
 /** What stands around every page: skip link, word mark with its brim line, navigation, content, title block. */
 export function SiteFrame({
   links = [],
+  marksCurrent,
   account,
   banner,
   titleBlock,
@@ -37,31 +40,31 @@ export function SiteFrame({
   return (
     <div
       data-bench={bench ? '' : undefined}
-      className="max-w-page mx-auto flex min-h-dvh flex-col px-4 sm:px-6"
+      className="mx-auto flex min-h-dvh max-w-page flex-col px-4 sm:px-6"
     >
       <a
         href="#main"
-        className="focus:bg-sheet sr-only focus:not-sr-only focus:fixed focus:top-2 focus:left-2 focus:z-10 focus:p-3 print:hidden"
+        className="sr-only focus:not-sr-only focus:fixed focus:top-2 focus:left-2 focus:z-10 focus:bg-sheet focus:p-3 print:hidden"
       >
         {ui.skipToContent}
       </a>
       <header className="pb-6 print:hidden">
-        {banner ? <div className="border-rule text-13 border-b py-1.5 print:hidden">{banner}</div> : null}
+        {banner ? <div className="border-b border-rule py-1.5 text-13 print:hidden">{banner}</div> : null}
         <div className="flex items-baseline gap-1 pt-4">
           <WordMark />
           <span className="brim font-heading text-28" aria-hidden="true" />
-          {account ? <div className="text-15 pl-3">{account}</div> : null}
+          {account ? <div className="pl-3 text-15">{account}</div> : null}
         </div>
         {links.length > 0 ? (
           <nav aria-label={ui.mainNavigation} className="mt-1">
-            <LinkList links={links} />
+            {marksCurrent ? <CurrentLinks links={links} /> : <LinkList links={links} />}
           </nav>
         ) : null}
       </header>
       <main id="main" tabIndex={-1} className="grow pb-12">
         {children}
       </main>
-      <footer className="border-ink border-b-2 print:hidden">
+      <footer className="border-b-2 border-ink print:hidden">
         {footLinks.length > 0 ? (
           <nav aria-label={ui.legalNavigation} className="pb-1">
             <LinkList links={footLinks} />
@@ -70,23 +73,5 @@ export function SiteFrame({
         {titleBlock ? <TitleBlock {...titleBlock} /> : null}
       </footer>
     </div>
-  )
-}
-
-function LinkList({ links }: { links: readonly FrameLink[] }) {
-  return (
-    <ul className="text-15 -mx-2 flex flex-wrap gap-x-2">
-      {links.map((link) => (
-        <li key={link.href}>
-          <a
-            href={link.href}
-            aria-current={link.current ? 'page' : undefined}
-            className={`bench:min-h-14 inline-flex min-h-11 items-center px-2 ${link.current ? 'text-ink font-semibold decoration-2' : ''}`}
-          >
-            {link.label}
-          </a>
-        </li>
-      ))}
-    </ul>
   )
 }

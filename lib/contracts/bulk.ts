@@ -1,5 +1,12 @@
 /** What is done to many rows of a run, one after another, each once. */
-export const BULK_KINDS = ['invite', 'tell_locked', 'call_off', 'ask_balances', 'charge_balances'] as const
+export const BULK_KINDS = [
+  'invite',
+  'tell_locked',
+  'tell_changed',
+  'call_off',
+  'ask_balances',
+  'charge_balances',
+] as const
 export type BulkKind = (typeof BULK_KINDS)[number]
 
 /**

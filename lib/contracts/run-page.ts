@@ -1,5 +1,5 @@
 import type { ReadinessFigures } from '@/lib/core/states/readiness-figures'
-import type { ReadinessKey, ReadinessState, RunFigures, RunView } from './runs'
+import type { ReadinessKey, ReadinessState, RunFigures, RunView, RunWeighed } from './runs'
 
 export type OrderCounts = {
   /** Orders per state, those of the run's own buyers. */
@@ -45,6 +45,8 @@ export type RunPage = Omit<RunView, 'readiness'> & {
   /** Today in the workshop's zone. */
   today: string
   headStartHours: number
+  /** Decide-by moves once. */
+  decideByMoved: boolean
   limitPerPerson: number
   openedAt: string | null
   lockedAt: string | null
@@ -54,6 +56,7 @@ export type RunPage = Omit<RunView, 'readiness'> & {
   balancesAskedAt: string | null
   readiness: { key: ReadinessKey; state: ReadinessState; waivedFor: string | null }[]
   readinessFigures: ReadinessFigures
+  weighed: RunWeighed
   curve: ProfitCurve | null
   runLine: RunLine | null
   repay: RepayAnswer
@@ -70,7 +73,13 @@ export type RunPage = Omit<RunView, 'readiness'> & {
   signUps: { confirmed: number; notOrdered: number }
   bulk: BulkSummary[]
   /** What the run was locked on; null while it was not. */
-  decided: { at: string; figures: RunFigures; waived: { key: ReadinessKey; reason: string }[] } | null
+  decided: {
+    at: string
+    figures: RunFigures
+    weighed: RunWeighed
+    coreVersion: string
+    waived: { key: ReadinessKey; reason: string }[]
+  } | null
 }
 
 export type RunOrderItem = {

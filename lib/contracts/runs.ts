@@ -74,7 +74,7 @@ export const CallOffInput = z.object({ reason: paragraphs(1000, 3, 'Say why; buy
 export type CallOffInput = z.infer<typeof CallOffInput>
 
 export const LowerMinimumInput = z.object({ minimum: wholeNumber(1, 10_000) })
-export type LowerMinimumInput = z.infer<typeof LowerMinimumInput>
+export const MoveDecideByInput = z.object({ decideBy: day() })
 
 /** The words typed on a check-answers page; a program that calls the API sends none. */
 export const Confirmed = z.object({ typed: z.string().max(200).optional() })
@@ -103,6 +103,23 @@ export type RunFigures = {
   chanceOfLoss: number | null
   /** Assembled boards to put into work; null without a cost plan. */
   starts: number | null
+}
+
+/** What a decision weighs besides: money figures are null without a cost plan that knows the run's offers. */
+export type RunWeighed = {
+  /** Units under deposit expected to be paid in the end. */
+  likelyToPay: number
+  /** Profit in the worst of ten cases: nine of ten do better or as well. */
+  worstInTenMinor: number | null
+  /** What is left when a tenth of the units under deposit are not paid. */
+  tenthFails: { units: number; profitMinor: number } | null
+  /** The lowest the bank balance of the run gets, at so many units, and the first day it does. */
+  cashLow: { units: number; lowMinor: number; on: string | null } | null
+  /** What the forecast is made of: expected units of people on the list who are silent, and of newcomers. */
+  fromListed: number
+  fromNewcomers: number
+  /** People invited who have not answered. */
+  silent: number
 }
 
 export type RunView = {

@@ -93,7 +93,9 @@ export type FirstStep = (typeof FIRST_STEPS)[number]
 /** The owner's desk: how far the workshop is, and the runs that are going. */
 export type Desk = {
   workshop: {
+    id: string
     slug: string
+    locale: string
     name: string
     state: 'pending' | 'open' | 'suspended'
     currency: string

@@ -14,6 +14,9 @@ export const DUE_KINDS = [
   'decide_by_passed',
   'run_page',
   'compare_books',
+  'run_forecast',
+  'run_reminder',
+  'owner_digest',
 ] as const
 
 export type DueKind = (typeof DUE_KINDS)[number]

@@ -1,6 +1,6 @@
 import { formatMoney } from '@/lib/core/money/format'
 import { plural } from './plural'
-import { writtenNumber, writtenPercent } from './written'
+import { writtenDay, writtenNumber, writtenPercent } from './written'
 
 type Facts = {
   state: 'draft' | 'taking_deposits' | 'locked' | 'closed' | 'called_off'
@@ -15,9 +15,17 @@ type Facts = {
     expectedProfitMinor: number | null
     chanceOfLoss: number | null
   }
+  weighed: {
+    likelyToPay: number
+    worstInTenMinor: number | null
+    tenthFails: { units: number; profitMinor: number } | null
+    cashLow: { units: number; lowMinor: number; on: string | null } | null
+  }
   /** Readiness lines neither ready nor waived. */
   notReady: number
 }
+
+const units = (count: number) => plural(count, { one: '# unit', other: '# units' })
 
 const lines = (count: number) => plural(count, { one: '# line', other: '# lines' })
 
@@ -83,6 +91,72 @@ export const decision = {
             : `${formatMoney(expectedProfitMinor, currency, locale)}; ${writtenPercent(chanceOfLoss ?? 0)} likely to lose`,
       },
     ]
+  },
+  /** The sentence the verdict rests on: who is likely to pay, from where on nothing is lost, how the worst in ten ends. */
+  carried({ figures, weighed, currency, locale }: Omit<Facts, 'notReady'>): string {
+    const { deposited, breakEven } = figures
+    const { likelyToPay, worstInTenMinor: worst } = weighed
+    const paid =
+      deposited === 0
+        ? 'Nobody is under deposit yet'
+        : `${writtenNumber(Math.round(likelyToPay))} of ${writtenNumber(deposited)} under deposit are likely to pay`
+    const even =
+      worst === null
+        ? 'without a cost plan nothing is known about profit'
+        : breakEven === null
+          ? 'at this mix every quantity loses'
+          : `break-even at this mix is ${writtenNumber(breakEven)}`
+    const end =
+      worst === null
+        ? ''
+        : worst < 0
+          ? `; the worst in ten loses ${formatMoney(-worst, currency, locale)}`
+          : `; even the worst in ten leaves ${formatMoney(worst, currency, locale)}`
+    return `${paid}; ${even}${end}.`
+  },
+  /** What else is weighed in money; empty without a cost plan. */
+  weighedFacts({ weighed, currency, locale }: Pick<Facts, 'weighed' | 'currency' | 'locale'>) {
+    const money = (minor: number) => formatMoney(minor, currency, locale)
+    const { worstInTenMinor, tenthFails, cashLow } = weighed
+    return [
+      ...(worstInTenMinor === null
+        ? []
+        : [{ name: 'Nine of ten cases leave at least', value: money(worstInTenMinor) }]),
+      ...(tenthFails === null
+        ? []
+        : [
+            {
+              name: 'If 10 % do not pay',
+              value:
+                tenthFails.profitMinor < 0
+                  ? `you lose ${money(-tenthFails.profitMinor)} at ${units(tenthFails.units)}`
+                  : `you still make ${money(tenthFails.profitMinor)} at ${units(tenthFails.units)}`,
+            },
+          ]),
+      ...(cashLow === null
+        ? []
+        : [
+            {
+              name: `Lowest point of the money, at ${units(cashLow.units)}`,
+              value:
+                cashLow.lowMinor >= 0 || cashLow.on === null
+                  ? 'never below zero'
+                  : `${money(cashLow.lowMinor)} on ${writtenDay(cashLow.on)}`,
+            },
+          ]),
+    ]
+  },
+  /** What the forecast is made of. */
+  madeOf(
+    { fromListed, fromNewcomers, silent }: { fromListed: number; fromNewcomers: number; silent: number },
+    daysLeft: number,
+  ) {
+    const about = (count: number) => writtenNumber(Math.round(count * 10) / 10, { digits: 1 })
+    const invited =
+      silent === 0
+        ? 'Nobody invited is still silent'
+        : `${plural(silent, { one: '# person was invited and has', other: '# people were invited and have' })} not answered`
+    return `${invited}; with ${plural(daysLeft, { one: '# day', other: '# days' })} left, people on the list are worth ${about(fromListed)} more units, people on no list ${about(fromNewcomers)}. The longer somebody is silent, the less is expected of them.`
   },
   profitNote:
     'Counted over go and call-off together, on orders expected to be paid: deposits are not payments.',

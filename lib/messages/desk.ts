@@ -9,7 +9,7 @@ export const deskWords = {
   settings: 'Settings',
   packing: 'Packing',
   titleOf: (workshop: string) => `${workshop}: today`,
-  lead: 'What needs you, and how far each run is.',
+  lead: 'What needs you, and how far each run is. The same list comes by mail in the evening, when there is one.',
   pendingTitle: 'Waiting for the host',
   pending:
     'The host of this site looks at each workshop before it opens. Until then you can enter and preview everything; publishing comes after.',

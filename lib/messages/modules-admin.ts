@@ -30,6 +30,7 @@ export const modulesAdminWords = {
     parts: 'Parts list',
     plan: 'Cost plan',
     files: 'Pictures and files',
+    interest: 'Interest',
   },
   mustMend: 'What the next revision must mend, or you live with for a reason:',
   publicPage: 'See its public page',

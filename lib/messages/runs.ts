@@ -67,6 +67,9 @@ export const runWords = {
   costsTitle: 'Costs',
   whatIfsTitle: 'What if',
   scheduleTitle: 'Schedule',
+  demandTitle: 'Demand',
+  outcomeTitle: 'Outcome',
+  record: 'Track record',
   publicPage: 'The public page',
   gauge: 'Deposits',
   readiness: 'Readiness list',
@@ -89,6 +92,7 @@ export const runWords = {
   bulkKinds: {
     invite: 'Invitations to confirmed sign-ups',
     tell_locked: 'Telling buyers that the run goes ahead',
+    tell_changed: 'Telling buyers what has changed',
     call_off: 'Ending orders and paying everyone back',
     ask_balances: 'Announcing balances',
     charge_balances: 'Charging balances',
@@ -96,7 +100,8 @@ export const runWords = {
   bulkProgress: (done: number, total: number, failed: number) =>
     `${done} of ${total}${failed > 0 ? `, ${failed} not` : ''}`,
   decidedTitle: 'What it was locked on',
-  decidedLead: 'Frozen with the lock, as it stood then.',
+  decidedLead: (version: string) =>
+    `Frozen with the lock, as it stood then; computed by version ${version} of the calculations.`,
   lockedOn: 'Locked',
   letPass: (title: string) => `Let pass: ${title}`,
   lockedBelow: 'Locked below the minimum, because:',
@@ -145,6 +150,27 @@ export const runWords = {
   chargedOn: 'Charged on',
 
   lowerMinimum: 'Lower the minimum',
+  lowerMinimumLead: 'With fewer units under deposit the run can go. Everyone who has ordered is told.',
+  lowerMinimumButton: (from: number, to: number) => `Lower the minimum from ${from} to ${to}`,
+  minimumSoFar: 'Minimum so far',
+  breakEven: 'No loss from, at this mix',
+  notKnown: 'not known',
+  belowBreakEven: (units: number) =>
+    `At this mix of offers fewer than ${units} units lose money. A run that goes at the new minimum may cost you some.`,
+  goOn: 'Go on',
+  moveDecideBy: 'Move decide-by',
+  moveDecideByLead: 'Once, and by at most 30 days. Everyone who has ordered is told.',
+  newDecideBy: 'New decide-by day',
+  newDecideByHint: (now: string, latest: string) => `After ${now}, at the latest ${latest}.`,
+  decideBySoFar: 'Decide by, so far',
+  callsItselfOff: 'Undecided, it calls itself off on',
+  depositedOf: (deposited: number, minimum: number) => `${deposited} of ${minimum}`,
+  moveDecideByButton: (day: string) => `Move decide-by to ${day}`,
+  mailTitle: 'The mail that goes out',
+  mailLead: 'To the first of them, word for word; each of the others gets their own order and sums.',
+  mailCount: (count: number) => plural(count, { one: '# buyer gets it', other: '# buyers get it' }),
+  mailNobody: 'Nobody has ordered, so nobody is written to.',
+  mailReason: '(Here stands the reason you write above.)',
   newMinimum: 'New minimum',
   newMinimumHint: 'It can only fall: buyers counted on it.',
   close: 'Close the run',
@@ -199,4 +225,10 @@ export const runWords = {
     workshop_suspended: 'The workshop is suspended; tried again each day.',
     cannot_charge: 'The payment account cannot take cards; tried again each day.',
   } as Record<string, string>,
+}
+
+/** Why a new decide-by day is not possible, where the general sentence says too little. */
+export const moveDecideByReasons: Record<string, string> = {
+  decide_by_past: 'Choose a day after today.',
+  posted_by_before_decide_by: 'The new day must lie before every posted-by date of the run.',
 }

@@ -1,6 +1,7 @@
 import 'server-only'
 import type { DueKind } from '@/lib/jobs/due-kinds'
 import { attemptLookUp, compareBooksDue, holdEnded, refundLookUp, refundRetry } from './due-money'
+import { ownerDigest, runForecast, runReminder } from './due-owners'
 import { balanceCharge, balanceReminder, decideByPassed, orderLapse, runPage } from './due-runs'
 import { deleteUnconfirmedSignUp } from '@/lib/services/signups/delete-unconfirmed-signup'
 
@@ -24,4 +25,7 @@ export const DUE_HANDLERS: { readonly [K in DueKind]: DueHandler } = {
   decide_by_passed: decideByPassed,
   run_page: runPage,
   compare_books: compareBooksDue,
+  run_forecast: runForecast,
+  run_reminder: runReminder,
+  owner_digest: ownerDigest,
 }

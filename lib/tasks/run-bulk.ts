@@ -20,6 +20,7 @@ const inOneAct: Worker = ({ id }, now) => workBulkItem({ itemId: id, now })
 const WORKERS: Readonly<Record<BulkKind, Worker>> = {
   invite: inOneAct,
   tell_locked: inOneAct,
+  tell_changed: inOneAct,
   ask_balances: inOneAct,
   call_off: async (item, now) => {
     const ended = await endOpenPayments(item.subjectId, now)

@@ -20,6 +20,7 @@ test('these tables are only ever added to', async () => {
     'addresses',
     'audit_entries',
     'decisions',
+    'forecasts',
     'invoices',
     'ledger_entries',
     'ledger_transfers',

@@ -157,6 +157,27 @@ export const SCREENS: Readonly<Record<string, { by: Looker; at: (found: Found) =
     by: 'owner',
     at: ({ rowlock }) => [`${ADMIN}/runs/${rowlock}/call-off`],
   },
+  '/admin/[workshop]/record': { by: 'owner', at: () => [`${ADMIN}/record`] },
+  '/admin/[workshop]/modules/[module]/interest': { by: 'owner', at: () => [`${ROWLOCK}/interest`] },
+  '/admin/[workshop]/runs/[run]/demand': {
+    by: 'owner',
+    at: ({ rowlock }) => [`${ADMIN}/runs/${rowlock}/demand`],
+  },
+  '/admin/[workshop]/runs/[run]/outcome': {
+    by: 'owner',
+    at: ({ fairlead }) => [`${ADMIN}/runs/${fairlead}/outcome`],
+  },
+  '/admin/[workshop]/runs/[run]/lower-minimum': {
+    by: 'owner',
+    at: ({ rowlock }) => [
+      `${ADMIN}/runs/${rowlock}/lower-minimum`,
+      `${ADMIN}/runs/${rowlock}/lower-minimum?minimum=20`,
+    ],
+  },
+  '/admin/[workshop]/runs/[run]/move-decide-by': {
+    by: 'owner',
+    at: ({ rowlock }) => [`${ADMIN}/runs/${rowlock}/move-decide-by`],
+  },
   '/admin/[workshop]/runs/[run]/ask-balances': {
     by: 'owner',
     at: ({ fairlead }) => [`${ADMIN}/runs/${fairlead}/ask-balances`],

@@ -85,6 +85,13 @@ export const sampleFacts: { readonly [K in MailKind]: MailProps<K> } = {
     balanceWhen: 'units_passed',
     promises,
   },
+  run_changed: {
+    ...ofOrder,
+    minimum: null,
+    decideBy: { from: '2027-05-04', to: '2027-05-28', callsOffOn: '2027-06-04' },
+    deposited: 41,
+    isWaiting: false,
+  },
   run_called_off: { ...order, cause: 'owner', reason: 'The slider is no longer made.', refundMinor: 5000 },
   balance_coming: {
     ...order,
@@ -186,6 +193,18 @@ export const sampleFacts: { readonly [K in MailKind]: MailProps<K> } = {
     invitedBy: 'Ines Tidewell',
     acceptUrl: `${site}/invitation/${token}`,
     validUntil: '2027-03-08',
+  },
+  owner_reminder: {
+    module: 'Rowlock',
+    number: 2,
+    about: 'decide_by',
+    offer: null,
+    on: '2027-05-04',
+    daysLeft: 14,
+    deposited: 41,
+    minimum: 60,
+    callsOffOn: '2027-05-11',
+    runUrl: `${site}/admin/hollow-pier/runs/7c0e`,
   },
   owner_digest: {
     on: '2027-03-01',

@@ -18,6 +18,12 @@ const facts = {
     expectedProfitMinor: 123_400,
     chanceOfLoss: 0.04,
   },
+  weighed: {
+    likelyToPay: 66.5,
+    worstInTenMinor: -18_000,
+    tenthFails: { units: 63, profitMinor: 54_000 },
+    cashLow: { units: 70, lowMinor: -210_000, on: '2027-06-01' },
+  },
 }
 const verdictOf = (over: Partial<typeof facts>, figures: object = {}) =>
   decision.verdict({ ...facts, ...over, figures: { ...facts.figures, ...figures } })
@@ -40,6 +46,26 @@ describe('the verdict', () => {
     expect(verdictOf({}, { deposited: 59, forecast: { chance: 0.834 } }).words).toBe(
       '1 unit under deposit missing to the minimum; 83 % likely to be reached.',
     )
+  })
+
+  test('is carried by a sentence of three figures', () => {
+    expect(decision.carried(facts)).toBe(
+      '67 of 70 under deposit are likely to pay; break-even at this mix is 52; the worst in ten loses €180.00.',
+    )
+    const good = { ...facts.weighed, worstInTenMinor: 1_000 }
+    expect(decision.carried({ ...facts, weighed: good })).toMatch(/even the worst in ten leaves €10\.00\.$/)
+    const none = { ...facts.weighed, worstInTenMinor: null }
+    expect(decision.carried({ ...facts, weighed: none })).toMatch(/without a cost plan nothing is known/)
+  })
+
+  test('weighs what happens when a tenth does not pay, and how low the money gets', () => {
+    expect(decision.weighedFacts(facts).map(({ value }) => value)).toEqual([
+      '-€180.00',
+      'you still make €540.00 at 63 units',
+      '-€2,100.00 on 1 June 2027',
+    ])
+    const lost = { ...facts.weighed, tenthFails: { units: 3, profitMinor: -5_000 }, cashLow: null }
+    expect(decision.weighedFacts({ ...facts, weighed: lost })[1]?.value).toBe('you lose €50.00 at 3 units')
   })
 
   test('rests on three figures, and claims none it does not have', () => {

@@ -16,6 +16,8 @@ import { getTaxReport } from '@/lib/queries/money/get-tax-report'
 import { listMembers } from '@/lib/queries/members/list-members'
 import { getPartsDesk } from '@/lib/queries/modules-admin/get-parts-desk'
 import { listModules } from '@/lib/queries/modules-admin/list-modules'
+import { getDemandBoard } from '@/lib/queries/demand/get-demand-board'
+import { getInterestBoard } from '@/lib/queries/demand/get-interest-board'
 import { listOwnOrders } from '@/lib/queries/orders/list-own-orders'
 import { getFulfilmentOrders } from '@/lib/queries/packing/get-fulfilment-orders'
 import { listBatches } from '@/lib/queries/packing/list-batches'
@@ -35,8 +37,11 @@ import { getCostDesk } from '@/lib/queries/runs/get-cost-desk'
 import { getRunPage } from '@/lib/queries/runs/get-run-page'
 import { getSchedule } from '@/lib/queries/runs/get-schedule'
 import { getWhatIfs } from '@/lib/queries/runs/get-what-ifs'
+import { getTrackRecord } from '@/lib/queries/record/get-track-record'
+import { getRunOutcome } from '@/lib/queries/runs/get-run-outcome'
 import { listRunOrders } from '@/lib/queries/runs/list-run-orders'
 import { listRuns } from '@/lib/queries/runs/list-runs'
+import { listToday } from '@/lib/queries/today/list-today'
 import { getDesk } from '@/lib/queries/workshops/get-desk'
 import { BulkItem, BulkJob, PackBatch, Part, Problem, type Person, RevisionLine } from '@/models'
 import { hoursAfter, NOW, serial } from '@/tests/support/worlds/base'
@@ -194,6 +199,23 @@ const LISTS: Readonly<
   'costs of a run': {
     ask: () => getCostDesk({ ...asked(), runId: world.run.id }),
     rows: () => 5,
+  },
+  'demand of a run': {
+    ask: () => getDemandBoard({ ...asked(), runId: world.run.id }),
+    rows: ({ people }: { people: number }) => people,
+  },
+  'interest in a module': {
+    ask: () => getInterestBoard({ ...asked(), module: world.module.slug }),
+    rows: ({ people }: { people: number }) => people,
+  },
+  'outcome of a run': { ask: () => getRunOutcome({ ...asked(), runId: world.run.id }), rows: () => 5 },
+  'track record': {
+    ask: () => getTrackRecord({ actor: people.owner, slug: world.workshop.slug }),
+    rows: () => 5,
+  },
+  'what needs the owner': {
+    ask: () => listToday(asked()),
+    rows: (items: { count: number }[]) => Math.max(...items.map(({ count }) => count)),
   },
   'modules of a workshop': { ask: () => listModules(asked()) },
   'parts list': { ask: () => getPartsDesk({ ...asked(), module: world.module.slug }) },

@@ -1,5 +1,5 @@
 import { z } from 'zod'
-import { day, link, oneLine } from '@/lib/contracts/mail-facts'
+import { count, day, link, offer, oneLine } from '@/lib/contracts/mail-facts'
 
 /** Signing in and working for a workshop. */
 export const peopleMails = {
@@ -11,6 +11,20 @@ export const peopleMails = {
     invitedBy: oneLine(),
     acceptUrl: link,
     validUntil: day,
+  }),
+  /** Subject: run, owner and what it is about; version: days since 1970 of the reminder's day. */
+  owner_reminder: z.strictObject({
+    module: oneLine(),
+    number: z.int().positive(),
+    about: z.enum(['decide_by', 'posted_by']),
+    offer: offer.nullable(),
+    on: day,
+    /** Below zero once it has passed. */
+    daysLeft: z.int(),
+    deposited: count,
+    minimum: count,
+    callsOffOn: day.nullable(),
+    runUrl: link,
   }),
   /** Subject: the membership of the owner; version: days since 1970 of `on`. */
   owner_digest: z.strictObject({
@@ -33,6 +47,7 @@ export const peopleMails = {
             'refunds_waiting',
             'parcels_ready',
             'mails_bounced',
+            'parts_late',
             'disputes',
           ]),
           count: z.int().positive(),

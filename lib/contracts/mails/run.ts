@@ -34,6 +34,25 @@ export const runMails = {
     refundMinor: amountMinor,
   }),
   /**
+   * Subject: the order; version: counts the changes of the run. Exactly one of `minimum` and `decideBy` is what changed.
+   */
+  run_changed: z.union([
+    z.strictObject({
+      ...ofOrder,
+      minimum: z.strictObject({ from: count, to: count }),
+      decideBy: z.null(),
+      deposited: count,
+      isWaiting: z.boolean(),
+    }),
+    z.strictObject({
+      ...ofOrder,
+      minimum: z.null(),
+      decideBy: z.strictObject({ from: day, to: day, callsOffOn: day }),
+      deposited: count,
+      isWaiting: z.boolean(),
+    }),
+  ]),
+  /**
    * Subject: the notice's answer row, one per order. `occasion` `broken_promise` is the mail of the day on which a
    * promise passed without a notice. `silenceMeans`, `answerBy` and `refundBy` are those of `delayRule`.
    */

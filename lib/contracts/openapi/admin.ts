@@ -7,7 +7,8 @@ import * as forms from '../module-forms'
 import * as parts from '../part-forms'
 import { ImportConfirm, ImportSettings, ImportStart } from '../part-import'
 import { PlanInput } from '../plan-forms'
-import { CallOffInput, LockInput, LowerMinimumInput, RunInput } from '../runs'
+import { CallOffInput, LockInput, LowerMinimumInput, MoveDecideByInput, RunInput } from '../runs'
+import { ActualsInput } from '../run-outcome'
 import { ClosedDaysInput } from '../schedule'
 import * as settings from '../settings'
 import { WhatIfInput, WhatIfRemoval } from '../what-ifs'
@@ -112,6 +113,7 @@ export const WORKSHOP_OPERATIONS: readonly Operation[] = [
     'part:write',
     parts.AlternateRemoval,
   ),
+  get(`${module}/interest`, 'Interest, counted, as CSV', 'demand:export', 'text/csv'),
   post(`${module}/parts`, 'Replace a parts list by CSV', 'part:write', forms.PartsInput),
   post(`${module}/samples`, 'Record that a sample was checked', 'part:check_sample', forms.SampleInput),
   post(`${module}/plan`, 'What a run of it costs and takes', 'plan:write', PlanInput),
@@ -140,6 +142,11 @@ export const RUN_OPERATIONS: readonly Operation[] = [
   post(`${run}/what-ifs`, 'Keep the plan with something different', 'cost:write', WhatIfInput),
   post(`${run}/what-ifs/remove`, 'Throw a what-if away', 'cost:write', WhatIfRemoval),
   post(`${run}/closed-days`, 'Days the workshop does not work', 'schedule:write', ClosedDaysInput),
+  post(`${run}/move-decide-by`, 'Move decide-by, once', 'run:move_decide_by', MoveDecideByInput, {
+    answer: '{decideBy, bulk}',
+  }),
+  get(`${run}/demand`, 'Interest in its module, counted, as CSV', 'demand:export', 'text/csv'),
+  post(`${run}/actuals`, 'What it really cost and yielded', 'outcome:write', ActualsInput),
   post(`${run}/close`, 'Close a run whose orders are all at an end', 'run:close'),
   get('/bulk/{bulk}', 'How far a bulk job is', 'bulk:read', '{total, done, failed}'),
 ]

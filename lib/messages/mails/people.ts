@@ -22,6 +22,21 @@ export const staffInvitation = {
   until: (day: string) => `The link works until ${day}. If you do not know the sender, do nothing.`,
 }
 
+export const ownerReminder = {
+  decideSubject: (module: string, number: number, on: string) => `${module}, run ${number}: decide by ${on}`,
+  postedSubject: (module: string, number: number, on: string) =>
+    `${module}, run ${number}: promised by ${on}`,
+  decide: (on: string, daysLeft: number, deposited: number, minimum: number) =>
+    `${daysLeft >= 0 ? `The run is to be decided by ${on}` : `The run was to be decided by ${on}`}: ${deposited} of ${minimum} under deposit.`,
+  posted: (offer: string, on: string, daysLeft: number) =>
+    `You have promised to post ${offer} by ${on}: ${plural(Math.max(0, daysLeft), { one: '# day', other: '# days' })} left, and not all is posted.`,
+  callsOff: (day: string) =>
+    `Lock it or call it off. Undecided, it calls itself off on ${day}, and everyone is paid back.`,
+  tellFirst:
+    'If it cannot be kept, tell your buyers before it passes; they may wait or cancel free of charge.',
+  action: 'Open the run',
+}
+
 export const ownerDigest = {
   subject: (workshop: string, n: number) =>
     `${workshop}: ${plural(n, { one: '# thing needs', other: '# things need' })} you`,
@@ -43,6 +58,7 @@ export const ownerDigest = {
     parcels_ready: (n: number) => plural(n, { one: '# parcel to pack', other: '# parcels to pack' }),
     mails_bounced: (n: number) =>
       plural(n, { one: '# mail that did not arrive', other: '# mails that did not arrive' }),
+    parts_late: (n: number) => plural(n, { one: '# delivery late', other: '# deliveries late' }),
     disputes: (n: number) => plural(n, { one: '# disputed payment', other: '# disputed payments' }),
   },
   action: 'Open your desk',

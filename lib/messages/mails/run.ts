@@ -19,6 +19,20 @@ export const runCalledOff = {
   nothingPaid: 'You had paid nothing, so nothing is due on either side.',
 }
 
+export const runChanged = {
+  minimumSubject: (module: string) => `${module}: the minimum is lowered`,
+  decideBySubject: (module: string) => `${module}: the decision comes later`,
+  minimum: (from: number, to: number, deposited: number) =>
+    `The run can now go with ${units(to)} under deposit instead of ${from}; ${deposited} are there already.`,
+  decideBy: (from: string, to: string) =>
+    `We decide about the run by ${to} instead of ${from}. This day moves only once.`,
+  callsItselfOff: (day: string) =>
+    `If nobody has decided by ${day}, the run calls itself off and everyone is paid back.`,
+  cancelFreely:
+    'You need not do anything. Until the run is locked you can cancel on your order page and get everything back.',
+  waiting: 'You still wait for a place and have paid nothing. You can leave the list on your order page.',
+}
+
 export const changeNotice = {
   subject: (module: string) => `${module}: something has changed, please read`,
   lead: {

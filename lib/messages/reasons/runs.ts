@@ -33,7 +33,11 @@ export const runs: Record<string, string> = {
   already_handed_over:
     'Something of this run is in the post already, so it can no longer be called off. Cancel single orders instead.',
   not_taking_deposits: 'This run does not take deposits at present.',
+  already_moved: 'Decide-by has been moved before, and it moves only once. Decide, or call the run off.',
+  not_later: 'Choose a day after the present decide-by day.',
+  too_far: 'Decide-by moves by at most 30 days. Choose an earlier day.',
   not_lower: 'The minimum can only fall: buyers counted on it.',
+  nothing_built: 'Nothing of this run has been built: it is not locked.',
   run_not_locked: 'Balances can be asked for once the run is locked.',
   nothing_to_ask: 'Every balance of this run has been announced already.',
   order_short_of_end: 'Some orders are not posted yet. Close the run when the last one is.',

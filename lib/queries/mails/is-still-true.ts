@@ -47,6 +47,7 @@ const QUESTIONS: { readonly [K in MailKind]?: Question } = {
     const isOpen = invitation?.run?.state === 'taking_deposits' && invitation.signup?.state === 'confirmed'
     return invitation?.state === 'sent' && isOpen
   },
+  run_changed: orderIs('waiting', 'awaiting_deposit', 'reserved'),
   place_free: orderIs('awaiting_deposit'),
   place_released: orderIs('expired'),
   balance_coming: orderIs('balance_due'),

@@ -4,6 +4,7 @@ import type { CostPlan } from '@/lib/core/costs/plan'
 import { dayIn } from '@/lib/core/time/zone'
 import { sequelize } from '@/lib/db/sequelize'
 import { Plan, Run, Waiver, Workshop } from '@/models'
+import { readArrivals } from './read-arrivals'
 import { readDemand } from './read-demand'
 import { readDesign } from './read-design'
 import { readMoney } from './read-money'
@@ -35,6 +36,7 @@ export async function getRunFacts(cmd: {
   const offers = await readOffers(run.id, tx)
   const orders = await readOrders(run.id, tx)
   const signUps = await readDemand(run, now, tx)
+  const coming = await readArrivals(run, now, tx)
   const design = await readDesign(run, run.revision.letter, tx)
   const money = await readMoney(run, tx)
   const waivers = await Waiver.findAll({ where: { runId }, attributes: ['key', 'reason'], transaction: tx })
@@ -56,6 +58,7 @@ export async function getRunFacts(cmd: {
     offers,
     ...orders,
     ...signUps,
+    ...coming,
     ...design,
     firstUnits: withRecorded(design.firstUnits, run.revision.firstGoodAt !== null),
     plan: await readPlan(run, tx),

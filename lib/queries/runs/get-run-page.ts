@@ -1,6 +1,6 @@
 import 'server-only'
 import type { RepayAnswer, RunPage } from '@/lib/contracts/run-page'
-import type { RunFigures } from '@/lib/contracts/runs'
+import type { RunFigures, RunWeighed } from '@/lib/contracts/runs'
 import { can, type Actor } from '@/lib/core/policy/can'
 import { readinessFigures } from '@/lib/core/states/readiness-figures'
 import { readinessOf } from '@/lib/core/states/run-guards'
@@ -83,6 +83,7 @@ function basicsOf(row: Run, facts: RunFacts) {
     today: facts.today,
     balanceWhen: row.balanceWhen,
     headStartHours: row.headStartHours,
+    decideByMoved: row.decideByMovedAt !== null,
     limitPerPerson: row.limitPerPerson,
     offers: facts.offers.map(({ kind, priceMinor, depositMinor, postedByOn }) => ({
       offer: kind,
@@ -116,13 +117,16 @@ function moneyOf({ sums, money }: RunFacts): Pick<RunPage, 'orders' | 'money'> {
 async function decidedOf(runId: string, { waivers }: RunFacts): Promise<RunPage['decided']> {
   const decision = await Decision.findOne({ where: { runId, kind: 'lock' } })
   if (!decision) return null
-  const { readiness, ...figures } = decision.figures as RunFigures & {
+  const { readiness, weighed, ...figures } = decision.figures as RunFigures & {
+    weighed: RunWeighed
     readiness: { key: string; state: string }[]
   }
   const passed = readiness.filter(({ state }) => state === 'waived').map(({ key }) => key)
   return {
     at: decision.at.toISOString(),
     figures,
+    weighed,
+    coreVersion: decision.coreVersion,
     waived: waivers.filter(({ key }) => passed.includes(key)).map(({ key, reason }) => ({ key, reason })),
   }
 }

@@ -38,7 +38,23 @@ export type OrderSums = {
   balanceMinor: number
 }
 
-export type SignUpFacts = { quantity: number; offer: OfferKind; certainty: ConversionClass }
+export type SignUpFacts = {
+  quantity: number
+  offer: OfferKind
+  certainty: ConversionClass
+  /** Part of the run's window gone when invited, 0 to 1; null while not invited. */
+  invitedAt: number | null
+}
+
+/** People who came though they were on no list. */
+export type NewcomerFacts = {
+  /** Those under deposit here, with what they took. */
+  here: { offer: OfferKind; quantity: number; people: number }[]
+  /** Days since everyone may order, up to now or the decision. */
+  daysHere: number
+  /** What earlier runs of the workshop saw, and in how many days. */
+  before: { people: number; days: number }
+}
 
 export type PartLine = PartsLine & {
   partId: string
@@ -79,7 +95,17 @@ export type RunFacts = {
   offers: OfferFacts[]
   orders: OrderTally[]
   sums: OrderSums[]
-  signUps: { confirmed: number; notOrdered: SignUpFacts[] }
+  signUps: {
+    confirmed: number
+    notOrdered: SignUpFacts[]
+    /** Per class, those who have answered: under deposit or on the way to it, and those who will not be. */
+    answered: { certainty: ConversionClass; ordered: number; declined: number }[]
+  }
+  /** The time deposits may be placed in: its length, the part gone, and the part gone when everyone was let in. */
+  window: { days: number; gone: number; opensToAll: number }
+  /** When the deposits of the workshop's earlier runs came, as parts of their windows. */
+  arrivalsSeen: number[]
+  newcomers: NewcomerFacts
   /** What earlier runs of the workshop taught, per class. */
   outcomes: { className: ConversionClass; converted: number; notConverted: number }[]
   plan: { costs: CostPlan; steps: PlannedStep[]; names: Record<string, string> } | null

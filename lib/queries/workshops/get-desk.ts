@@ -17,7 +17,9 @@ export async function getDesk(cmd: { actor: Actor; slug: string }): Promise<Desk
   const runs = await sequelize.query<Desk['runs'][number]>(RUNS, given)
   return {
     workshop: {
+      id: workshop.id,
       slug: workshop.slug,
+      locale: workshop.locale,
       name: workshop.name,
       state: workshop.state,
       currency: workshop.currency,

@@ -9,10 +9,10 @@ import { leftOf } from '@/lib/services/_steps/left-of'
 import { lockOrder } from '@/lib/services/_steps/lock-order'
 import { LIVE } from '@/lib/services/_steps/move-attempt'
 import { moveOrder } from '@/lib/services/_steps/move-order'
-import { orderMailFacts } from '@/lib/services/_steps/order-mail-facts'
 import { queueMail } from '@/lib/services/_steps/queue-mail'
 import { refundOrder } from '@/lib/services/_steps/refund-order'
 import { releasePlace } from '@/lib/services/_steps/release-place'
+import { calledOffProps } from '@/lib/services/_steps/run-mail-props'
 import { type Order, PaymentAttempt } from '@/models'
 import type { CallOffCause } from '@/models/words'
 
@@ -66,19 +66,12 @@ export async function callOffOrder(
 async function tell(tx: Transaction, order: Order, given: Given, refundMinor: number): Promise<void> {
   // What was paid outside is settled outside.
   if (order.kind === 'manual') return
-  const { ofOrder } = await orderMailFacts(tx, order)
   await queueMail(tx, {
     kind: 'run_called_off',
     workshopId: order.workshopId,
     personId: order.personId,
     subjectId: order.id,
-    props: {
-      ...ofOrder,
-      currency: order.currency,
-      cause: given.cause,
-      reason: given.cause === 'owner' ? given.reason : null,
-      refundMinor,
-    },
+    props: await calledOffProps(tx, order, { ...given, refundMinor }),
     now: given.now,
   })
 }

@@ -43,7 +43,7 @@ export async function judgeLock(
   await copyBasePlan(tx, { run, byPersonId: personId, now })
   const facts = await getRunFacts({ workshopId: run.workshopId, runId: run.id, now, tx })
   if (!facts) return refuse('not_found')
-  const { figures } = figuresOf(facts)
+  const { figures, weighed } = figuresOf(facts)
   const readiness = readinessOf(readinessFactsOf(facts, balanceMinor))
   const may = mayLock({
     deposited: figures.deposited,
@@ -52,5 +52,5 @@ export async function judgeLock(
     readiness,
     ...open,
   })
-  return may.ok ? ok({ facts, figures, readiness }) : may
+  return may.ok ? ok({ facts, figures, weighed, readiness }) : may
 }

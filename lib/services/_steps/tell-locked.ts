@@ -2,10 +2,9 @@ import 'server-only'
 import type { Transaction } from 'sequelize'
 import { ok, type Result } from '@/lib/core/result'
 import type { OrderState } from '@/lib/core/states/order'
-import { orderMailFacts } from '@/lib/services/_steps/order-mail-facts'
-import { promisesOf } from '@/lib/services/_steps/promises-of'
 import { queueMail } from '@/lib/services/_steps/queue-mail'
-import { Order } from '@/models'
+import { lockedProps } from '@/lib/services/_steps/run-mail-props'
+import { Order, Run } from '@/models'
 
 const IN_THE_RUN: readonly OrderState[] = ['reserved', 'balance_due', 'paid']
 
@@ -19,22 +18,13 @@ export async function tellLocked(
 ): Promise<Result<true, 'not_found'>> {
   const order = await Order.findByPk(given.orderId, { transaction: tx })
   if (!order || !IN_THE_RUN.includes(order.state)) return ok(true)
-  const { run, ofOrder } = await orderMailFacts(tx, order)
+  const run = await Run.findByPk(order.runId, { transaction: tx, rejectOnEmpty: true })
   await queueMail(tx, {
     kind: 'run_locked',
     workshopId: order.workshopId,
     personId: order.personId,
     subjectId: order.id,
-    props: {
-      ...ofOrder,
-      currency: order.currency,
-      deposited: given.deposited,
-      minimum: run.minimum,
-      belowMinimum: given.deposited < run.minimum ? run.lockReason : null,
-      balanceMinor: order.balanceMinor,
-      balanceWhen: run.balanceWhen,
-      promises: await promisesOf(tx, order),
-    },
+    props: await lockedProps(tx, order, { deposited: given.deposited, lockReason: run.lockReason }),
     now: given.now,
   })
   return ok(true)

@@ -7,6 +7,8 @@ import { inTransaction } from '@/lib/db/in-transaction'
 import { askBalance } from '@/lib/services/_steps/ask-balance'
 import { callOffOrder } from '@/lib/services/_steps/call-off-order'
 import { inviteSignUp } from '@/lib/services/_steps/invite-signup'
+import type { RunChange } from '@/lib/services/_steps/run-mail-props'
+import { tellChanged } from '@/lib/services/_steps/tell-changed'
 import { tellLocked } from '@/lib/services/_steps/tell-locked'
 import { BulkItem, BulkJob, Run, SignUp } from '@/models'
 import type { CallOffCause } from '@/models/words'
@@ -24,6 +26,13 @@ const WORK: Readonly<Record<Exclude<BulkKind, 'charge_balances'>, Work>> = {
   },
   tell_locked: (tx, { params }, orderId, now) =>
     tellLocked(tx, { orderId, deposited: Number(params['deposited']), now }),
+  tell_changed: (tx, { params }, orderId, now) =>
+    tellChanged(tx, {
+      orderId,
+      change: params['change'] as RunChange,
+      version: Number(params['version']),
+      now,
+    }),
   call_off: (tx, { params }, orderId, now) =>
     callOffOrder(tx, {
       orderId,

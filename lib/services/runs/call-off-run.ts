@@ -8,6 +8,7 @@ import { mayCallOff } from '@/lib/core/states/run-guards'
 import { inTransaction } from '@/lib/db/in-transaction'
 import { runWords } from '@/lib/messages/runs'
 import { CALLED_OFF_FROM } from '@/lib/services/_steps/call-off-order'
+import { countDeposited } from '@/lib/services/_steps/count-deposited'
 import { endInvitations } from '@/lib/services/_steps/end-invitations'
 import { moveRun } from '@/lib/services/_steps/move-run'
 import { recordDecision } from '@/lib/services/_steps/record-decision'
@@ -78,6 +79,7 @@ async function callOff(tx: Transaction, run: Run, by: By): Promise<Result<{ bulk
   const may = mayCallOff({ reason, handedOver })
   if (!may.ok) return may
   const from = run.state
+  const deposited = await countDeposited(tx, run.id)
   const change = { calledOffAt: now, callOffReason: reason, callOffCause: cause }
   const moved = await moveRun(tx, run, 'call_off', { now, byPersonId, change })
   if (!moved.ok) return moved
@@ -94,7 +96,11 @@ async function callOff(tx: Transaction, run: Run, by: By): Promise<Result<{ bulk
     kind: 'call_off',
     reason,
     inputs: { from, cause },
-    figures: { orders: orders.length, units: orders.reduce((sum, { unitCount }) => sum + unitCount, 0) },
+    figures: {
+      deposited,
+      orders: orders.length,
+      units: orders.reduce((sum, { unitCount }) => sum + unitCount, 0),
+    },
     byPersonId,
     now,
   })

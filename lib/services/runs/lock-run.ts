@@ -84,7 +84,7 @@ async function lock(tx: Transaction, which: Which, asked: LockAsked): Promise<An
   if (open.openSessions + open.unknownAttempts === 0) await endHolds(tx, run, now)
   const judged = await judgeLock(tx, run, asked, open)
   if (!judged.ok) return judged
-  const { facts, figures, readiness } = judged.value
+  const { facts, figures, weighed, readiness } = judged.value
   const lockReason = figures.deposited < run.minimum ? (input.reason ?? null) : null
   const change = { lockedAt: now, lockReason, plannedStarts: figures.starts || null }
   const moved = await moveRun(tx, run, 'lock', { now, byPersonId, change })
@@ -96,7 +96,7 @@ async function lock(tx: Transaction, which: Which, asked: LockAsked): Promise<An
     kind: 'lock',
     reason: lockReason,
     inputs: { facts, balanceMinor: asked.balanceMinor },
-    figures: { ...figures, readiness },
+    figures: { ...figures, weighed, readiness },
     byPersonId,
     now,
   })

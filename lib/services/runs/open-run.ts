@@ -12,6 +12,7 @@ import { paths } from '@/lib/paths'
 import { copyBasePlan } from '@/lib/services/_steps/copy-base-plan'
 import { moveRun } from '@/lib/services/_steps/move-run'
 import { recordDecision } from '@/lib/services/_steps/record-decision'
+import { setDigestDue } from '@/lib/services/_steps/set-digest-due'
 import { setRunDues } from '@/lib/services/_steps/set-run-dues'
 import { startBulk } from '@/lib/services/_steps/start-bulk'
 import { Module, Run, RunOffer, SignUp, TermsVersion, Workshop } from '@/models'
@@ -102,6 +103,7 @@ async function open(
   if (workshop.payoutsManualAt === null) await workshop.update({ payoutsManualAt: now }, { transaction: tx })
   await copyBasePlan(tx, { run, byPersonId, now })
   await setRunDues(tx, run, workshop.timeZone, now)
+  await setDigestDue(tx, workshop, now)
   await pageChanged(tx, paths.home)
   await recordDecision(tx, {
     run,

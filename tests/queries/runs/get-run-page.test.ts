@@ -1,8 +1,20 @@
 import { beforeEach, describe, expect, test } from 'vitest'
+import { stillToCome } from '@/lib/core/demand/clock'
 import { forecastUnits } from '@/lib/core/demand/forecast'
 import { sequelize } from '@/lib/db/sequelize'
 import { getRunPage } from '@/lib/queries/runs/get-run-page'
-import { Lesson, Outcome, PaymentAttempt, Plan, Refund, Revision, RevisionLine, Unit, Waiver } from '@/models'
+import {
+  Invitation,
+  Lesson,
+  Outcome,
+  PaymentAttempt,
+  Plan,
+  Refund,
+  Revision,
+  RevisionLine,
+  Unit,
+  Waiver,
+} from '@/models'
 import { hoursAfter, NOW } from '@/tests/support/worlds/base'
 import { makePartsList, makePlan, makeReady } from '@/tests/support/worlds/decision'
 import { makeOrder } from '@/tests/support/worlds/order'
@@ -85,7 +97,46 @@ describe('the forecast', () => {
     await makeOrder({ run: world.run, person: late, lines }, { state: 'expired' })
     const { figures, signUps } = await pageOf()
     expect(signUps.notOrdered).toBe(1)
-    expect(figures.forecast.mean).toBeCloseTo(1.6, 12)
+    // One of two certain people has ordered: (6 + 1) of (10 + 1) is what is believed of the other.
+    expect(figures.forecast.mean).toBeCloseTo(1 + 7 / 11, 12)
+  })
+
+  test('thinks less of invited people the longer they are silent, and counts who said no', async () => {
+    const invite = async (over: object = {}) => {
+      const { signup } = await makeSignUp(world.offers.kit)
+      await Invitation.create({
+        workshopId: world.workshop.id,
+        runId: world.run.id,
+        signupId: signup.id,
+        personId: signup.personId,
+        sentAt: world.run.openedAt!,
+        answeredAt: null,
+        ...over,
+      })
+    }
+    for (let i = 0; i < 4; i += 1) await invite()
+    await invite({ state: 'declined', answeredAt: NOW })
+    // Half of the window from the opening to decide-by.
+    const half = new Date((world.run.openedAt!.getTime() + world.run.decideByAt.getTime()) / 2)
+    const { figures, weighed } = await pageOf(null, half)
+    // The starting curve has 0.33 in by a tenth and 0.75 by nine tenths: 0.54 halfway.
+    const still = stillToCome({ alpha: 6, beta: 5, arrivedShare: 0.54, silent: 4 })
+    expect(weighed.fromListed).toBeCloseTo(still.expected, 4)
+    expect(weighed.silent).toBe(4)
+    expect(figures.forecast.mean).toBeCloseTo(weighed.fromListed + weighed.fromNewcomers, 10)
+  })
+
+  test('expects people on no list once it has been watched for a week, weighed by how deposits come', async () => {
+    await order('kit', 2, { placedAt: NOW }).then(({ order: placed }) => makeAttempt(placed))
+    const half = new Date((world.run.openedAt!.getTime() + world.run.decideByAt.getTime()) / 2)
+    expect((await pageOf(null, hoursAfter(world.run.opensToAllAt!, 24 * 7 - 1))).weighed.fromNewcomers).toBe(
+      0,
+    )
+    const { weighed } = await pageOf(null, half)
+    // By hand: everyone was let in 48 hours into the window, F(48 h of it) = 0.33 · part / 0.1; half is 0.54 in.
+    const window = (world.run.decideByAt.getTime() - world.run.openedAt!.getTime()) / 3_600_000
+    const watched = 0.54 - (0.33 * (48 / window)) / 0.1
+    expect(weighed.fromNewcomers).toBeCloseTo(((1 + 0.5) * (1 - 0.54) * 2) / watched, 3)
   })
 
   test('believes the workshop’s own history', async () => {
@@ -146,6 +197,19 @@ describe('profit', () => {
     const profit = [-30_000, -21_000, -12_000, -3000, 6000]
     const expected = profit.reduce((sum, each, k) => sum + each * chance(k), 0)
     expect(figures.expectedProfitMinor).toBe(Math.round(expected))
+  })
+
+  test('is weighed: who pays, the worst in ten, a tenth not paying, the low point of the money', async () => {
+    await makePlan(world)
+    await order('kit', 4)
+    const { weighed } = await pageOf()
+    // Four at 38 of 40. P(at most two pay) = 1 − P(3) − P(4), by the beta-binomial 0.037; P(at most 3) = 0.179: so the worst in
+    // ten pays three, which loses 30.00. Three of four pay when a tenth (a unit) does not.
+    expect(weighed.likelyToPay).toBeCloseTo(3.8, 12)
+    expect(weighed.worstInTenMinor).toBe(-3000)
+    expect(weighed.tenthFails).toEqual({ units: 3, profitMinor: -3000 })
+    // Tooling of 300.00 is paid today, four deposits of 25.00 come only with the lock.
+    expect(weighed.cashLow).toMatchObject({ units: 4, lowMinor: -30_000, on: '2027-03-01' })
   })
 
   test('takes the mix from sign-ups while nobody is under deposit, and says so', async () => {

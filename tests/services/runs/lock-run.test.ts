@@ -37,7 +37,7 @@ describe('a run that is locked', () => {
     if (!locked.ok) throw new Error(JSON.stringify(locked))
     expect(await world.run.reload()).toMatchObject({ state: 'locked', lockedAt: NOW, lockReason: null })
     const decision = await Decision.findOne({ where: { runId: world.run.id }, rejectOnEmpty: true })
-    expect(decision).toMatchObject({ kind: 'lock', coreVersion: '1', byPersonId: world.owner.id })
+    expect(decision).toMatchObject({ kind: 'lock', coreVersion: '2', byPersonId: world.owner.id })
     // By hand: two kits at 95.00, 5.00 of packaging and 0.02 of resistors each, 300.00 once: from 4 kits on no loss.
     expect(decision.figures).toMatchObject({ deposited: 2, held: 0, breakEven: 4, starts: 0 })
     expect(decision.figures['readiness']).toHaveLength(9)

@@ -48,7 +48,11 @@ describe('a run that opens', () => {
     // Decide-by is 1 April; seven days later begins at midnight of 8 April in Berlin, 22:00 before in Greenwich.
     expect(due.map(({ kind, dueAt }) => [kind, dueAt.toISOString()])).toEqual([
       ['decide_by_passed', '2027-04-07T22:00:00.000Z'],
+      // A quarter of 757 hours: 31 days, and 13 hours to the end of the last one in Hamburg.
+      ['run_forecast', '2027-03-09T06:15:00.000Z'],
       ['run_page', '2027-03-01T23:00:00.000Z'],
+      // Two weeks before the day, at nine in the morning.
+      ['run_reminder', '2027-03-18T08:00:00.000Z'],
     ])
     const decision = await Decision.findOne({ where: { runId: world.run.id }, rejectOnEmpty: true })
     expect(decision).toMatchObject({ kind: 'open_deposits', byPersonId: world.owner.id })

@@ -60,7 +60,10 @@ test('entries keep their order and their distance, and never move up', () => {
   fc.assert(
     fc.property(fc.array(fc.integer({ min: 0, max: 500 })), (some) => {
       const positions = [...some].sort((a, b) => a - b)
-      const moved = spread(positions, 18)
+      const moved = spread(
+        positions,
+        positions.map(() => 18),
+      )
       moved.forEach((at, i) => {
         expect(at).toBeGreaterThanOrEqual(positions[i]!)
         if (i > 0) expect(at - moved[i - 1]!).toBeGreaterThanOrEqual(18)

@@ -21,7 +21,7 @@ export default async function DeskLayout({ params, children }: Props) {
     { href: paths.packing(slug), label: words.packing },
   ]
   return (
-    <SignedFrame here={paths.admin(slug)} links={workshop ? links : []}>
+    <SignedFrame here={paths.admin(slug)} links={workshop ? links : []} marksCurrent>
       {children}
     </SignedFrame>
   )

@@ -1,7 +1,7 @@
 import type { Metadata } from 'next'
 import { notFound } from 'next/navigation'
 import { signedIn } from '@/app/_parts/signed-in'
-import { LinkButton } from '@/components/ui/button'
+import { ButtonRow, LinkButton } from '@/components/ui/button'
 import { PageHead } from '@/components/ui/page-head'
 import { uuid } from '@/lib/contracts/fields'
 import { runWords as words } from '@/lib/messages/runs'
@@ -32,9 +32,12 @@ export default async function RunsPage({ params, searchParams }: Props) {
         title={words.title}
         lead={words.listLead}
         aside={
-          <LinkButton href={paths.adminRunNew(slug)} kind="primary">
-            {words.newTitle}
-          </LinkButton>
+          <ButtonRow>
+            <LinkButton href={paths.adminRecord(slug)}>{words.record}</LinkButton>
+            <LinkButton href={paths.adminRunNew(slug)} kind="primary">
+              {words.newTitle}
+            </LinkButton>
+          </ButtonRow>
         }
       />
       <RunTable workshop={slug} {...runs} isFirst={after === undefined} />

@@ -29,11 +29,7 @@ export default async function RunPage({ params, searchParams }: Props) {
       />
       <RunTabs workshop={workshop} run={run} current="run" />
       <RunNotes page={page} />
-      <RunColumns
-        page={page}
-        lowered={await getFormDraft(draft, 'run-lower-minimum')}
-        closed={await getFormDraft(draft, 'run-close')}
-      />
+      <RunColumns page={page} closed={await getFormDraft(draft, 'run-close')} />
     </>
   )
 }

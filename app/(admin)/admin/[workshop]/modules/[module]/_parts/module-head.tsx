@@ -5,7 +5,7 @@ import type { ModuleDesk } from '@/lib/contracts/module-desk'
 import { modulesAdminWords as words } from '@/lib/messages/modules-admin'
 import { paths } from '@/lib/paths'
 
-const PAGES = ['overview', 'facts', 'offers', 'revisions', 'parts', 'plan', 'files'] as const
+const PAGES = ['overview', 'facts', 'offers', 'revisions', 'parts', 'plan', 'files', 'interest'] as const
 const MARKS = { draft: 'open', published: 'done', archived: 'stopped' } as const
 
 type Props = { slug: string; module: ModuleDesk['module']; page: (typeof PAGES)[number]; lead?: string }

@@ -3,17 +3,16 @@ import { Button, LinkButton } from '@/components/ui/button'
 import { Disclosure } from '@/components/ui/disclosure'
 import { Form } from '@/components/ui/form'
 import { Sheet } from '@/components/ui/sheet'
-import { NumberField } from '@/components/ui/text-field'
 import type { RunPage } from '@/lib/contracts/run-page'
 import { runWords as words } from '@/lib/messages/runs'
 import { paths } from '@/lib/paths'
 import type { KeptForm } from '@/lib/queries/forms/get-form-draft'
 
 type Kept = KeptForm | null
-type Props = { page: RunPage; lowered: Kept; closed: Kept }
+type Props = { page: RunPage; closed: Kept }
 
 /** What the owner can do with the run as it stands; what moves money leads to a page that asks once more. */
-export function DeedsSheet({ page, lowered, closed }: Props) {
+export function DeedsSheet({ page, closed }: Props) {
   const { workshop, id, state, minimum, orders } = page
   if (state === 'closed' || state === 'called_off') return null
   const to = (deed: Parameters<typeof paths.adminRunDeed>[2]) => paths.adminRunDeed(workshop.slug, id, deed)
@@ -40,24 +39,16 @@ export function DeedsSheet({ page, lowered, closed }: Props) {
         ) : null}
         {canCallOff ? <LinkButton href={to('call-off')}>{words.callOff}</LinkButton> : null}
         {state === 'taking_deposits' && minimum > 1 ? (
-          <LowerMinimum action={paths.api.adminRunDeed(workshop.slug, id, 'lower-minimum')} kept={lowered} />
+          <LinkButton href={to('lower-minimum')}>{words.lowerMinimum}</LinkButton>
+        ) : null}
+        {state === 'taking_deposits' && !page.decideByMoved ? (
+          <LinkButton href={to('move-decide-by')}>{words.moveDecideBy}</LinkButton>
         ) : null}
         {state === 'locked' ? (
           <CloseRun action={paths.api.adminRunDeed(workshop.slug, id, 'close')} kept={closed} />
         ) : null}
       </div>
     </Sheet>
-  )
-}
-
-function LowerMinimum({ action, kept }: { action: string; kept: Kept }) {
-  const form = keptForm(kept)
-  return (
-    <Disclosure summary={words.lowerMinimum} open={kept !== null}>
-      <Form action={action} form={form} foot={<Button kind="secondary">{words.lowerMinimum}</Button>}>
-        <NumberField name="minimum" label={words.newMinimum} hint={words.newMinimumHint} form={form} />
-      </Form>
-    </Disclosure>
   )
 }
 

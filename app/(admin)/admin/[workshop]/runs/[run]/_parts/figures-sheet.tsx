@@ -7,6 +7,7 @@ import { Facts } from '@/components/ui/facts'
 import { Sheet } from '@/components/ui/sheet'
 import type { RunPage } from '@/lib/contracts/run-page'
 import { formatMoney } from '@/lib/core/money/format'
+import { daysBetween } from '@/lib/core/time/day'
 import { decision } from '@/lib/messages/decision'
 import { runWords as words } from '@/lib/messages/runs'
 import { writtenNumber } from '@/lib/messages/written'
@@ -17,9 +18,13 @@ export function FiguresSheet({ page }: { page: RunPage }) {
   const { figures, curve, currency, workshop, minimum, maximum } = page
   const { deposited, forecast } = figures
   const isOpen = page.state === 'draft' || page.state === 'taking_deposits'
+  const daysLeft = Math.max(0, daysBetween(page.today, page.decideBy) + 1)
   return (
     <Sheet title={words.figures}>
       <Facts facts={factsOf(page).map((fact) => ({ ...fact, kind: 'figures' as const }))} />
+      {isOpen ? (
+        <p className="max-w-words pt-3 text-13 text-quiet">{decision.madeOf(page.weighed, daysLeft)}</p>
+      ) : null}
       <div className="pt-4">
         {curve ? (
           <>
@@ -66,6 +71,7 @@ function factsOf(page: RunPage) {
         ]
       : []),
     ...(starts === null ? [] : [{ name: words.starts, value: decision.starts(starts) }]),
+    ...decision.weighedFacts({ ...page, locale: workshop.locale }),
     { name: words.withdrawable, value: writtenNumber(page.withdrawableUnits) },
     { name: words.heldMoney, value: sum(money.heldMinor) },
     { name: words.balances, value: sum(money.balancesMinor) },

@@ -13,10 +13,10 @@ import { DeedsSheet } from './deeds-sheet'
 import { FiguresSheet } from './figures-sheet'
 import { GaugeSheet } from './gauge-sheet'
 
-type Props = { page: RunPage; lowered: KeptForm | null; closed: KeptForm | null }
+type Props = { page: RunPage; closed: KeptForm | null }
 
 /** What is so on the left, what follows from it on the right. */
-export function RunColumns({ page, lowered, closed }: Props) {
+export function RunColumns({ page, closed }: Props) {
   const readiness = readinessOfPage(page)
   const notReady = readiness.filter(({ state }) => state === 'missing' || state === 'unknown').length
   const isOpen = page.state === 'draft' || page.state === 'taking_deposits'
@@ -39,7 +39,7 @@ export function RunColumns({ page, lowered, closed }: Props) {
         ) : null}
       </Stack>
       <Stack>
-        <DeedsSheet page={page} lowered={lowered} closed={closed} />
+        <DeedsSheet page={page} closed={closed} />
         <FiguresSheet page={page} />
         <BulkSheet page={page} />
       </Stack>

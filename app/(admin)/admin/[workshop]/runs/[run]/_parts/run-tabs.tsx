@@ -7,7 +7,16 @@ import { paths } from '@/lib/paths'
 type Props = {
   workshop: string
   run: string
-  current: 'run' | 'costs' | 'what-ifs' | 'schedule' | 'orders' | 'units' | 'money'
+  current:
+    | 'run'
+    | 'demand'
+    | 'costs'
+    | 'what-ifs'
+    | 'schedule'
+    | 'orders'
+    | 'units'
+    | 'money'
+    | 'outcome'
 }
 
 /** The pages of a run, side by side. */
@@ -17,6 +26,11 @@ export function RunTabs({ workshop, run, current }: Props) {
       label={words.pages}
       tabs={[
         { href: paths.adminRun(workshop, run), label: words.decision, current: current === 'run' },
+        {
+          href: paths.adminRunPage(workshop, run, 'demand'),
+          label: words.demandTitle,
+          current: current === 'demand',
+        },
         {
           href: paths.adminRunPage(workshop, run, 'costs'),
           label: words.costsTitle,
@@ -46,6 +60,11 @@ export function RunTabs({ workshop, run, current }: Props) {
           href: paths.adminRunPage(workshop, run, 'money'),
           label: moneyWords.title,
           current: current === 'money',
+        },
+        {
+          href: paths.adminRunPage(workshop, run, 'outcome'),
+          label: words.outcomeTitle,
+          current: current === 'outcome',
         },
       ]}
     />

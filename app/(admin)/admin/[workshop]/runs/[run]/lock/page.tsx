@@ -6,6 +6,7 @@ import { readinessOfPage } from '@/lib/messages/readiness'
 import { runWords as words } from '@/lib/messages/runs'
 import { paths } from '@/lib/paths'
 import { getFormDraft } from '@/lib/queries/forms/get-form-draft'
+import { DeedMails } from '../_parts/deed-mails'
 import { DeedPage } from '../_parts/deed-page'
 import { runOfPage } from '../_parts/run-of-page'
 import { LockForm } from './_parts/lock-form'
@@ -20,7 +21,7 @@ type Props = {
 export default async function LockRunPage({ params, searchParams }: Props) {
   const { workshop, run } = await params
   const here = paths.adminRunDeed(workshop, run, 'lock')
-  const { page } = await runOfPage({ params, deed: 'run:lock', here })
+  const { actor, page } = await runOfPage({ params, deed: 'run:lock', here })
   const kept = await getFormDraft((await searchParams).draft, 'run-lock')
   const readiness = readinessOfPage(page)
   const open = readiness.filter(({ state }) => state === 'missing' || state === 'unknown')
@@ -36,6 +37,10 @@ export default async function LockRunPage({ params, searchParams }: Props) {
         <ReadinessList lines={readiness} workshop={workshop} module={page.module.slug} />
       </Sheet>
       <LockForm page={page} open={open} kept={kept} />
+      <DeedMails
+        {...{ actor, workshopId: page.workshop.id, runId: run }}
+        ahead={{ deed: 'lock', reason: kept?.values['reason'] || words.mailReason }}
+      />
     </DeedPage>
   )
 }

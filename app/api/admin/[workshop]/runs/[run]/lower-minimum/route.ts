@@ -1,4 +1,4 @@
-import { LowerMinimumInput, RunParams } from '@/lib/contracts/runs'
+import { type BulkAnswer, LowerMinimumInput, RunParams } from '@/lib/contracts/runs'
 import { route } from '@/lib/http/route'
 import { paths } from '@/lib/paths'
 import { lowerMinimum } from '@/lib/services/runs/lower-minimum'
@@ -10,8 +10,9 @@ export const POST = route(
     body: LowerMinimumInput,
     form: {
       name: 'run-lower-minimum',
-      back: ({ params, draft }) => `${paths.adminRun(params.workshop, params.run)}?draft=${draft}`,
-      done: ({ params }) => paths.adminRun(params.workshop, params.run),
+      back: ({ params, draft }) =>
+        `${paths.adminRunDeed(params.workshop, params.run, 'lower-minimum')}?draft=${draft}`,
+      done: ({ params, value }) => paths.adminBulk(params.workshop, (value as BulkAnswer).bulk),
     },
   },
   ({ actor, workshop, params, body, now }) =>
