@@ -20,7 +20,8 @@ let world: Awaited<ReturnType<typeof pier>>
 let at: { actor: Awaited<ReturnType<typeof actorOf>>; workshopId: string; module: string; now: Date }
 beforeAll(async () => {
   world = await pier()
-  await makePlan(world)
+  const { run: _, ...design } = world
+  await makePlan(design)
   at = {
     ...{ actor: await actorOf(world.owner), workshopId: world.workshop.id, module: 'rowlock' },
     now: NOW,
