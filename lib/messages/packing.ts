@@ -175,6 +175,8 @@ export const packingWords = {
   },
   stop: 'Stop',
   address: 'Goes to',
+  addressGone:
+    'It arrived more than 30 days ago, so its address is not shown here any more. The owner can look at the order.',
   ownScript: 'In the buyer’s own script',
   lines: 'In the parcel',
   linesHint: 'Tick each line as it goes in.',

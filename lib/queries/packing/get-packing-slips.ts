@@ -1,6 +1,7 @@
 import 'server-only'
 import type { PackingSlip, PackingSlips } from '@/lib/contracts/papers'
 import { can, type Actor } from '@/lib/core/policy/can'
+import { isAddressShown } from '@/lib/core/post/address-shown'
 import { slipLanguage } from '@/lib/core/post/slip-language'
 import { formatAddress } from '@/lib/core/post/address'
 import { contentsOf, findParcels } from '@/lib/queries/packing/find-parcels'
@@ -27,7 +28,7 @@ export async function getPackingSlips(cmd: {
   if (actor.kind !== 'person' || !can(actor, 'paper:print', { workshopId })) return null
   const found = await findParcels({ id: [...parcelIds], workshopId })
   const parcels = parcelIds.flatMap(
-    (id) => found.find((parcel) => parcel.id === id && parcel.state !== 'discarded') ?? [],
+    (id) => found.find((parcel) => parcel.id === id && isPrinted(parcel, now)) ?? [],
   )
   const { row: workshop, ...issue } = await getPaperIssue({ actor, workshopId, now })
   const places = await listSiblingParcels(parcelIds)
@@ -74,3 +75,7 @@ function asSlip(
     problemUrl: problemUrl(order.id),
   }
 }
+
+/** Neither taken apart nor arrived so long ago that its address is no packer's business any more. */
+const isPrinted = ({ state, deliveredAt }: Parcel, now: Date) =>
+  state !== 'discarded' && isAddressShown({ deliveredAt, now })

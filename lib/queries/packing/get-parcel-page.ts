@@ -2,6 +2,7 @@ import 'server-only'
 import type { ParcelPage } from '@/lib/contracts/packing'
 import { can, type Actor } from '@/lib/core/policy/can'
 import { formatAddress } from '@/lib/core/post/address'
+import { isAddressShown } from '@/lib/core/post/address-shown'
 import { weightCheck } from '@/lib/core/post/weight-check'
 import { mayGoOut } from '@/lib/core/states/parcel-guards'
 import { contentsOf, findParcels } from '@/lib/queries/packing/find-parcels'
@@ -27,8 +28,9 @@ export async function getParcelPage(cmd: {
   actor: Actor
   workshopId: string
   parcelId: string
+  now: Date
 }): Promise<ParcelPage | null> {
-  const { actor, workshopId, parcelId } = cmd
+  const { actor, workshopId, parcelId, now } = cmd
   if (!can(actor, 'parcel:read', { workshopId })) return null
   const [parcel] = await findParcels({ id: parcelId, workshopId })
   if (!parcel) return null
@@ -49,6 +51,7 @@ export async function getParcelPage(cmd: {
           include: [{ model: Person, as: 'packer', attributes: ['name'] }],
         })
   const isMine = actor.kind === 'person' && batch?.packerPersonId === actor.personId
+  const isShown = isAddressShown({ deliveredAt: parcel.deliveredAt, now })
   const to = formatAddress(parcel.address.facts(), { script: 'latin', from: workshop.country })
   const own = formatAddress(parcel.address.facts(), { script: 'own', from: workshop.country })
   return {
@@ -63,8 +66,8 @@ export async function getParcelPage(cmd: {
     batch: batch && { id: batch.id, name: batch.name },
     onHoldReason: parcel.onHoldReason,
     country: parcel.address.country,
-    to,
-    toOwnScript: own.join('\n') === to.join('\n') ? null : own,
+    to: isShown ? to : [],
+    toOwnScript: !isShown || own.join('\n') === to.join('\n') ? null : own,
     lines: contents.map(({ line, quantity, serials }) => ({
       line: line.id,
       module: order.run?.module?.name ?? '',

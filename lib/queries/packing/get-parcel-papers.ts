@@ -2,6 +2,7 @@ import 'server-only'
 import type { ParcelCustoms, ParcelPaper, ParcelPapers } from '@/lib/contracts/papers'
 import { can, type Actor } from '@/lib/core/policy/can'
 import { formatAddress } from '@/lib/core/post/address'
+import { isAddressShown } from '@/lib/core/post/address-shown'
 import { declareParcel } from '@/lib/queries/packing/declare-parcel'
 import { contentsOf, findParcels } from '@/lib/queries/packing/find-parcels'
 import { getPaperIssue } from '@/lib/queries/packing/get-fulfilment-orders'
@@ -21,7 +22,7 @@ type Known = {
 
 /**
  * What labels, customs forms, invoices, return slips and hand-over lists state of parcels, in the order given; those taken
- * apart are left out. Null for who may not print. Bounded: a statement per table, however many parcels.
+ * apart or arrived more than thirty days ago are left out. Null for who may not print. Bounded: a statement per table, however many parcels.
  */
 export async function getParcelPapers(cmd: {
   actor: Actor
@@ -33,7 +34,9 @@ export async function getParcelPapers(cmd: {
   if (actor.kind !== 'person' || !can(actor, 'paper:print', { workshopId })) return null
   const found = await findParcels({ id: [...parcelIds], workshopId })
   const byId = new Map(found.map((parcel) => [parcel.id, parcel]))
-  const parcels = parcelIds.flatMap((id) => byId.get(id) ?? []).filter(({ state }) => state !== 'discarded')
+  const parcels = parcelIds
+    .flatMap((id) => byId.get(id) ?? [])
+    .filter(({ state, deliveredAt }) => state !== 'discarded' && isAddressShown({ deliveredAt, now }))
   const { row: workshop, ...issue } = await getPaperIssue({ actor, workshopId, now })
   const known: Known = {
     workshop,

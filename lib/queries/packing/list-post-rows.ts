@@ -22,7 +22,7 @@ export async function listPostRows(cmd: {
 }): Promise<Row[]> {
   const { actor, workshopId, query, now } = cmd
   if (!can(actor, 'post:export', { workshopId })) return []
-  const packed = { actor, workshopId, show: 'packed', batch: query.batch, limit: MOST } as const
+  const packed = { actor, workshopId, show: 'packed', batch: query.batch, now, limit: MOST } as const
   const { items } = await listPackedParcels(packed)
   const parcelIds = items.map(({ parcel }) => parcel)
   const papers = await getParcelPapers({ actor, workshopId, parcelIds, now })

@@ -26,7 +26,7 @@ export async function packAndPost(
   const [actor, now] = [await stage.person(given.packer), await stage.now()]
   const { items } = await listPackQueue({ actor, workshopId, limit: given.most })
   for (const { parcel: parcelId } of items) {
-    const page = await getParcelPage({ actor, workshopId, parcelId })
+    const page = await getParcelPage({ actor, workshopId, parcelId, now })
     if (!page || page.expectedGrams === null) throw new Error('the demo: a parcel nobody can weigh')
     const lines = page.lines.map(({ line, quantity }) => ({ line, quantity }))
     const packed = PackInput.parse({

@@ -26,7 +26,7 @@ const slipsOf = (parcelIds: string[], over: object = {}) =>
     ...over,
   })
 const pageOf = (parcelId: string, over: object = {}) =>
-  getParcelPage({ actor: world.packer, workshopId: world.workshopId, parcelId, ...over })
+  getParcelPage({ actor: world.packer, workshopId: world.workshopId, parcelId, now: NOW, ...over })
 
 test('a parcel’s page shows address, lines, weight and services, and no money', async () => {
   const { kit, boards } = world.runOffers

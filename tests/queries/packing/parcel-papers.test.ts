@@ -1,5 +1,7 @@
 import { beforeAll, expect, test } from 'vitest'
 import { getParcelPapers } from '@/lib/queries/packing/get-parcel-papers'
+import { getParcelPage } from '@/lib/queries/packing/get-parcel-page'
+import { listPackedParcels } from '@/lib/queries/packing/list-packed-parcels'
 import { listBags } from '@/lib/queries/packing/list-bags'
 import { Offer, Part, RevisionLine } from '@/models'
 import { elsewhere, packingWorld } from '@/tests/services/packing/packing-world'
@@ -129,4 +131,26 @@ test('another workshop’s parcels do not exist, and a stranger prints nothing',
   const theirs = { actor: stranger.actor, workshopId: stranger.workshopId, parcelIds: [parcel.id], now: NOW }
   expect((await getParcelPapers(theirs))?.parcels).toEqual([])
   expect(await getParcelPapers({ ...theirs, workshopId: world.workshopId })).toBeNull()
+})
+
+test('thirty days after it arrived neither screen nor paper says where a parcel went', async () => {
+  const { parcel } = await world.queued()
+  const by = {
+    packedAt: NOW,
+    packedByPersonId: world.lene.id,
+    handedOverAt: NOW,
+    handedOverByPersonId: world.lene.id,
+  }
+  await parcel.update({ ...by, state: 'delivered', grams: 420, serviceName: 'Letter', deliveredAt: NOW })
+  const asked = { actor: world.packer, workshopId: world.workshopId }
+  const at = async (day: number) => {
+    const now = new Date(NOW.getTime() + day * 86_400_000)
+    const page = await getParcelPage({ ...asked, parcelId: parcel.id, now })
+    const papers = await getParcelPapers({ ...asked, parcelIds: [parcel.id], now })
+    const { items } = await listPackedParcels({ ...asked, show: 'handed_over', now })
+    const named = items.find((item) => item.parcel === parcel.id)?.name
+    return [page!.to.length > 0, papers!.parcels.length, named !== '']
+  }
+  expect(await at(30)).toEqual([true, 1, true])
+  expect(await at(31)).toEqual([false, 0, false])
 })

@@ -5,6 +5,7 @@ import { withParams } from '@/components/ui/with-params'
 import type { PackedParcel } from '@/lib/contracts/packing'
 import { countryName } from '@/lib/core/data/country'
 import type { Actor } from '@/lib/core/policy/can'
+import { businessNow } from '@/lib/http/business-now'
 import { packingWords as words } from '@/lib/messages/packing'
 import { paths } from '@/lib/paths'
 import { listPackedParcels } from '@/lib/queries/packing/list-packed-parcels'
@@ -23,7 +24,14 @@ type Props = {
 /** Parcels that wait to be handed over, or that were. */
 export async function PackedSheet({ actor, workshopId, slug, show, after, batch, zone }: Props) {
   const from = /^\d{1,9}$/.test(after ?? '') ? Number(after) : undefined
-  const { items, next } = await listPackedParcels({ actor, workshopId, show, after: from, batch })
+  const { items, next } = await listPackedParcels({
+    actor,
+    workshopId,
+    show,
+    after: from,
+    batch,
+    now: await businessNow(),
+  })
   const here = (mark: string | null) => withParams(paths.packing(slug), { show }, { after: mark })
   const isPacked = show === 'packed'
   return (
@@ -40,7 +48,11 @@ export async function PackedSheet({ actor, workshopId, slug, show, after, batch,
           heading: words.order,
           cell: (row) => <a href={paths.packingParcel(slug, row.parcel)}>{row.orderNumber}</a>,
         },
-        { key: 'to', heading: words.to, cell: (row) => `${row.name}, ${countryName(row.country)}` },
+        {
+          key: 'to',
+          heading: words.to,
+          cell: (row) => [row.name, countryName(row.country)].filter(Boolean).join(', '),
+        },
         { key: 'grams', heading: words.weight, kind: 'figures', cell: (row) => <Weight grams={row.grams} /> },
         ...(isPacked
           ? []

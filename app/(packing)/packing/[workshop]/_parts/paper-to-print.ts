@@ -17,7 +17,7 @@ type Asked = { actor: Actor; workshopId: string; kind: PaperKind; query: ParcelP
  */
 export async function paperToPrint({ actor, workshopId, kind, query, now }: Asked) {
   const asked = { actor, workshopId }
-  const { parcelIds, isCut } = await parcelsFor(asked, kind, query)
+  const { parcelIds, isCut } = await parcelsFor({ ...asked, now }, kind, query)
   if (kind === 'labels') await notePrinted({ ...asked, parcelIds, now })
   const papers = await getParcelPapers({ ...asked, parcelIds, now })
   if (!papers) return null
@@ -30,7 +30,7 @@ export async function paperToPrint({ actor, workshopId, kind, query, now }: Aske
 }
 
 async function parcelsFor(
-  asked: { actor: Actor; workshopId: string },
+  asked: { actor: Actor; workshopId: string; now: Date },
   kind: PaperKind,
   { parcel, ...query }: ParcelPaperQuery,
 ): Promise<{ parcelIds: string[]; isCut: boolean }> {

@@ -8,6 +8,7 @@ import { Notice } from '@/components/ui/notice'
 import { PageHead } from '@/components/ui/page-head'
 import { Sheet } from '@/components/ui/sheet'
 import { StateMark } from '@/components/ui/state-mark'
+import { businessNow } from '@/lib/http/business-now'
 import { packingWords as words } from '@/lib/messages/packing'
 import { reasonWords } from '@/lib/messages/reasons'
 import { paths } from '@/lib/paths'
@@ -43,7 +44,10 @@ export default async function ParcelRoute({ params, searchParams }: Props) {
   const { workshop: slug, parcel: parcelId } = await params
   const { actor, workshop } = await packingDesk(slug, paths.packingParcel(slug, parcelId))
   if (!z.uuid().safeParse(parcelId).success) notFound()
-  const parcel = await getParcelPage({ actor, workshopId: workshop.id, parcelId })
+  const parcel = await getParcelPage({
+    ...{ actor, workshopId: workshop.id, parcelId },
+    now: await businessNow(),
+  })
   if (!parcel) notFound()
   const { draft } = await searchParams
   const packing = await getFormDraft(draft, 'pack')
@@ -99,7 +103,11 @@ export default async function ParcelRoute({ params, searchParams }: Props) {
           </Stack>
           <div>
             <Sheet title={words.address} id="address">
-              <AddressLines lines={parcel.to} />
+              {parcel.to.length > 0 ? (
+                <AddressLines lines={parcel.to} />
+              ) : (
+                <p className="text-15 text-quiet">{words.addressGone}</p>
+              )}
               {parcel.toOwnScript ? (
                 <div className="mt-3 border-t border-rule pt-3">
                   <p className="text-13 text-quiet">{words.ownScript}</p>
