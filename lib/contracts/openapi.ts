@@ -2,6 +2,7 @@ import { z } from 'zod'
 import { DEED_RULES } from '@/lib/core/policy/deeds'
 import { RUN_OPERATIONS, WORKSHOP_OPERATIONS } from './openapi/admin'
 import type { Operation } from './openapi/operation'
+import { MONEY_OPERATIONS } from './openapi/money'
 import { ORDER_OPERATIONS, PACKING_OPERATIONS } from './openapi/orders'
 import { PUBLIC_OPERATIONS } from './openapi/public'
 
@@ -11,6 +12,7 @@ export const OPERATIONS: readonly Operation[] = [
   ...ORDER_OPERATIONS,
   ...WORKSHOP_OPERATIONS,
   ...RUN_OPERATIONS,
+  ...MONEY_OPERATIONS,
   ...PACKING_OPERATIONS,
 ]
 
