@@ -3,7 +3,8 @@ import { DEED_RULES } from '@/lib/core/policy/deeds'
 import { RUN_OPERATIONS, WORKSHOP_OPERATIONS } from './openapi/admin'
 import type { Operation } from './openapi/operation'
 import { MONEY_OPERATIONS } from './openapi/money'
-import { ORDER_OPERATIONS, PACKING_OPERATIONS } from './openapi/orders'
+import { ORDER_OPERATIONS } from './openapi/orders'
+import { PACKING_OPERATIONS } from './openapi/packing'
 import { PUBLIC_OPERATIONS } from './openapi/public'
 
 /** Every call of the API; a test compares it with the route files. The sandbox's own are no part of it. */

@@ -1,7 +1,7 @@
 import { z } from 'zod'
 import { AddressInput } from '../address'
 import { OrderInput, PayInput } from '../orders'
-import { HandOverInput, PackInput, PaperQuery, QueueQuery } from '../packing'
+import { ReportProblemInput } from '../problems'
 import type { Operation } from './operation'
 
 /** What customers call. */
@@ -63,73 +63,13 @@ export const ORDER_OPERATIONS: readonly Operation[] = [
     body: AddressInput,
     answer: 'OrderView',
   })),
-]
-
-/** What packers call. */
-export const PACKING_OPERATIONS: readonly Operation[] = [
-  {
-    method: 'GET',
-    path: '/api/packing/{workshop}/queue',
-    summary: 'Parcels to pack, oldest promise first',
-    deed: 'packing:read',
-    query: QueueQuery,
-    answer: '{items, next}',
-  },
   {
     method: 'POST',
-    path: '/api/packing/{workshop}/fill',
-    summary: 'Open the parcels of orders that became ready',
-    deed: 'parcel:open',
-    answer: 'how many',
-  },
-  {
-    method: 'POST',
-    path: '/api/packing/{workshop}/parcels/{parcel}/pack',
-    summary: 'Pack and weigh a parcel',
-    deed: 'parcel:pack',
-    body: PackInput,
-    answer: 'the parcel; 409 weight_surprise',
-  },
-  {
-    method: 'POST',
-    path: '/api/packing/{workshop}/parcels/{parcel}/reopen',
-    summary: 'Open a packed parcel again, until it is handed over',
-    deed: 'parcel:reopen',
-    answer: 'the parcel',
-  },
-  {
-    method: 'POST',
-    path: '/api/packing/{workshop}/parcels/{parcel}/hand-over',
-    summary: 'Hand a packed parcel to the post; its buyer is written to',
-    deed: 'parcel:hand_over',
-    body: HandOverInput,
-    answer: 'the parcel',
-  },
-  {
-    method: 'GET',
-    path: '/api/packing/{workshop}/list.pdf',
-    summary: 'Fulfilment list',
-    deed: 'paper:print',
-    query: PaperQuery,
-    media: 'application/pdf',
-    answer: 'the paper',
-  },
-  {
-    method: 'GET',
-    path: '/api/packing/{workshop}/slips.pdf',
-    summary: 'Packing slips of the queue',
-    deed: 'paper:print',
-    query: PaperQuery,
-    media: 'application/pdf',
-    answer: 'the papers',
-  },
-  {
-    method: 'GET',
-    path: '/api/packing/{workshop}/parcels/{parcel}/slip.pdf',
-    summary: 'Packing slip of one parcel',
-    deed: 'paper:print',
-    query: PaperQuery.pick({ size: true }),
-    media: 'application/pdf',
-    answer: 'the paper',
+    path: '/api/orders/{order}/problems',
+    summary: 'Report a problem with what arrived, or did not',
+    deed: 'self',
+    body: ReportProblemInput,
+    status: 201,
+    answer: '{problem}',
   },
 ]
