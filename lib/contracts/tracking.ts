@@ -63,7 +63,8 @@ export type PostColumn = (typeof POST_COLUMNS)[number]
 export const PostQuery = z.object({
   batch: z.preprocess((typed) => (typed === '' ? undefined : typed), z.uuid('Unknown.').optional()),
   columns: z.preprocess(
-    (typed) => (typeof typed === 'string' && typed !== '' ? typed.split(',') : undefined),
+    (typed) =>
+      typeof typed === 'string' && typed !== '' ? typed.split(',').map((name) => name.trim()) : undefined,
     z.array(z.enum(POST_COLUMNS, { error: 'Choose columns from the list.' })).optional(),
   ),
 })
