@@ -56,12 +56,11 @@ export async function* fairleadStory(stage: Stage, house: Founded, today: Date):
   yield before(26)
   const { disputes } = FAIRLEAD_BUYERS
   await payWhatIsDue(stage, disputes.email, orderOf(disputes), '4000 0000 0000 2685')
-  // Two weeks after her card was refused one order lapses; its places go to those who waited.
+  // Two weeks after her card was refused one order lapses; its places go to those who waited, whose
+  // balances are asked for as their deposits arrive.
   yield before(13)
   for (const [index, { email, card }] of FAIRLEAD_WAITING.entries())
     await payWhatIsDue(stage, email, waiting[index]!, card!)
-  yield before(12)
-  await askForBalances(stage, house, run)
   yield before(6)
   const actor = await stage.person(house.owner)
   const input = DestinationInput.parse({
