@@ -53,8 +53,8 @@ describe('the run anyone may see', () => {
       opensToAllAt: hoursAfter(NOW, -1).toISOString(),
       offers: [
         { offer: 'boards', priceMinor: 4500, depositMinor: 1000, postedBy: '2027-08-31' },
-        { offer: 'built', priceMinor: 16500, depositMinor: 4000, postedBy: '2027-08-31' },
         { offer: 'kit', priceMinor: 9500, depositMinor: 2500, postedBy: '2027-08-31' },
+        { offer: 'built', priceMinor: 16500, depositMinor: 4000, postedBy: '2027-08-31' },
       ],
     })
   })
