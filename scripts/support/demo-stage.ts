@@ -3,6 +3,7 @@ import { Pool } from 'pg'
 import { QueryTypes } from 'sequelize'
 import { env } from '@/lib/config/env'
 import { sequelize } from '@/lib/db/sequelize'
+import type { DueKind } from '@/lib/jobs/due-kinds'
 import { clock } from '@/lib/gateways/clock'
 import { closeSandboxMailbox, readSandboxMails } from '@/lib/gateways/mailer/sandbox-mailbox'
 import { payments } from '@/lib/gateways/payments'
@@ -25,6 +26,7 @@ import { startMailServer } from '../sandbox-mail/start-mail-server'
 const CONCURRENCY = 6
 /** What falls due is done a few hours late, together with what fell due meanwhile: fewer stops. */
 const LATE_MS = 6 * 3_600_000
+const DAILY: DueKind[] = ['compare_books', 'owner_digest']
 /** A job that makes another that makes another: a demo must end. */
 const MOST_ROUNDS = 200
 
@@ -132,12 +134,12 @@ async function person(email: string): Promise<Awaited<ReturnType<Stage['person']
   }
 }
 
-/** When something next falls due, here or at the provider. */
+/** When something next falls due, here or at the provider; what comes daily is done together with the rest. */
 async function nextDue(): Promise<number | null> {
   const [row] = await sequelize.query<{ ours: Date | null; theirs: string | null }>(
-    `select (select min(due_at) from due_items where done_at is null) as ours,
+    `select (select min(due_at) from due_items where done_at is null and kind not in (:daily)) as ours,
             (select min(due_at) from sandbox.objects) as theirs`,
-    { type: QueryTypes.SELECT },
+    { type: QueryTypes.SELECT, replacements: { daily: DAILY } },
   )
   const instants = [row?.ours?.getTime(), row?.theirs ? Number(row.theirs) * 1000 : undefined]
   const known = instants.filter((each) => each !== undefined)

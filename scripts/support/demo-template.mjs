@@ -5,7 +5,7 @@ import { psql } from '../database.mjs'
 import { runScript } from './application.mjs'
 import { childSettings } from './settings.mjs'
 
-const LONGEST_MS = 240_000
+const LONGEST_MS = 480_000
 const markOf = (folder) => join(folder, 'demo-template')
 
 /**

@@ -38,7 +38,7 @@ export const test = base.extend<PerTest, PerWorker>({
       await use(application)
       await application.stop()
     },
-    { scope: 'worker', timeout: 300_000 },
+    { scope: 'worker', timeout: 600_000 },
   ],
   baseURL: async ({ application }, use) => use(application.baseUrl),
   watch: [
