@@ -50,7 +50,7 @@ export async function getDemandBoard(cmd: {
       decideBy: row.decideByOn,
     },
     isExpecting: expecting,
-    daysLeft: Math.max(0, daysBetween(facts.today, row.decideByOn) + 1),
+    daysLeft: Math.max(0, daysBetween(facts.today, row.decideByOn)),
     deposited: units.deposited,
     total: figures.forecast,
     byForecast: facts.offers.map(({ kind }) => {

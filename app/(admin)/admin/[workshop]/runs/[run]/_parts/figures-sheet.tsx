@@ -18,7 +18,7 @@ export function FiguresSheet({ page }: { page: RunPage }) {
   const { figures, curve, currency, workshop, minimum, maximum } = page
   const { deposited, forecast } = figures
   const isOpen = page.state === 'draft' || page.state === 'taking_deposits'
-  const daysLeft = Math.max(0, daysBetween(page.today, page.decideBy) + 1)
+  const daysLeft = Math.max(0, daysBetween(page.today, page.decideBy))
   return (
     <Sheet title={words.figures}>
       <Facts facts={factsOf(page).map((fact) => ({ ...fact, kind: 'figures' as const }))} />
