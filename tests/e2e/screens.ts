@@ -200,6 +200,8 @@ export const SCREENS: Readonly<Record<string, { by: Looker; at: (found: Found) =
   '/packing/[workshop]/papers/list': { by: 'packer', at: () => ['/packing/hollow-pier/papers/list'] },
   '/packing/[workshop]/papers/slips': { by: 'packer', at: () => ['/packing/hollow-pier/papers/slips'] },
   '/packing/[workshop]/post': { by: 'packer', at: () => ['/packing/hollow-pier/post'] },
+  // Nobody of the demo has taken a batch; the page is asked for in the table of roles.
+  '/packing/[workshop]/batches/[batch]': { by: 'packer', at: () => [] },
   '/packing/[workshop]/papers/[paper]': {
     by: 'packer',
     at: () =>
