@@ -108,7 +108,7 @@ function EntryWords({ entry, y }: { entry: Entry; y: number }) {
 }
 
 /** Words in lines no wider than there is room; a single word that is wider stays whole. */
-export function broken(words: string, room: number): string[] {
+function broken(words: string, room: number): string[] {
   const lines: string[] = []
   for (const word of words.split(' ')) {
     const longer = lines.length === 0 ? word : `${lines.at(-1)} ${word}`

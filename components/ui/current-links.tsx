@@ -4,7 +4,7 @@ import { usePathname } from 'next/navigation'
 import { type FrameLink, LinkList } from './link-list'
 
 /** The address a page belongs under: the longest of the links that leads to it or to a page above it. */
-export function currentOf(links: readonly { href: string }[], pathname: string): string | undefined {
+function currentOf(links: readonly { href: string }[], pathname: string): string | undefined {
   return links
     .map(({ href }) => href)
     .filter((href) => pathname === href || pathname.startsWith(`${href}/`))

@@ -3,7 +3,7 @@ import { uuid } from './fields'
 import type { InvoiceView } from './papers'
 
 /** A month, 'YYYY-MM'. */
-export const month = z.string().regex(/^\d{4}-(0[1-9]|1[0-2])$/, 'Enter a month as YYYY-MM.')
+const month = z.string().regex(/^\d{4}-(0[1-9]|1[0-2])$/, 'Enter a month as YYYY-MM.')
 export const MonthQuery = z.object({ month })
 export const YearQuery = z.object({
   year: z

@@ -9,7 +9,7 @@ export const TrackingInput = z.object({
 export type TrackingInput = z.infer<typeof TrackingInput>
 
 /** What became of a parcel on its way. */
-export const reported = z.enum(['delivered', 'lost', 'returned', 'found'], {
+const reported = z.enum(['delivered', 'lost', 'returned', 'found'], {
   error: 'Choose delivered, lost, returned or found.',
 })
 export type Reported = z.infer<typeof reported>

@@ -35,6 +35,7 @@ export const moneyWords = {
   taxColumns: ['month', 'country', 'rate %', 'net', 'tax', 'gross', 'currency'],
   ordered: 'What was ordered',
   enteredBecause: 'Entered by hand',
+  returnSummary: 'The goods are back',
   returnLead:
     'The buyer has withdrawn and sends the goods back. Price and standard postage go back when they are here, or when the buyer shows that they were sent.',
   returnButton: (sum: string) => `The goods are back: pay ${sum} back`,

@@ -36,7 +36,7 @@ type Asked = {
 type Placers = { readonly [K in OfferKind]?: string }
 
 /** Sentences for what the file itself is, not what a cell says. */
-export const IMPORT_WORDS = {
+const IMPORT_WORDS = {
   not_text: 'This file is not text. Save the list as CSV in your spreadsheet, then choose that file.',
   empty: 'There are headings at most, but no lines.',
   broken: (line: number, column: number) =>

@@ -25,12 +25,14 @@ export function OrderDeeds({ order, slug, kept }: Props) {
   return (
     <Sheet title={runWords.deeds}>
       {state === 'withdrawn' ? (
-        <div className="flex flex-col items-start gap-3">
-          <p className="max-w-words">{words.returnLead}</p>
-          <DeedForm action={paths.api.adminOrderDeed(slug, id, 'return')}>
-            <Button>{words.returnButton(owed)}</Button>
-          </DeedForm>
-        </div>
+        <Disclosure summary={words.returnSummary}>
+          <div className="flex flex-col items-start gap-3">
+            <p className="max-w-words">{words.returnLead}</p>
+            <DeedForm action={paths.api.adminOrderDeed(slug, id, 'return')}>
+              <Button kind="destructive">{words.returnButton(owed)}</Button>
+            </DeedForm>
+          </div>
+        </Disclosure>
       ) : null}
       {state === 'lapsed' ? (
         <div className="flex flex-col items-start gap-3">
